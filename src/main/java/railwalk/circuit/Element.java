@@ -1,0 +1,38 @@
+package railwalk.circuit;
+
+import java.util.List;
+
+/**
+ * A part of the amplifier. Volts of a two-terminal part are those of {@code a} against {@code b},
+ * its current flows from a through the part to b.
+ */
+public sealed interface Element
+    permits Resistor,
+        Capacitor,
+        Inductor,
+        VoltageSource,
+        CurrentSource,
+        Winding,
+        Diode,
+        ControlledSource,
+        Coupling,
+        Potentiometer,
+        Switch,
+        Fuse,
+        Lamp,
+        GlowLamp,
+        Wire,
+        AmplifierSection,
+        RectifierSection,
+        RegulatorSection,
+        StandIn {
+
+  /** Returns the name as charts print it: upper case, without the X of an X line. */
+  String name();
+
+  /** Returns the nodes it touches, in netlist order, repeated where it touches one twice. */
+  List<Node> nodes();
+
+  /** Calls the visitor's method for this kind of part. */
+  <R> R accept(ElementVisitor<R> visitor);
+}

@@ -1,0 +1,25 @@
+package railwalk.circuit;
+
+import java.util.List;
+import railwalk.device.GasLaw;
+import railwalk.device.SectionType;
+
+/** A glow-discharge regulator tube. */
+public record RegulatorSection(
+    String name, String bottle, String section, SectionType type, Node anode, Node cathode)
+    implements Element {
+  @Override
+  public List<Node> nodes() {
+    return List.of(anode, cathode);
+  }
+
+  @Override
+  public <R> R accept(ElementVisitor<R> visitor) {
+    return visitor.visit(this);
+  }
+
+  /** Returns the section's law. */
+  public GasLaw law() {
+    return (GasLaw) type.law();
+  }
+}

@@ -1,0 +1,52 @@
+package railwalk.circuit;
+
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * A transformer winding, tapped or not, or the wall.
+ *
+ * <p>Each section's first node is in phase with the other windings' first ends; along a tapped
+ * winding all sections have one sense, so that its two ends are in opposite phase against a tap
+ * between them.
+ *
+ * @param sections from the first end to the last; at least one
+ * @param atLineVolts line volts at which {@code openRmsVolts} hold; NaN: the design volts of the
+ *     line
+ * @param transformer name of the transformer whose primary it shares; empty when none
+ * @param wall whether this is the wall outlet itself (no isolation from the line)
+ */
+public record Winding(
+    String name, List<Section> sections, double atLineVolts, String transformer, boolean wall)
+    implements Element {
+  @Override
+  public List<Node> nodes() {
+    return nodeList();
+  }
+
+  @Override
+  public <R> R accept(ElementVisitor<R> visitor) {
+    return visitor.visit(this);
+  }
+
+  /**
+   * The turns between two neighbouring ends or taps.
+   *
+   * @param openRmsVolts volts rms of a against b at no load, never negative
+   * @param ohms winding resistance at DC; NaN when not given
+   */
+  public record Section(Node a, Node b, double openRmsVolts, double ohms) {}
+
+  /** Keeps a copy of the sections. */
+  public Winding {
+    sections = List.copyOf(sections);
+  }
+
+  /** Returns the ends and taps in order. */
+  private List<Node> nodeList() {
+    List<Node> nodes = new ArrayList<>();
+    nodes.add(sections.get(0).a());
+    sections.forEach(section -> nodes.add(section.b()));
+    return nodes;
+  }
+}
