@@ -22,6 +22,7 @@ public sealed interface Element
         Lamp,
         GlowLamp,
         Wire,
+        Filament,
         AmplifierSection,
         RectifierSection,
         RegulatorSection,

@@ -32,6 +32,8 @@ public interface ElementVisitor<R> {
 
   R visit(Wire wire);
 
+  R visit(Filament filament);
+
   R visit(AmplifierSection amplifierSection);
 
   R visit(RectifierSection rectifierSection);
