@@ -105,6 +105,14 @@ public record Circuit(
         words);
   }
 
+  /**
+   * Returns this circuit as {@code state} sets it: switches, tubes out or of another type,
+   * controls, line volts. Nodes keep their places.
+   */
+  public Circuit inState(State state) {
+    return CircuitStates.apply(this, state);
+  }
+
   /** Returns this circuit read with another meter. */
   public Circuit withMeter(Meter changed) {
     return new Circuit(

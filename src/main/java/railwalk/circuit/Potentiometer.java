@@ -19,4 +19,9 @@ public record Potentiometer(String name, Node a, Node wiper, Node b, double ohms
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  /** Returns the control set elsewhere. */
+  public Potentiometer setTo(double changedShare) {
+    return new Potentiometer(name, a, wiper, b, ohms, changedShare);
+  }
 }

@@ -24,4 +24,9 @@ public record Switch(String name, Node common, List<Node> poles, int position) i
   public Switch {
     poles = List.copyOf(poles);
   }
+
+  /** Returns the switch on another position. */
+  public Switch onPosition(int changed) {
+    return new Switch(name, common, poles, changed);
+  }
 }
