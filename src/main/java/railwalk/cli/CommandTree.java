@@ -1,0 +1,59 @@
+package railwalk.cli;
+
+import java.util.List;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Model.OptionSpec;
+
+/** All commands under the program's name. */
+final class CommandTree {
+  private static final List<Command> COMMANDS = List.of(new CompletionCommand());
+
+  private CommandTree() {}
+
+  /** Returns the parser for the whole command line. */
+  static CommandLine build() {
+    CommandSpec root = named("railwalk", null);
+    root.usageMessage()
+        .description(
+            "Works out the DC voltages of a valve amplifier from its traced netlist and prints"
+                + " them as a chart for the bench.")
+        .footer(
+            "",
+            "Exit codes: 0 done, 1 check found errors, 2 could not do it.",
+            "High voltage kills. A low figure on paper is never proof that a point is safe.");
+    for (Command command : COMMANDS) {
+      CommandSpec spec = command.spec();
+      root.addSubcommand(spec.name(), spec);
+    }
+    return new CommandLine(root);
+  }
+
+  /** Returns a command's bare spec: its name, --help and --version. */
+  static CommandSpec named(String name, @Nullable Command command) {
+    return bare(command)
+        .name(name)
+        .version("railwalk " + version())
+        .addOption(
+            OptionSpec.builder("-h", "--help")
+                .usageHelp(true)
+                .description("Print this help and stop.")
+                .build())
+        .addOption(
+            OptionSpec.builder("-V", "--version")
+                .versionHelp(true)
+                .description("Print the version and stop.")
+                .build());
+  }
+
+  private static CommandSpec bare(@Nullable Command command) {
+    return command == null ? CommandSpec.create() : CommandSpec.wrapWithoutInspection(command);
+  }
+
+  private static String version() {
+    return Optional.ofNullable(Main.class.getPackage().getImplementationVersion())
+        .orElse("(not packaged)");
+  }
+}
