@@ -23,7 +23,7 @@ final class CommandTree {
         .footer(
             "",
             "Exit codes: 0 done, 1 check found errors, 2 could not do it.",
-            "High voltage kills. A low figure on paper is never proof that a point is safe.");
+            "High voltage kills. No small number in a chart makes a point safe to touch.");
     for (Command command : COMMANDS) {
       CommandSpec spec = command.spec();
       root.addSubcommand(spec.name(), spec);
