@@ -5,6 +5,11 @@ import java.util.Optional;
 
 /** The tube types Railwalk knows, looked up by any of their names. */
 public interface Catalogue {
+  /** Returns the catalogue that comes with Railwalk; only what is asked for is read. */
+  static Catalogue standard() {
+    return ResourceCatalogue.Holder.STANDARD;
+  }
+
   /** Returns all types, sorted by name. */
   List<TubeType> types();
 
@@ -16,4 +21,7 @@ public interface Catalogue {
 
   /** Returns up to three names close to {@code name}, nearest first, for a "did you mean". */
   List<String> near(String name);
+
+  /** Returns the data file of the type that {@code name} stands for, with its published points. */
+  Optional<DataFile> file(String name);
 }
