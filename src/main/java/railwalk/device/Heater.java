@@ -21,4 +21,9 @@ public record Heater(
   public Heater {
     connections = List.copyOf(connections);
   }
+
+  /** A heater without a tap. */
+  public Heater(List<Connection> connections, boolean directlyHeated, boolean cathodeJoined) {
+    this(connections, Double.NaN, directlyHeated, cathodeJoined);
+  }
 }
