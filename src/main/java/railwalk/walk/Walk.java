@@ -3,6 +3,7 @@ package railwalk.walk;
 import java.util.List;
 import java.util.Map;
 import railwalk.circuit.Circuit;
+import railwalk.circuit.Node;
 
 /**
  * The walk through a circuit as a graph: from the rectifiers through droppers and chokes to the
@@ -16,6 +17,14 @@ public final class Walk {
   static SupplyMap of(Circuit circuit, List<RippleGroup> groups) {
     List<DcBranch> branches = DcBranches.of(circuit);
     DcReach reach = DcReach.of(circuit, branches, groups);
-    return new SupplyMap(groups, List.of(), reach.undefined(), reach.idleSections(), Map.of());
+    Grounds grounds = Grounds.of(circuit, branches, groups);
+    Electrodes electrodes = Electrodes.of(circuit);
+    List<Root> roots = Root.of(circuit, groups, grounds);
+    Ladder ladder = Ladder.of(circuit, branches, groups, grounds, roots);
+    Filters filters = Filters.of(circuit, grounds, electrodes);
+    List<SupplyNode> supplyNodes =
+        SupplyTree.of(circuit, ladder, electrodes, filters, grounds, groups);
+    Map<Node, Node> feeds = Feeds.of(circuit, ladder, electrodes, grounds, supplyNodes);
+    return new SupplyMap(groups, supplyNodes, reach.undefined(), reach.idleSections(), feeds);
   }
 }
