@@ -50,6 +50,15 @@ public final class Quantity {
     return of(watts, "W");
   }
 
+  /** Returns a share in whole per cent: {@code 62 %}. */
+  public static String percent(double share) {
+    if (Double.isNaN(share)) {
+      return UNKNOWN;
+    }
+    return signed(new BigDecimal(100 * share).setScale(0, RoundingMode.HALF_EVEN).toString())
+        + " %";
+  }
+
   /**
    * Returns {@code value} with three significant digits, the SI prefix that leaves one to three
    * digits before the point, and {@code unit}. Trailing zeros after the point are dropped.

@@ -1,0 +1,196 @@
+package railwalk.chart;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.stream.Stream;
+import railwalk.circuit.Bottle;
+import railwalk.circuit.Capacitor;
+import railwalk.circuit.Circuit;
+import railwalk.circuit.Diode;
+import railwalk.circuit.Node;
+import railwalk.circuit.Winding;
+import railwalk.source.Diagnostic;
+import railwalk.units.Quantity;
+import railwalk.walk.RippleGroup;
+
+/** The cautions that go with a chart: some always, some where the circuit asks for them. */
+final class Cautions {
+  /** Code of the finding that line and chassis are one. */
+  static final String HOT_CHASSIS = "hot-chassis";
+
+  private final ChartInput input;
+  private final Column first;
+  private final Circuit circuit;
+  private final Wording wording;
+
+  Cautions(ChartInput input, Wording wording) {
+    this.input = input;
+    this.first = input.first();
+    this.circuit = first.circuit();
+    this.wording = wording;
+  }
+
+  /** Returns one sentence for the foot of every sheet. */
+  static String standing() {
+    return "Computed figures: a low one is never proof that a point is safe.";
+  }
+
+  /** Returns the large box, where a finding says that the line reaches the chassis. */
+  Optional<Caution> hotChassis() {
+    List<String> points =
+        Stream.concat(
+                input.diagnostics().stream(),
+                input.columns().stream().flatMap(c -> c.findings().stream()))
+            .filter(d -> d.code().equals(HOT_CHASSIS))
+            .map(Diagnostic::message)
+            .distinct()
+            .toList();
+    if (points.isEmpty()) {
+      return Optional.empty();
+    }
+    List<String> all = new ArrayList<>(points);
+    all.add(
+        wording.say(
+            "Touch nothing metal while the plug is in. Work behind an isolating transformer only, and"
+                + " measure chassis to a true {ground} before every session."));
+    return Optional.of(new Caution(Caution.Weight.LARGE, "Hot chassis", all));
+  }
+
+  /** Returns the box of cautions. */
+  Caution box() {
+    List<String> points = new ArrayList<>();
+    points.add(highVolts());
+    tappedWinding().ifPresent(points::add);
+    points.add(
+        "This chart is for people trained to work on live equipment; anyone else hands the"
+            + " amplifier to a qualified technician. House wiring is a licensed electrician’s work,"
+            + " and local rules come before anything printed here.");
+    points.add(discharge());
+    points.add(
+        "One hand only, the other away from metal. Clip the negative lead first, then probe. Never"
+            + " alone, no rings, no watch.");
+    points.add(
+        "Meter, leads and probes must be rated for these volts and for the measurement category of"
+            + " the circuit.");
+    points.add(lineOnChassis());
+    points.add(powerUp());
+    points.add("Replace fuses by the same type and value, nothing else.");
+    points.add(
+        "All figures here are computed. A low figure on paper is never proof that a point is safe:"
+            + " measure before you touch.");
+    return new Caution(Caution.Weight.PLAIN, "Before you measure", points);
+  }
+
+  private String highVolts() {
+    Optional<Node> highest =
+        circuit.nodes().stream()
+            .filter(n -> !Double.isNaN(first.point().volts(n)))
+            .max(Comparator.comparingDouble(n -> Math.abs(first.point().volts(n))));
+    String here =
+        highest
+            .map(
+                n ->
+                    " The highest on this chart is "
+                        + Quantity.volts(first.point().volts(n))
+                        + " at "
+                        + n.name()
+                        + "; it rises when {tubes} are out.")
+            .orElse("");
+    return wording.say(
+        "These volts kill. More than 300 V DC is ordinary under such a chassis, 500 V common in"
+            + " larger amplifiers, 700 V and more does occur, and a few tens of milliamperes through"
+            + " the chest are enough."
+            + here);
+  }
+
+  private Optional<String> tappedWinding() {
+    return first.map().groups().stream()
+        .map(RippleGroup::elements)
+        .flatMap(List::stream)
+        .filter(Winding.class::isInstance)
+        .map(Winding.class::cast)
+        .filter(w -> w.sections().size() > 1)
+        .max(Comparator.comparingDouble(this::endToEndVolts))
+        .map(
+            w ->
+                w.name()
+                    + " has "
+                    + Quantity.volts(endToEndVolts(w))
+                    + " AC from end to end, beyond the range of many meters: read each half to the"
+                    + " tap, never across the whole.");
+  }
+
+  private double endToEndVolts(Winding winding) {
+    double written = winding.sections().stream().mapToDouble(Winding.Section::openRmsVolts).sum();
+    return written * circuit.line().scale(winding.atLineVolts());
+  }
+
+  private String discharge() {
+    String text =
+        "Pull the plug for everything but the reading itself. Capacitors stay charged: bring each"
+            + " down through a power resistor on insulated clips, leave the clip on, check with the"
+            + " meter, then check again.";
+    return canBelowReference()
+        ? text
+            + " Here a supply capacitor’s can or negative end is not at the reference: it carries"
+            + " volts of its own."
+        : text;
+  }
+
+  /** Returns whether a reservoir stands with its negative end off the reference. */
+  private boolean canBelowReference() {
+    List<Node> outputs =
+        first.map().groups().stream().map(RippleGroup::outputs).flatMap(List::stream).toList();
+    return circuit.elements(Capacitor.class).stream()
+        .filter(c -> outputs.contains(c.a()) || outputs.contains(c.b()))
+        .map(c -> outputs.contains(c.a()) ? c.b() : c.a())
+        .filter(n -> !outputs.contains(n))
+        .mapToDouble(n -> first.point().volts(n))
+        .anyMatch(volts -> Math.abs(volts) > 1);
+  }
+
+  private String lineOnChassis() {
+    String general =
+        "Transformerless sets and old ones with a two-wire cord can have the {line} on the chassis,"
+            + " through a capacitor or outright. Have a qualified person replace a"
+            + " {line}-to-chassis capacitor by a safety-rated part.";
+    if (!lineIsInTheCircuit()) {
+      return wording.say(general);
+    }
+    return wording.say(
+        general
+            + " This one is wired to the {line}: feed it from an isolating transformer (a variable"
+            + " transformer does not isolate; behind an isolating one a {ground}-fault trip no longer"
+            + " protects you). Never join a live chassis to {ground} or to a scope’s clip.");
+  }
+
+  private boolean lineIsInTheCircuit() {
+    return circuit.elements(Winding.class).stream().anyMatch(Winding::wall)
+        || hotChassis().isPresent();
+  }
+
+  private String powerUp() {
+    StringBuilder text =
+        new StringBuilder(
+            "First power-up through a series lamp, with a load on the output. Glass is hot enough"
+                + " to burn.");
+    if (circuit.bottles().stream().anyMatch(Cautions::holdsMercury)) {
+      text.append(" There is mercury in this set: broken glass means poisonous vapour.");
+    }
+    if (circuit.elements(Diode.class).stream().anyMatch(Cautions::isSelenium)) {
+      text.append(" A burnt selenium rectifier gives off poisonous fumes: air the room.");
+    }
+    return text.toString();
+  }
+
+  private static boolean holdsMercury(Bottle bottle) {
+    return bottle.type().summary().toLowerCase(Locale.ROOT).contains("mercury");
+  }
+
+  private static boolean isSelenium(Diode diode) {
+    return diode.typeName().toUpperCase(Locale.ROOT).startsWith("SELEN");
+  }
+}

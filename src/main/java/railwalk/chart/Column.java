@@ -1,0 +1,30 @@
+package railwalk.chart;
+
+import java.util.List;
+import railwalk.circuit.Circuit;
+import railwalk.solve.OperatingPoint;
+import railwalk.source.Diagnostic;
+import railwalk.spread.Bands;
+import railwalk.walk.SupplyMap;
+
+/**
+ * One column of the chart: the amplifier solved in one state.
+ *
+ * @param state its name; empty for the netlist as it stands
+ * @param findings what was found in this state, besides what the text itself gave rise to
+ */
+public record Column(String state, OperatingPoint point, Bands bands, List<Diagnostic> findings) {
+  public Column {
+    findings = List.copyOf(findings);
+  }
+
+  /** Returns the circuit in this state. */
+  public Circuit circuit() {
+    return point.circuit();
+  }
+
+  /** Returns the walk of the circuit in this state. */
+  public SupplyMap map() {
+    return point.map();
+  }
+}

@@ -1,0 +1,157 @@
+package railwalk.chart;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Collectors;
+import railwalk.circuit.Circuit;
+import railwalk.circuit.Line;
+import railwalk.circuit.Meter;
+import railwalk.circuit.Potentiometer;
+import railwalk.circuit.Spread;
+import railwalk.circuit.State;
+import railwalk.circuit.Switch;
+import railwalk.units.Quantity;
+
+/** The first page: what the figures hold for, and the cautions. */
+final class ConditionsPage {
+  private final ChartInput input;
+  private final Circuit circuit;
+  private final Wording wording;
+
+  ConditionsPage(ChartInput input, Wording wording) {
+    this.input = input;
+    this.circuit = input.first().circuit();
+    this.wording = wording;
+  }
+
+  Page page() {
+    Cautions cautions = new Cautions(input, wording);
+    List<Block> blocks = new ArrayList<>();
+    cautions.hotChassis().ifPresent(blocks::add);
+    blocks.add(new Heading("Conditions"));
+    blocks.add(new KeyFigures(conditions()));
+    blocks.add(new FillIn(List.of("Date", "Owner’s mark", "Technician", "Meter used")));
+    blocks.add(cautions.box());
+    return new Page("", blocks);
+  }
+
+  /** Returns the conditions in one line, for the head of every sheet. */
+  String inOneLine() {
+    Line line = circuit.line();
+    String volts =
+        line.stated()
+            ? Quantity.volts(line.volts()) + wording.say(" {line}")
+            : "windings as written";
+    return volts
+        + " · "
+        + meterShort(circuit.meter())
+        + " meter · black lead on "
+        + circuit.reference().name();
+  }
+
+  private List<KeyFigures.Entry> conditions() {
+    List<KeyFigures.Entry> entries = new ArrayList<>();
+    entries.add(plain(wording.say("{Line}"), lineText(circuit.line())));
+    entries.add(plain("Meter", meterText(circuit.meter())));
+    entries.add(new KeyFigures.Entry("Black lead on", circuit.reference().name(), true));
+    entries.add(
+        plain(
+            "Reference",
+            "all volts are DC against "
+                + circuit.reference().name()
+                + (chassisApart()
+                    ? ", which is not the chassis: clip the black lead there, not to metal"
+                    : "")));
+    entries.add(plain("Signal", "none; load connected to the output"));
+    for (Potentiometer control : circuit.elements(Potentiometer.class)) {
+      entries.add(plain(control.name(), controlText(control)));
+    }
+    for (Switch contact : circuit.elements(Switch.class)) {
+      entries.add(plain(contact.name(), "switch " + SwitchWords.joined(contact)));
+    }
+    entries.add(plain(wording.say("{Tubes} in"), tubesIn()));
+    entries.add(plain("Low–high", bandText(circuit.spread())));
+    for (State state : statesShown()) {
+      entries.add(plain("State " + state.name(), new StateWords(circuit, wording).changes(state)));
+    }
+    return entries;
+  }
+
+  private List<State> statesShown() {
+    return circuit.states().stream()
+        .filter(s -> input.states().stream().anyMatch(c -> c.state().equals(s.name())))
+        .toList();
+  }
+
+  private boolean chassisApart() {
+    return circuit.node("chassis").filter(n -> !n.equals(circuit.reference())).isPresent();
+  }
+
+  private String lineText(Line line) {
+    String hertz = Quantity.of(line.hertz(), "Hz");
+    if (!line.stated()) {
+      return "not stated: windings as written, " + hertz;
+    }
+    String text = Quantity.volts(line.volts()) + " rms, " + hertz;
+    return line.designVolts() == line.volts()
+        ? text
+        : text + "; windings are given for " + Quantity.volts(line.designVolts());
+  }
+
+  private static String meterShort(Meter meter) {
+    return Double.isNaN(meter.ohmsPerVolt())
+        ? Quantity.ohms(meter.ohms())
+        : Quantity.ohms(meter.ohmsPerVolt()) + "/V";
+  }
+
+  private static String meterText(Meter meter) {
+    if (Double.isNaN(meter.ohmsPerVolt())) {
+      return meterShort(meter) + " on every range";
+    }
+    String ranges =
+        meter.rangesVolts().stream().map(Quantity::plainVolts).collect(Collectors.joining(", "));
+    return meterShort(meter) + "; ranges " + ranges + " V, each point on the lowest that holds it";
+  }
+
+  private static String controlText(Potentiometer control) {
+    return Quantity.ohms(control.ohms())
+        + " at "
+        + Quantity.percent(control.share())
+        + " (0 % has the wiper at "
+        + control.b().name()
+        + ", 100 % at "
+        + control.a().name()
+        + ")";
+  }
+
+  private String tubesIn() {
+    List<Socket> sockets = Socket.in(circuit);
+    if (sockets.isEmpty()) {
+      return "none";
+    }
+    return sockets.stream()
+        .map(s -> s.name() + " " + s.typeName())
+        .collect(Collectors.joining(", ", "all: ", ""));
+  }
+
+  private String bandText(Spread spread) {
+    String tubes =
+        Double.isNaN(spread.tube())
+            ? "each {tube} type’s own limits"
+            : "{tube} current ±" + Quantity.percent(spread.tube());
+    return wording.say(
+        "nine healthy amplifiers in ten fall between: first order, ±1.645 standard deviations, with"
+            + " resistors ±"
+            + Quantity.percent(spread.resistor())
+            + " where no tolerance is given, "
+            + tubes
+            + ", windings ±"
+            + Quantity.percent(spread.winding())
+            + ", {line} ±"
+            + Quantity.percent(spread.line()));
+  }
+
+  private static KeyFigures.Entry plain(String label, String text) {
+    return new KeyFigures.Entry(label, text, false);
+  }
+}

@@ -1,0 +1,107 @@
+package railwalk.chart;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Objects;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import railwalk.circuit.Element;
+import railwalk.circuit.Node;
+import railwalk.circuit.VoltageSource;
+import railwalk.circuit.Winding;
+import railwalk.units.Quantity;
+import railwalk.walk.RippleGroup;
+import railwalk.walk.SupplyNode;
+
+/** Lays the supply trees out as a {@link Ladder}. */
+final class LadderBuilder {
+  private final Column column;
+  private final PointCells cells;
+  private final SupplyFlow flow;
+
+  LadderBuilder(Column column, PointCells cells) {
+    this.column = column;
+    this.cells = cells;
+    this.flow = new SupplyFlow(column);
+  }
+
+  Ladder ladder() {
+    return new Ladder(
+        column.map().supplyNodes().stream()
+            .filter(s -> s.parent() == null)
+            .map(this::feed)
+            .toList());
+  }
+
+  private Ladder.Feed feed(SupplyNode first) {
+    Ladder.Span rail = span(first);
+    if (first.group() < 0) {
+      List<VoltageSource> sources =
+          column.circuit().elements(VoltageSource.class).stream()
+              .filter(v -> v.nodes().contains(first.node()))
+              .toList();
+      String name = sources.stream().map(VoltageSource::name).collect(Collectors.joining(" "));
+      return new Ladder.Feed(
+          Ladder.Source.FIXED_SOURCE, name.isEmpty() ? "source" : name, List.of(), rail);
+    }
+    RippleGroup group = column.map().groups().get(first.group());
+    List<String> tubes = GroupWords.rectifierTubes(group);
+    List<String> lines = new ArrayList<>();
+    if (!tubes.isEmpty()) {
+      lines.add(
+          tubes.stream()
+              .flatMap(name -> column.circuit().bottle(name).stream())
+              .map(bottle -> bottle.type().name())
+              .distinct()
+              .collect(Collectors.joining(" ")));
+    }
+    lines.addAll(
+        group.elements().stream()
+            .filter(Winding.class::isInstance)
+            .map(w -> GroupWords.windingVolts((Winding) w, column.circuit().line()))
+            .toList());
+    lines.add(group.arrangement());
+    return new Ladder.Feed(
+        tubes.isEmpty() ? Ladder.Source.DIODE_RECTIFIER : Ladder.Source.TUBE_RECTIFIER,
+        String.join(" ", GroupWords.rectifiers(group)),
+        lines,
+        rail);
+  }
+
+  private Ladder.Span span(SupplyNode supply) {
+    List<Ladder.Part> parts = supply.droppers().stream().map(this::part).toList();
+    return new Ladder.Span(parts, stop(supply));
+  }
+
+  private Ladder.Part part(Element dropper) {
+    PartFace face = PartFace.of(dropper);
+    return new Ladder.Part(
+        face.symbol(),
+        dropper.name(),
+        face.value(),
+        PartLoad.of(dropper, column.point()).inShort());
+  }
+
+  private Ladder.Stop stop(SupplyNode supply) {
+    Node node = supply.node();
+    List<Ladder.Span> spans =
+        column.map().supplyNodes().stream()
+            .filter(child -> Objects.equals(child.parent(), node))
+            .map(this::span)
+            .sorted(Comparator.comparingInt(span -> -span.to().depth()))
+            .toList();
+    List<String> lines =
+        Stream.of(
+                cells.band(node).isEmpty() ? "" : cells.band(node) + " V",
+                flow.usedHere(supply).map(amps -> Quantity.amps(amps) + " used here").orElse(""),
+                column
+                    .point()
+                    .rippleVoltsRms(node)
+                    .map(volts -> "ripple " + Quantity.of(volts, "V") + " rms")
+                    .orElse(""))
+            .filter(line -> !line.isEmpty())
+            .toList();
+    return new Ladder.Stop(node.name(), Quantity.volts(column.point().volts(node)), lines, spans);
+  }
+}

@@ -1,0 +1,224 @@
+package railwalk.chart;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import railwalk.chart.Table.Use;
+import railwalk.circuit.Bottle;
+import railwalk.circuit.Circuit;
+import railwalk.circuit.Node;
+import railwalk.circuit.Winding;
+import railwalk.device.Electrode;
+import railwalk.device.RectifierRatings;
+import railwalk.device.SectionKind;
+import railwalk.device.SectionType;
+import railwalk.solve.SupplyPoint;
+import railwalk.units.Quantity;
+import railwalk.walk.RippleGroup;
+import railwalk.walk.SupplyNode;
+
+/** The supply: its drawing, its nodes from the rectifier down, the rectifiers, the windings. */
+final class SupplyPage {
+  private final Column column;
+  private final Circuit circuit;
+  private final PointCells cells;
+  private final SupplyFlow flow;
+  private final Wording wording;
+
+  SupplyPage(Column column, PointCells cells, Wording wording) {
+    this.column = column;
+    this.circuit = column.circuit();
+    this.cells = cells;
+    this.flow = new SupplyFlow(column);
+    this.wording = wording;
+  }
+
+  Page page() {
+    List<Block> blocks = new ArrayList<>();
+    if (column.map().supplyNodes().isEmpty()) {
+      blocks.add(
+          new Paragraph(
+              wording.say("No supply node found: no rectifier or source feeds the {tubes}.")));
+    } else {
+      blocks.add(new LadderBuilder(column, cells).ladder());
+      blocks.add(nodes());
+    }
+    if (!column.point().supplies().isEmpty()) {
+      blocks.add(rectifiers());
+    }
+    if (!circuit.elements(Winding.class).isEmpty()) {
+      blocks.add(windings());
+    }
+    return new Page("Supply", blocks);
+  }
+
+  private Table nodes() {
+    boolean meter = column.map().supplyNodes().stream().anyMatch(s -> cells.loadsNotably(s.node()));
+    List<Table.Column> columns = new ArrayList<>();
+    columns.add(new Table.Column("Node", Use.WORDS));
+    columns.add(new Table.Column("Fed through", Use.WORDS));
+    columns.add(new Table.Column("Expected V", Use.KEY_FIGURES));
+    columns.add(new Table.Column("Low–high V", Use.FIGURES));
+    if (meter) {
+      columns.add(new Table.Column("Meter V", Use.FIGURES));
+    }
+    columns.add(new Table.Column("Reading V", Use.WRITING));
+    columns.add(new Table.Column("Fed", Use.FIGURES));
+    columns.add(new Table.Column("Ripple rms", Use.FIGURES));
+    List<Table.Row> rows =
+        column.map().supplyNodes().stream().map(supply -> row(supply, meter)).toList();
+    return Table.of("Supply nodes", columns, rows);
+  }
+
+  private Table.Row row(SupplyNode supply, boolean meter) {
+    Node node = supply.node();
+    List<String> row = new ArrayList<>();
+    row.add(node.name());
+    row.add(fedThrough(supply));
+    row.add(cells.volts(node));
+    row.add(cells.band(node));
+    if (meter) {
+      row.add(cells.meter(node));
+    }
+    row.add("");
+    row.add(flow.fed(supply).map(Quantity::amps).orElse(""));
+    row.add(column.point().rippleVoltsRms(node).map(volts -> Quantity.of(volts, "V")).orElse(""));
+    List<String> remarks = new ArrayList<>(cells.remarks(node));
+    String fed = feeds(node);
+    if (!fed.isEmpty()) {
+      remarks.add(0, "feeds " + fed);
+    }
+    return new Table.Row(row, String.join("; ", remarks));
+  }
+
+  private String fedThrough(SupplyNode supply) {
+    String droppers =
+        supply.droppers().stream()
+            .map(e -> (e.name() + " " + PartFace.of(e).value()).strip())
+            .collect(Collectors.joining(", "));
+    Node parent = supply.parent();
+    if (parent == null) {
+      String from =
+          supply.group() < 0
+              ? "fixed source"
+              : String.join(" ", GroupWords.rectifiers(column.map().groups().get(supply.group())));
+      return droppers.isEmpty() ? from : from + ", " + droppers;
+    }
+    return droppers.isEmpty() ? parent.name() : droppers + " from " + parent.name();
+  }
+
+  /** Returns which plates and screens hang on {@code node}: "plates V3 V4, screen V5". */
+  private String feeds(Node node) {
+    Map<String, List<String>> byElectrode = new LinkedHashMap<>();
+    for (Socket socket : Socket.in(circuit)) {
+      for (Socket.Pin pin : socket.pins()) {
+        Electrode electrode = pin.electrode();
+        boolean fed =
+            (electrode == Electrode.PLATE || electrode == Electrode.SCREEN)
+                && column.map().supplyOf(pin.node()).filter(node::equals).isPresent();
+        if (fed && electrode != null) {
+          List<String> names =
+              byElectrode.computeIfAbsent(wording.electrode(electrode), e -> new ArrayList<>());
+          String name = socket.name() + pin.section();
+          if (!names.contains(name)) {
+            names.add(name);
+          }
+        }
+      }
+    }
+    return byElectrode.entrySet().stream()
+        .map(
+            e ->
+                e.getKey()
+                    + (e.getValue().size() > 1 ? "s " : " ")
+                    + String.join(" ", e.getValue()))
+        .collect(Collectors.joining(", "));
+  }
+
+  private Table rectifiers() {
+    List<Table.Column> columns =
+        List.of(
+            new Table.Column("Output", Use.WORDS),
+            new Table.Column("Rectifier", Use.WORDS),
+            new Table.Column("Arrangement", Use.WORDS),
+            new Table.Column("DC out", Use.KEY_FIGURES),
+            new Table.Column("Peak", Use.FIGURES),
+            new Table.Column("Ripple rms", Use.FIGURES));
+    List<Table.Row> rows = column.point().supplies().stream().map(this::row).toList();
+    return Table.of("Rectifiers", columns, rows);
+  }
+
+  private Table.Row row(SupplyPoint supply) {
+    Optional<RippleGroup> group =
+        column.map().groups().stream().filter(g -> g.outputs().contains(supply.node())).findFirst();
+    List<Bottle> tubes =
+        group.stream()
+            .flatMap(g -> GroupWords.rectifierTubes(g).stream())
+            .flatMap(name -> circuit.bottle(name).stream())
+            .toList();
+    String names =
+        group.map(g -> String.join(" ", GroupWords.rectifiers(g))).orElse("")
+            + tubes.stream()
+                .map(t -> " " + t.type().name())
+                .distinct()
+                .collect(Collectors.joining());
+    return new Table.Row(
+        List.of(
+            supply.node().name(),
+            names,
+            group.map(RippleGroup::arrangement).orElse(""),
+            Quantity.amps(supply.dcAmps()),
+            Quantity.amps(supply.peakAmps()),
+            Quantity.of(supply.rippleVoltsRms(), "V")),
+        tubes.size() == 1 ? limits(tubes.get(0)) : "");
+  }
+
+  /** Returns the type's own limits, for one tube that makes the whole supply. */
+  private static String limits(Bottle tube) {
+    return tube.type().sections().stream()
+        .filter(s -> s.kind() == SectionKind.RECTIFIER)
+        .map(SectionType::rectifierRatings)
+        .findFirst()
+        .map(SupplyPage::limits)
+        .orElse("");
+  }
+
+  private static String limits(RectifierRatings ratings) {
+    List<String> limits = new ArrayList<>();
+    if (!Double.isNaN(ratings.dcAmpsMax())) {
+      limits.add("DC " + Quantity.amps(ratings.dcAmpsMax()));
+    }
+    if (!Double.isNaN(ratings.peakPlateAmpsMax())) {
+      limits.add("peak " + Quantity.amps(ratings.peakPlateAmpsMax()));
+    }
+    if (!Double.isNaN(ratings.firstCapacitorFaradsMax())) {
+      limits.add("first capacitor " + Quantity.of(ratings.firstCapacitorFaradsMax(), "F"));
+    }
+    return limits.isEmpty() ? "" : "limits of the type: " + String.join(", ", limits);
+  }
+
+  private Table windings() {
+    List<Table.Column> columns =
+        List.of(
+            new Table.Column("Winding", Use.WORDS),
+            new Table.Column("Between", Use.WORDS),
+            new Table.Column("No load V AC", Use.KEY_FIGURES),
+            new Table.Column("Reading V AC", Use.WRITING));
+    List<Table.Row> rows = new ArrayList<>();
+    for (Winding winding : circuit.elements(Winding.class)) {
+      double scale = circuit.line().scale(winding.atLineVolts());
+      for (Winding.Section section : winding.sections()) {
+        rows.add(
+            new Table.Row(
+                winding.name(),
+                section.a().name() + " and " + section.b().name(),
+                Quantity.plainVolts(section.openRmsVolts() * scale),
+                ""));
+      }
+    }
+    return Table.of("Windings, AC volts rms with nothing connected", columns, rows);
+  }
+}

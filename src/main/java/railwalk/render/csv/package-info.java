@@ -1,0 +1,5 @@
+/** Floor 8: a chart's points as CSV. */
+@NullMarked
+package railwalk.render.csv;
+
+import org.jspecify.annotations.NullMarked;

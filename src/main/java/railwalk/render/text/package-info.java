@@ -1,0 +1,5 @@
+/** Floor 8: a chart as plain text. */
+@NullMarked
+package railwalk.render.text;
+
+import org.jspecify.annotations.NullMarked;
