@@ -30,6 +30,12 @@ public interface OperatingPoint {
    */
   double amps(Element element);
 
+  /**
+   * Returns the heat (watt) in a part, ripple included where it carries any; NaN for a winding that
+   * feeds a rectifier.
+   */
+  double watts(Element element);
+
   /** Returns where an amplifier section stands. */
   SectionPoint at(AmplifierSection section);
 

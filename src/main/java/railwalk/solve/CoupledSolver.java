@@ -1,0 +1,243 @@
+package railwalk.solve;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import railwalk.circuit.Circuit;
+import railwalk.circuit.Node;
+import railwalk.walk.RippleGroup;
+import railwalk.walk.SupplyMap;
+
+/**
+ * DC network and supplies brought to rest together. In turn, each supply runs one period and
+ * answers with the tangent of its port volts; the DC network settles against these tangents and
+ * answers with the currents drawn; the supplies correct their start states and currents by the
+ * tangent. Since every tangent is exact this is Newton's method on both at once.
+ */
+final class CoupledSolver {
+  private static final int MOST_ROUNDS = 60;
+  private static final double SETTLED_SHARE = 1e-8;
+
+  /** Rounds after which the slopes of the drawn currents stay, so that the end is quadratic. */
+  private static final int SLOPE_ROUNDS = 4;
+
+  private final Circuit circuit;
+  private final SupplyMap map;
+  private final Trace trace;
+  final DcNetwork dc;
+  final List<Supply> supplies = new ArrayList<>();
+  private final DcSolver dcSolver;
+  final double[] x;
+  private String failure = "";
+  private String failedNode = "";
+
+  CoupledSolver(Circuit circuit, SupplyMap map, boolean tracing) {
+    this.circuit = circuit;
+    this.map = map;
+    trace = new Trace(tracing);
+    dc = new DcNetwork(circuit, map);
+    for (RippleGroup group : map.groups()) {
+      supplies.add(new Supply(new CycleNetwork(circuit, group)));
+    }
+    dcSolver = new DcSolver(dc, trace);
+    x = new double[dc.size];
+  }
+
+  Circuit circuit() {
+    return circuit;
+  }
+
+  SupplyMap map() {
+    return map;
+  }
+
+  Trace trace() {
+    return trace;
+  }
+
+  String failure() {
+    return failure;
+  }
+
+  String failedNode() {
+    return failedNode;
+  }
+
+  /** Starts from a solved neighbour of the same topology. */
+  void startFrom(CoupledSolver near) {
+    System.arraycopy(near.x, 0, x, 0, x.length);
+    dc.copyGlow(near.dc);
+    for (int g = 0; g < supplies.size(); g++) {
+      supplies.get(g).copyFrom(near.supplies.get(g));
+    }
+  }
+
+  /** Starts from nothing: reservoirs charged without load, everything else dead. */
+  boolean startCold() {
+    for (int g = 0; g < supplies.size(); g++) {
+      Supply supply = supplies.get(g);
+      if (!supply.charge()) {
+        return fail(supply, "its first charge did not settle");
+      }
+      dc.setSupply(g, held(supply));
+    }
+    return settleDc();
+  }
+
+  private static Thevenin held(Supply supply) {
+    int ports = supply.portCount();
+    double[] volts = new double[ports];
+    for (int p = 0; p < ports; p++) {
+      volts[p] = supply.portVolts(p);
+    }
+    return new Thevenin(volts, new double[ports][ports]);
+  }
+
+  /** Brings both sides to rest. */
+  boolean settle() {
+    if (supplies.isEmpty()) {
+      return settleDc();
+    }
+    double before = Double.POSITIVE_INFINITY;
+    for (int round = 0; round < MOST_ROUNDS; round++) {
+      for (int g = 0; g < supplies.size(); g++) {
+        Supply supply = supplies.get(g);
+        if (round < SLOPE_ROUNDS) {
+          supply.setSlopes(loadSlopes(g));
+        }
+        Thevenin tangent = supply.tangent();
+        if (tangent == null) {
+          return fail(supply, "a rectifier did not settle within the period");
+        }
+        dc.setSupply(g, tangent);
+      }
+      if (!settleDc()) {
+        return false;
+      }
+      double change = 0;
+      for (int g = 0; g < supplies.size(); g++) {
+        change = Math.max(change, supplies.get(g).correct(portAmps(g), portVolts(g)));
+      }
+      trace.add("supply round %d: change %.3g", round + 1, change);
+      if (change < SETTLED_SHARE || (change < 1e-6 && change > 0.5 * before)) {
+        return true;
+      }
+      before = change;
+    }
+    return fail(supplies.get(0), "the reservoir volts did not come to rest");
+  }
+
+  private boolean settleDc() {
+    if (dcSolver.settle(x)) {
+      return true;
+    }
+    failedNode = dc.nodeName(dcSolver.newton().worstNode());
+    failure = "the volts of this node would not come to rest";
+    return false;
+  }
+
+  private boolean fail(Supply supply, String reason) {
+    List<Node> outputs = supply.net.group.outputs();
+    failedNode = outputs.isEmpty() ? supply.net.group.nodes().get(0).name() : outputs.get(0).name();
+    failure = reason;
+    return false;
+  }
+
+  private double[] portAmps(int group) {
+    return dc.ports.stream()
+        .filter(p -> p.group() == group)
+        .mapToDouble(p -> x[p.branch()])
+        .toArray();
+  }
+
+  private double[] portVolts(int group) {
+    return dc.ports.stream()
+        .filter(p -> p.group() == group)
+        .mapToDouble(p -> DcNetwork.at(x, p.node()))
+        .toArray();
+  }
+
+  /**
+   * Returns by how much the current drawn at each port rises with that port's volts, the others
+   * held: the diagonal of L, where Y = dI/dE is found through the source resistances Z and Y⁻¹ =
+   * L⁻¹ + Z, so L = Y · (1 − Z·Y)⁻¹.
+   */
+  private double[] loadSlopes(int group) {
+    List<DcNetwork.Port> ports = dc.ports.stream().filter(p -> p.group() == group).toList();
+    int count = ports.size();
+    double[] residual = new double[dc.size];
+    double[] jacobian = dc.matrix.newValues();
+    dc.evaluate(x, 1, 0, residual, jacobian);
+    double[] slopes = new double[count];
+    if (!dc.matrix.lu().factor(jacobian)) {
+      return slopes;
+    }
+    double[][] y = new double[count][count];
+    for (int c = 0; c < count; c++) {
+      double[] unit = new double[dc.size];
+      unit[ports.get(c).branch()] = 1;
+      dc.matrix.lu().solve(unit, unit);
+      for (int r = 0; r < count; r++) {
+        y[r][c] = unit[ports.get(r).branch()];
+      }
+    }
+    double[][] left = new double[count][count];
+    for (int r = 0; r < count; r++) {
+      for (int c = 0; c < count; c++) {
+        double zy = 0;
+        for (int k = 0; k < count; k++) {
+          zy += dc.portOhms(ports.get(r), k) * y[k][c];
+        }
+        left[c][r] = (r == c ? 1 : 0) - zy;
+      }
+    }
+    DenseLu lu = DenseLu.of(left);
+    if (lu == null) {
+      return slopes;
+    }
+    for (int r = 0; r < count; r++) {
+      slopes[r] = lu.solve(y[r])[r];
+    }
+    return slopes;
+  }
+
+  /** Returns the settled network's derivatives, factored; valid until the network is used again. */
+  SparseLu factored() {
+    double[] residual = new double[dc.size];
+    double[] jacobian = dc.matrix.newValues();
+    dc.evaluate(x, 1, 0, residual, jacobian);
+    if (!dc.matrix.lu().factor(jacobian)) {
+      throw new IllegalStateException("a settled network has no unique answer");
+    }
+    return dc.matrix.lu();
+  }
+
+  /** Returns the greatest current that is missing at any node of the DC network, ampere. */
+  double unbalancedAmps() {
+    double[] residual = new double[dc.size];
+    dc.evaluate(x, 1, 0, residual, dc.matrix.newValues());
+    double greatest = 0;
+    for (int n = 0; n < dc.nodeCount; n++) {
+      greatest = Math.max(greatest, Math.abs(residual[n]));
+    }
+    return greatest;
+  }
+
+  /** Returns the volts at {@code node} with a load of {@code ohms} from it to the reference. */
+  double loadedVolts(int node, double ohms) {
+    double[] loaded = x.clone();
+    dc.addLoad(node, 1 / ohms);
+    boolean settled = new Newton(dc, StepLimit.tubes(4, 100), new Trace(false)).run(loaded, 1, 0);
+    dc.addLoad(node, -1 / ohms);
+    return settled ? loaded[node] : Double.NaN;
+  }
+
+  @Nullable Supply supplyOf(Node node) {
+    for (Supply supply : supplies) {
+      if (supply.net.unknowns.containsKey(node)) {
+        return supply;
+      }
+    }
+    return null;
+  }
+}

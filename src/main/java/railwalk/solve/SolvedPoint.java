@@ -1,0 +1,273 @@
+package railwalk.solve;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+import railwalk.circuit.AmplifierSection;
+import railwalk.circuit.Circuit;
+import railwalk.circuit.Element;
+import railwalk.circuit.Node;
+import railwalk.circuit.RectifierSection;
+import railwalk.circuit.RegulatorSection;
+import railwalk.circuit.Winding;
+import railwalk.device.SectionCurrents;
+import railwalk.walk.SupplyMap;
+
+/** The operating point that a settled {@link CoupledSolver} holds. */
+final class SolvedPoint implements OperatingPoint {
+  /** Up to this ratio of source to meter resistance the straight-line reading is good to 0.01 %. */
+  private static final double STRAIGHT_LOADING = 1e-3;
+
+  private final CoupledSolver solver;
+  private final List<CycleReport> reports = new ArrayList<>();
+  private final double[] sourceOhms;
+
+  SolvedPoint(CoupledSolver solver) {
+    this.solver = solver;
+    solver.supplies.forEach(s -> reports.add(s.report()));
+    sourceOhms = new double[circuit().nodes().size()];
+    SparseLu lu = solver.factored();
+    for (Node node : circuit().nodes()) {
+      sourceOhms[node.index()] =
+          node.equals(circuit().reference()) ? 0 : computeSourceOhms(node, lu);
+    }
+  }
+
+  CoupledSolver solver() {
+    return solver;
+  }
+
+  List<CycleReport> reports() {
+    return reports;
+  }
+
+  @Override
+  public Circuit circuit() {
+    return solver.circuit();
+  }
+
+  @Override
+  public SupplyMap map() {
+    return solver.map();
+  }
+
+  @Override
+  public double volts(Node node) {
+    if (node.equals(circuit().reference())) {
+      return 0;
+    }
+    if (map().undefined().contains(node)) {
+      return Double.NaN;
+    }
+    Integer unknown = solver.dc.unknowns.get(node);
+    if (unknown != null) {
+      return solver.x[unknown];
+    }
+    CycleReport report = reportOf(node);
+    return report == null ? Double.NaN : report.meanVolts(node);
+  }
+
+  private @Nullable CycleReport reportOf(Node node) {
+    return reports.stream()
+        .filter(r -> r.net().unknowns.containsKey(node))
+        .findFirst()
+        .orElse(null);
+  }
+
+  private @Nullable CycleReport reportOf(Element element) {
+    return reports.stream()
+        .filter(r -> r.net().group.elements().contains(element))
+        .findFirst()
+        .orElse(null);
+  }
+
+  @Override
+  public double amps(Element element) {
+    CycleReport report = reportOf(element);
+    if (report != null) {
+      return report.meanAmps().getOrDefault(element, 0.0);
+    }
+    DcNetwork dc = solver.dc;
+    double sum = 0;
+    boolean found = false;
+    for (int i = 0; i < dc.twoPoles.size(); i++) {
+      if (dc.twoPoles.get(i).element().equals(element)) {
+        sum += dc.twoPoleAmps(i, solver.x);
+        found = true;
+      }
+    }
+    if (found) {
+      return sum;
+    }
+    Integer branch = dc.branchOf(element);
+    if (branch != null) {
+      return solver.x[branch];
+    }
+    return TwoTerminal.amps(element, java.util.Map.of(), dc.unknowns, solver.x);
+  }
+
+  @Override
+  public double watts(Element element) {
+    CycleReport report = reportOf(element);
+    if (report != null && report.watts().containsKey(element)) {
+      return report.watts().get(element);
+    }
+    if (report != null && element instanceof Winding) {
+      return Double.NaN;
+    }
+    List<Node> nodes = element.nodes();
+    if (nodes.size() < 2) {
+      return 0;
+    }
+    double amps = amps(element);
+    return amps == 0 ? 0 : (volts(nodes.get(0)) - volts(nodes.get(1))) * amps;
+  }
+
+  @Override
+  public SectionPoint at(AmplifierSection section) {
+    DcNetwork dc = solver.dc;
+    double cathode = known(section.cathode());
+    Node screen = section.screen();
+    for (int i = 0; i < dc.amplifiers.size(); i++) {
+      if (dc.amplifiers.get(i).section().equals(section)) {
+        SectionCurrents currents = dc.section(i, solver.x);
+        return new SectionPoint(
+            known(section.plate()) - cathode,
+            screen == null ? Double.NaN : known(screen) - cathode,
+            known(section.grid()) - cathode,
+            currents.plateAmps,
+            screen == null ? Double.NaN : currents.screenAmps,
+            currents.gridAmps);
+      }
+    }
+    throw new IllegalArgumentException(section.name() + " is not in this circuit");
+  }
+
+  /** Returns the solver's volts, also where they are not predictable. */
+  private double known(Node node) {
+    Integer unknown = solver.dc.unknowns.get(node);
+    return unknown == null || unknown < 0 ? 0 : solver.x[unknown];
+  }
+
+  @Override
+  public SectionPoint at(RectifierSection section) {
+    double cathode = volts(section.cathode());
+    double plates = section.plates().stream().mapToDouble(this::volts).average().orElse(Double.NaN);
+    return new SectionPoint(
+        plates - cathode, Double.NaN, Double.NaN, amps(section), Double.NaN, Double.NaN);
+  }
+
+  @Override
+  public SectionPoint at(RegulatorSection section) {
+    return new SectionPoint(
+        volts(section.anode()) - volts(section.cathode()),
+        Double.NaN,
+        Double.NaN,
+        lit(section.name()) ? amps(section) : 0,
+        Double.NaN,
+        Double.NaN);
+  }
+
+  @Override
+  public boolean lit(String elementName) {
+    DcNetwork dc = solver.dc;
+    for (int i = 0; i < dc.twoPoles.size(); i++) {
+      if (dc.twoPoles.get(i).element().name().equalsIgnoreCase(elementName)) {
+        return dc.glow(i) != 0;
+      }
+    }
+    return false;
+  }
+
+  @Override
+  public List<SupplyPoint> supplies() {
+    List<SupplyPoint> points = new ArrayList<>();
+    for (CycleReport report : reports) {
+      List<Node> outputs = report.net().group.outputs();
+      for (int o = 0; o < outputs.size(); o++) {
+        Node node = outputs.get(o);
+        points.add(
+            new SupplyPoint(
+                node,
+                report.outputMeanAmps()[o],
+                report.outputPeakAmps()[o],
+                report.rippleRmsVolts()[report.net().at(node)]));
+      }
+    }
+    return points;
+  }
+
+  @Override
+  public Optional<Double> rippleVoltsRms(Node node) {
+    CycleReport report = reportOf(node);
+    return report == null || report.net().at(node) < 0
+        ? Optional.empty()
+        : Optional.of(report.rippleRmsVolts()[report.net().at(node)]);
+  }
+
+  @Override
+  public double sourceOhms(Node node) {
+    return sourceOhms[node.index()];
+  }
+
+  private double computeSourceOhms(Node node, SparseLu lu) {
+    if (map().undefined().contains(node)) {
+      return Double.NaN;
+    }
+    Integer unknown = solver.dc.unknowns.get(node);
+    double[] response = new double[solver.dc.size];
+    if (unknown != null) {
+      response[unknown] = 1;
+      lu.solve(response, response);
+      return response[unknown];
+    }
+    CycleReport report = reportOf(node);
+    if (report == null) {
+      return Double.NaN;
+    }
+    int inner = report.net().at(node);
+    List<DcNetwork.Port> ports = portsOf(report);
+    for (DcNetwork.Port port : ports) {
+      response[port.branch()] = report.voltsByDrawn()[portNode(report, port)][inner];
+    }
+    lu.solve(response, response);
+    double volts = report.voltsByDrawn()[inner][inner];
+    for (DcNetwork.Port port : ports) {
+      volts += report.voltsByDrawn()[inner][portNode(report, port)] * response[port.branch()];
+    }
+    return -volts;
+  }
+
+  /** Returns the DC network's ports of a group. */
+  List<DcNetwork.Port> portsOf(CycleReport report) {
+    int group = reports.indexOf(report);
+    return solver.dc.ports.stream().filter(p -> p.group() == group).toList();
+  }
+
+  /** Returns a port's node as an unknown of its group. */
+  static int portNode(CycleReport report, DcNetwork.Port port) {
+    return report.net().at(report.net().group.ports().get(port.number()));
+  }
+
+  @Override
+  public double meterVolts(Node node, double meterOhms) {
+    double volts = volts(node);
+    double source = sourceOhms(node);
+    if (Double.isNaN(volts) || node.equals(circuit().reference())) {
+      return volts;
+    }
+    Integer unknown = solver.dc.unknowns.get(node);
+    if (source / meterOhms < STRAIGHT_LOADING || unknown == null) {
+      return volts / (1 + source / meterOhms);
+    }
+    synchronized (solver) {
+      return solver.loadedVolts(unknown, meterOhms);
+    }
+  }
+
+  @Override
+  public List<String> trace() {
+    return solver.trace().lines();
+  }
+}
