@@ -7,6 +7,7 @@ import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Element;
 import railwalk.circuit.Node;
+import railwalk.circuit.RectifierSection;
 import railwalk.circuit.Resistor;
 import railwalk.circuit.Winding;
 import railwalk.device.SectionKind;
