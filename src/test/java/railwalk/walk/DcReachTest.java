@@ -129,7 +129,7 @@ class DcReachTest {
             .c("C1", "b1", "0", 20e-6)
             .build();
     RippleGroup group =
-        new RippleGroup("", circuit.elements(), circuit.nodes(), List.of(), List.of());
+        new RippleGroup("", circuit.elements(), circuit.nodes(), List.of(), List.of(), List.of());
     assertThat(DcReach.of(circuit, DcBranches.of(circuit), List.of(group)).undefined()).isEmpty();
     assertThat(
             DcReach.of(circuit, DcBranches.of(circuit), List.of()).undefined().stream()

@@ -24,7 +24,7 @@ class SupplyTreeTest {
       nodes.addAll(element.nodes());
     }
     List<Node> hot = outputs.stream().map(n -> circuit.node(n).orElseThrow()).toList();
-    return new RippleGroup("by hand", elements, new ArrayList<>(nodes), hot, hot);
+    return new RippleGroup("by hand", elements, new ArrayList<>(nodes), hot, hot, List.of());
   }
 
   /** Returns a line for each supply node: "b2 < b1 by R1", indented by depth. */
