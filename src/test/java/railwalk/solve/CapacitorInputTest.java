@@ -26,7 +26,7 @@ import railwalk.walk.SupplyMap;
  */
 class CapacitorInputTest {
   private static final double PEAK_VOLTS = 10_000;
-  private static final double LOAD_OHMS = 10_000;
+  private static final double LOAD_OHMS = 1_000;
   private static final double ENDLESS = 20_000;
 
   private record Row(
