@@ -14,15 +14,7 @@ import railwalk.device.Electrode;
 
 /** Which electrodes of amplifying tubes (stand-ins among them) each node of a circuit carries. */
 final class Electrodes {
-  private final Map<Node, List<Tap>> taps = new HashMap<>();
-
-  /** One electrode of one section at a node. */
-  record Tap(Element tube, Electrode electrode) {
-    /** Returns whether supply current flows into it, as into a plate or a screen. */
-    boolean fed() {
-      return electrode == Electrode.PLATE || electrode == Electrode.SCREEN;
-    }
-  }
+  private final Map<Node, List<TubeElectrode>> taps = new HashMap<>();
 
   private Electrodes() {}
 
@@ -43,18 +35,18 @@ final class Electrodes {
 
   private void add(@Nullable Node node, Element tube, Electrode electrode) {
     if (node != null) {
-      taps.computeIfAbsent(node, key -> new ArrayList<>()).add(new Tap(tube, electrode));
+      taps.computeIfAbsent(node, key -> new ArrayList<>()).add(new TubeElectrode(tube, electrode));
     }
   }
 
   /** Returns the electrodes at {@code node}. */
-  List<Tap> at(Node node) {
+  List<TubeElectrode> at(Node node) {
     return taps.getOrDefault(node, List.of());
   }
 
   /** Returns whether a plate or a screen is at {@code node}. */
   boolean fedAt(Node node) {
-    return at(node).stream().anyMatch(Tap::fed);
+    return at(node).stream().anyMatch(TubeElectrode::fed);
   }
 
   /** Returns whether a cathode is at {@code node}. */

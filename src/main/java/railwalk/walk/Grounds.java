@@ -21,9 +21,11 @@ import railwalk.circuit.Winding;
  *
  * @param nodes the reference with all that plain metal joins to it, and a chassis apart from it
  * @param returns by ripple group: the ends of windings and bridges that the supply current comes
- *     back to (a centre tap, the negative end of a bridge) where they stand off the reference
+ *     back to (a centre tap, the far end of a half-wave winding) where they stand off the reference
+ * @param feet the negative outputs of groups that have a positive one too: the reservoir's other
+ *     end, where a resistor lifts it off the reference
  */
-record Grounds(Set<Node> nodes, List<Set<Node>> returns) {
+record Grounds(Set<Node> nodes, List<Set<Node>> returns, Set<Node> feet) {
   private static final String CHASSIS = "chassis";
 
   /** Returns the grounds of a circuit. */
@@ -38,7 +40,15 @@ record Grounds(Set<Node> nodes, List<Set<Node>> returns) {
     circuit.node(CHASSIS).ifPresent(nodes::add);
     List<Set<Node>> returns =
         groups.stream().map(group -> returns(group, branches, nodes)).toList();
-    return new Grounds(nodes, returns);
+    Set<Node> feet = new HashSet<>();
+    for (RippleGroup group : groups) {
+      Set<Node> low = new HashSet<>(group.outputs());
+      low.removeIf(output -> !Root.negative(group, output));
+      if (low.size() < group.outputs().size()) {
+        feet.addAll(low);
+      }
+    }
+    return new Grounds(nodes, returns, feet);
   }
 
   /** Returns whether {@code node} is a ground or the return of any group. */
@@ -98,6 +108,7 @@ record Grounds(Set<Node> nodes, List<Set<Node>> returns) {
 
   /** Returns whether the capacitor's other end, seen from {@code node}, is a ground or return. */
   boolean bypasses(Capacitor capacitor, Node node) {
-    return common(capacitor.a().equals(node) ? capacitor.b() : capacitor.a());
+    Node foot = capacitor.a().equals(node) ? capacitor.b() : capacitor.a();
+    return common(foot) || feet.contains(foot);
   }
 }

@@ -38,7 +38,14 @@ final class Ladder {
 
   private Ladder() {}
 
-  /** Returns the ladder of a circuit. */
+  /** Returns the ladder of a circuit whose ripple groups are known. */
+  static Ladder of(Circuit circuit, List<RippleGroup> groups) {
+    List<DcBranch> branches = DcBranches.of(circuit);
+    Grounds grounds = Grounds.of(circuit, branches, groups);
+    return of(circuit, branches, groups, grounds, Root.of(circuit, groups, grounds));
+  }
+
+  /** Returns the ladder of a circuit with its roots. */
   static Ladder of(
       Circuit circuit,
       List<DcBranch> branches,

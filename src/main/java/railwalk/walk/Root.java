@@ -73,7 +73,7 @@ record Root(Node node, int group, boolean negative, boolean always) {
   }
 
   /** Returns whether rectifiers draw current out of {@code output} rather than feed it. */
-  private static boolean negative(RippleGroup group, Node output) {
+  static boolean negative(RippleGroup group, Node output) {
     boolean drawn = false;
     for (Element element : group.elements()) {
       if (element instanceof Diode diode) {

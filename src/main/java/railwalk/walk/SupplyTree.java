@@ -44,6 +44,7 @@ final class SupplyTree {
   private final Electrodes electrodes;
   private final Filters filters;
   private final Grounds grounds;
+  private final Charge charge;
   private final Map<Node, List<Element>> elementsByNode;
   private final Set<Element> grouped = new HashSet<>();
   private final Set<Node> feedsTubes = new HashSet<>();
@@ -56,11 +57,13 @@ final class SupplyTree {
       Electrodes electrodes,
       Filters filters,
       Grounds grounds,
-      List<RippleGroup> groups) {
+      List<RippleGroup> groups,
+      Charge charge) {
     this.ladder = ladder;
     this.electrodes = electrodes;
     this.filters = filters;
     this.grounds = grounds;
+    this.charge = charge;
     this.elementsByNode = circuit.elementsByNode();
     groups.forEach(group -> grouped.addAll(group.elements()));
   }
@@ -72,14 +75,15 @@ final class SupplyTree {
       Electrodes electrodes,
       Filters filters,
       Grounds grounds,
-      List<RippleGroup> groups) {
-    SupplyTree tree = new SupplyTree(circuit, ladder, electrodes, filters, grounds, groups);
+      List<RippleGroup> groups,
+      Charge charge) {
+    SupplyTree tree = new SupplyTree(circuit, ladder, electrodes, filters, grounds, groups, charge);
     ladder.roots().forEach(root -> tree.markFeeding(root.node()));
     ladder.roots().forEach(root -> tree.judge(root.node()));
     List<SupplyNode> ordered = new ArrayList<>();
     for (Root root : ladder.roots()) {
       if (tree.supplies.contains(root.node())) {
-        tree.emit(tree.first(root), null, root, 0, ordered);
+        tree.emit(root.node(), null, root, 0, ordered);
       }
     }
     return ordered;
@@ -190,27 +194,6 @@ final class SupplyTree {
         || ladder.children(node).stream().anyMatch(this::plateAtOrBelow);
   }
 
-  /**
-   * Returns the first supply node of a root: its own node, or the next one when nothing but that
-   * hangs on a rectifier's output, as where the filament or a standby switch stands between the
-   * output and its reservoir. A choke's input stays.
-   */
-  private Node first(Root root) {
-    Node node = root.node();
-    List<Node> children = ladder.children(node);
-    if (root.group() < 0
-        || children.size() != 1
-        || filters.at(node)
-        || !electrodes.at(node).isEmpty()
-        || ladder.conductorsAt(node).size() != 1) {
-      return node;
-    }
-    Node next = children.get(0);
-    DcBranch feed = ladder.feed(next);
-    boolean choke = feed != null && feed.element() instanceof Inductor;
-    return !choke && supplies.contains(next) ? next : node;
-  }
-
   private void emit(
       Node node, @Nullable Node parent, Root root, int depth, List<SupplyNode> ordered) {
     List<Node> chain = new ArrayList<>();
@@ -219,9 +202,8 @@ final class SupplyTree {
     Node above = parent;
     while (true) {
       chain.add(at);
-      Node from = above == null ? root.node() : above;
-      ordered.add(
-          new SupplyNode(at, above, droppers(from, at), root.group(), depth + chain.size() - 1));
+      List<Element> droppers = above == null ? firstDroppers(root) : droppers(above, at);
+      ordered.add(new SupplyNode(at, above, droppers, root.group(), depth + chain.size() - 1));
       List<Node> next = new ArrayList<>(suppliesBelow(at));
       next.sort(Comparator.comparingInt(this::height).reversed());
       if (next.isEmpty()) {
@@ -236,6 +218,10 @@ final class SupplyTree {
         emit(side, chain.get(k), root, depth + k + 1, ordered);
       }
     }
+  }
+
+  private List<Element> firstDroppers(Root root) {
+    return root.group() < 0 ? List.of() : charge.behindRectifier(root.node());
   }
 
   /** Returns the nearest supply nodes below {@code node}. */

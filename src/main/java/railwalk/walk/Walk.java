@@ -13,6 +13,11 @@ import railwalk.circuit.Node;
 public final class Walk {
   private Walk() {}
 
+  /** Returns what the walk finds in {@code circuit}. */
+  public static SupplyMap of(Circuit circuit) {
+    return of(circuit, RippleGroups.of(circuit));
+  }
+
   /** Returns what the walk finds when the ripple groups are already cut out. */
   static SupplyMap of(Circuit circuit, List<RippleGroup> groups) {
     List<DcBranch> branches = DcBranches.of(circuit);
@@ -22,8 +27,9 @@ public final class Walk {
     List<Root> roots = Root.of(circuit, groups, grounds);
     Ladder ladder = Ladder.of(circuit, branches, groups, grounds, roots);
     Filters filters = Filters.of(circuit, grounds, electrodes);
+    Charge charge = new Charge(circuit, groups, branches, grounds);
     List<SupplyNode> supplyNodes =
-        SupplyTree.of(circuit, ladder, electrodes, filters, grounds, groups);
+        SupplyTree.of(circuit, ladder, electrodes, filters, grounds, groups, charge);
     Map<Node, Node> feeds = Feeds.of(circuit, ladder, electrodes, grounds, supplyNodes);
     return new SupplyMap(groups, supplyNodes, reach.undefined(), reach.idleSections(), feeds);
   }

@@ -128,14 +128,7 @@ class DcReachTest {
             .rectifier("V5", "h1", "h2", "b1")
             .c("C1", "b1", "0", 20e-6)
             .build();
-    RippleGroup group =
-        new RippleGroup("", circuit.elements(), circuit.nodes(), List.of(), List.of(), List.of());
-    assertThat(DcReach.of(circuit, DcBranches.of(circuit), List.of(group)).undefined()).isEmpty();
-    assertThat(
-            DcReach.of(circuit, DcBranches.of(circuit), List.of()).undefined().stream()
-                .map(Node::name))
-        .as("two rectifier plates in a ring with the winding are no bridge")
-        .isEmpty();
+    assertThat(Walk.of(circuit).undefined()).isEmpty();
   }
 
   @Test

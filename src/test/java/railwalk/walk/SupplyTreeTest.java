@@ -2,10 +2,7 @@ package railwalk.walk;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.util.ArrayList;
-import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Set;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 import railwalk.circuit.Circuit;
@@ -13,20 +10,8 @@ import railwalk.circuit.CircuitBuilder;
 import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 
-/** Supply trees of a dozen kinds of amplifiers, the ripple groups given by hand. */
+/** Supply trees of a dozen kinds of amplifiers. */
 class SupplyTreeTest {
-  private static RippleGroup group(Circuit circuit, List<String> outputs, String... names) {
-    List<Element> elements = new ArrayList<>();
-    Set<Node> nodes = new LinkedHashSet<>();
-    for (String name : names) {
-      Element element = circuit.element(name).orElseThrow();
-      elements.add(element);
-      nodes.addAll(element.nodes());
-    }
-    List<Node> hot = outputs.stream().map(n -> circuit.node(n).orElseThrow()).toList();
-    return new RippleGroup("by hand", elements, new ArrayList<>(nodes), hot, hot, List.of());
-  }
-
   /** Returns a line for each supply node: "b2 < b1 by R1", indented by depth. */
   private static List<String> tree(SupplyMap map) {
     return map.supplyNodes().stream()
@@ -86,7 +71,7 @@ class SupplyTreeTest {
         fullWave().r("R1", "b1", "b2", 1e3).c("C2", "b2", "0", 20e-6).r("R2", "b2", "b3", 10e3);
     output(builder.c("C3", "b3", "0", 8e-6), "V2", "b1", "b2");
     Circuit circuit = preamp(builder, "V1", "b3").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " b2 < b1 by R1", "  b3 < b2 by R2");
     assertThat(feed(map, circuit, "pV2")).isEqualTo("b1");
     assertThat(feed(map, circuit, "kV2")).isEqualTo("b1");
@@ -103,7 +88,7 @@ class SupplyTreeTest {
         fullWave().r("R1", "b1", "s", 4700).c("C2", "s", "0", 8e-6).r("R2", "b1", "b2", 22e3);
     output(builder.c("C3", "b2", "0", 8e-6), "V2", "b1", "s");
     Circuit circuit = preamp(builder, "V1", "b2").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " b2 < b1 by R2");
     assertThat(feed(map, circuit, "s")).isEqualTo("b1");
   }
@@ -119,7 +104,7 @@ class SupplyTreeTest {
             .c("C3", "b3", "0", 20e-6);
     output(builder, "V2", "b1s", "b2");
     Circuit circuit = preamp(builder, "V1", "b3").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map))
         .containsExactly("b1", " b1s < b1 by S1", "  b2 < b1s by L1", "   b3 < b2 by R1");
     // the transformer's winding between b1s and the plate is no choke
@@ -136,8 +121,7 @@ class SupplyTreeTest {
             .c("C1", "b1", "0", 20e-6);
     output(builder, "V2", "b1", "b1");
     Circuit circuit = preamp(builder, "V1", "b1").build();
-    SupplyMap map =
-        Walk.of(circuit, List.of(group(circuit, List.of("kr"), "VHT", "V9", "S1", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1 by S1");
     assertThat(feed(map, circuit, "pV2")).isEqualTo("b1");
   }
@@ -151,9 +135,8 @@ class SupplyTreeTest {
             .l("L1", "kr", "b1", 10, 120)
             .c("C1", "b1", "0", 20e-6);
     Circuit circuit = output(builder, "V2", "b1", "b1").build();
-    SupplyMap map =
-        Walk.of(circuit, List.of(group(circuit, List.of("kr"), "VHT", "V9", "L1", "C1")));
-    assertThat(tree(map)).containsExactly("kr", " b1 < kr by L1");
+    SupplyMap map = Walk.of(circuit);
+    assertThat(tree(map)).containsExactly("b1 by L1");
   }
 
   @Test
@@ -167,7 +150,7 @@ class SupplyTreeTest {
             .r("R4", "s", "s3", 100);
     output(builder, "V2", "b1", "s2");
     Circuit circuit = output(builder, "V3", "b1", "s3").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " s < b1 by R1");
     assertThat(feed(map, circuit, "s3")).isEqualTo("s");
   }
@@ -185,7 +168,7 @@ class SupplyTreeTest {
           .r("RK" + tube, "k" + tube, "0", 270);
     }
     Circuit circuit = builder.build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1");
     assertThat(feed(map, circuit, "sV2")).isEqualTo("b1");
   }
@@ -195,7 +178,7 @@ class SupplyTreeTest {
     CircuitBuilder builder = fullWave().l("L1", "b1", "b2", 8, 100);
     output(builder, "V2", "b2", "b2");
     Circuit circuit = preamp(builder, "V1", "b2").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " b2 < b1 by L1");
   }
 
@@ -218,16 +201,11 @@ class SupplyTreeTest {
           .beam(tube, "p" + tube, "b1", "g" + tube, "0");
     }
     Circuit circuit = builder.build();
-    SupplyMap map =
-        Walk.of(
-            circuit,
-            List.of(
-                group(circuit, List.of("n1"), "VB", "D1", "C10"),
-                group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", "n1", " n2 < n1 by R10", "  w < n2 by P1");
     assertThat(feed(map, circuit, "gV3")).isEqualTo("w");
     assertThat(feed(map, circuit, "n3")).isEqualTo("w");
-    assertThat(map.supplyNode(circuit.node("n1").orElseThrow()).orElseThrow().group()).isZero();
+    assertThat(map.supplyNode(circuit.node("n1").orElseThrow()).orElseThrow().group()).isEqualTo(1);
   }
 
   @Test
@@ -247,10 +225,33 @@ class SupplyTreeTest {
             .l("LOT", "b1", "p2", 8, 300)
             .beam("V2", "p2", "b2", "g2", "0");
     Circuit circuit = preamp(builder, "V1", "b2").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " b2 < b1 by R1", "ct", " nb < ct by R2");
     assertThat(feed(map, circuit, "g2")).isEqualTo("nb");
     assertThat(map.undefined()).isEmpty();
+  }
+
+  @Test
+  void aBridgeLiftedOffChassisByItsBiasResistor() {
+    CircuitBuilder builder =
+        new CircuitBuilder()
+            .winding("VHT", "h1", "h2", 300, 60)
+            .diode("D1", "h1", "b1")
+            .diode("D2", "h2", "b1")
+            .diode("D3", "bn", "h1")
+            .diode("D4", "bn", "h2")
+            .c("C1", "b1", "bn", 50e-6)
+            .r("RB", "bn", "0", 220)
+            .r("R1", "b1", "b2", 2200)
+            .c("C2", "b2", "bn", 20e-6)
+            .r("R2", "bn", "nb", 100e3)
+            .c("C3", "nb", "0", 10e-6)
+            .r("RG", "nb", "g2", 330e3)
+            .l("LOT", "b1", "p2", 8, 300)
+            .beam("V2", "p2", "b2", "g2", "0");
+    Circuit circuit = preamp(builder, "V1", "b2").build();
+    SupplyMap map = Walk.of(circuit);
+    assertThat(tree(map)).containsExactly("b1", " b2 < b1 by R1", "bn", " nb < bn by R2");
   }
 
   @Test
@@ -279,7 +280,7 @@ class SupplyTreeTest {
             .triode("V3", "B", "pd", "pc", "kd")
             .r("R34", "kd", "0", 56e3)
             .build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " b2 < b1 by R1");
     for (String node : List.of("kf", "pa", "kp", "tail", "ga", "gb", "pd", "kd", "kc")) {
       assertThat(feed(map, circuit, node)).as(node).isEqualTo("b2");
@@ -298,7 +299,7 @@ class SupplyTreeTest {
             .triode("V2", "B", "b1", "0", "kp")
             .r("R22", "kp", "n", 47e3);
     Circuit circuit = builder.build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", "n");
     assertThat(feed(map, circuit, "kp")).isEqualTo("b1");
   }
@@ -324,8 +325,7 @@ class SupplyTreeTest {
             .triode("V1", "A", "p1", "g1", "bm")
             .r("RG1", "g1", "bm", 6.8e6);
     Circuit circuit = builder.build();
-    SupplyMap map =
-        Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VW", "RS", "V3", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " b2 < b1 by R1");
     assertThat(map.undefined()).isEmpty();
   }
@@ -350,13 +350,11 @@ class SupplyTreeTest {
             .r("RE3", "b2", "m2", 220e3)
             .r("RE4", "m2", "0", 220e3);
     Circuit circuit = output(builder, "V2", "b1", "b2").build();
-    RippleGroup group =
-        group(circuit, List.of("b1"), "VHT", "D1", "D2", "D3", "D4", "C1", "C2", "RE1", "RE2");
-    SupplyMap map = Walk.of(circuit, List.of(group));
+    SupplyMap map = Walk.of(circuit);
     // b2 feeds one screen and nothing else: it is charted with its tube
     assertThat(tree(map)).containsExactly("b1");
     Circuit more = preamp(builder, "V1", "b2").build();
-    assertThat(tree(Walk.of(more, List.of(group)))).containsExactly("b1", " b2 < b1 by R1 R2");
+    assertThat(tree(Walk.of(more))).containsExactly("b1", " b2 < b1 by R1 R2");
   }
 
   @Test
@@ -368,7 +366,7 @@ class SupplyTreeTest {
             .regulator("V8", "r150", "0");
     output(builder, "V2", "b1", "r300");
     Circuit circuit = preamp(builder, "V1", "r150").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " r300 < b1 by R1", "  r150 < r300 by V7");
   }
 
@@ -385,7 +383,7 @@ class SupplyTreeTest {
     preamp(builder, "V4", "x");
     output(builder, "V2", "b1", "b2");
     Circuit circuit = preamp(builder, "V1", "b3").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map))
         .containsExactly("b1", " b2 < b1 by R1", "  b3 < b2 by R2", " x < b1 by R9");
   }
@@ -399,7 +397,7 @@ class SupplyTreeTest {
             .r("R8", "hct", "0", 33e3)
             .c("C8", "hct", "0", 10e-6);
     Circuit circuit = preamp(builder, "V1", "b1").build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(tree(map)).containsExactly("b1", " hct < b1 by R7");
   }
 
@@ -407,12 +405,9 @@ class SupplyTreeTest {
   void aSplitPlateLoadIsASupplyNodeOnlyWhenDecoupled() {
     CircuitBuilder builder = fullWave().r("R1", "b1", "x", 47e3);
     Circuit plain = preamp(builder, "V1", "x").build();
-    assertThat(tree(Walk.of(plain, List.of(group(plain, List.of("b1"), "VHT", "V9", "C1")))))
-        .containsExactly("b1");
+    assertThat(tree(Walk.of(plain))).containsExactly("b1");
     Circuit decoupled = builder.c("CX", "x", "0", 0.1e-6).build();
-    assertThat(
-            tree(Walk.of(decoupled, List.of(group(decoupled, List.of("b1"), "VHT", "V9", "C1")))))
-        .containsExactly("b1", " x < b1 by R1");
+    assertThat(tree(Walk.of(decoupled))).containsExactly("b1", " x < b1 by R1");
   }
 
   @Test
@@ -420,7 +415,7 @@ class SupplyTreeTest {
     CircuitBuilder builder = preamp(fullWave(), "V1", "b1");
     Circuit circuit =
         builder.r("RF", "kV1", "sp", 22e3).l("LOS", "sp", "0", Double.NaN, 0.4).build();
-    SupplyMap map = Walk.of(circuit, List.of(group(circuit, List.of("b1"), "VHT", "V9", "C1")));
+    SupplyMap map = Walk.of(circuit);
     assertThat(feed(map, circuit, "kV1")).isEqualTo("b1");
     assertThat(feed(map, circuit, "sp")).isEqualTo("-");
   }
