@@ -1,6 +1,7 @@
 package railwalk.solve;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Circuit;
@@ -70,6 +71,12 @@ final class CoupledSolver {
     for (int g = 0; g < supplies.size(); g++) {
       supplies.get(g).copyFrom(near.supplies.get(g));
     }
+  }
+
+  /** Forgets everything but the topology and the values. */
+  void reset() {
+    Arrays.fill(x, 0);
+    supplies.forEach(Supply::reset);
   }
 
   /** Starts from nothing: reservoirs charged without load, everything else dead. */

@@ -10,14 +10,20 @@ import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.circuit.RectifierSection;
 import railwalk.circuit.RegulatorSection;
+import railwalk.circuit.Resistor;
 import railwalk.circuit.Winding;
 import railwalk.device.SectionCurrents;
+import railwalk.walk.RippleGroup;
+import railwalk.walk.RippleGroups;
 import railwalk.walk.SupplyMap;
 
 /** The operating point that a settled {@link CoupledSolver} holds. */
 final class SolvedPoint implements OperatingPoint {
   /** Up to this ratio of source to meter resistance the straight-line reading is good to 0.01 %. */
   private static final double STRAIGHT_LOADING = 1e-3;
+
+  /** The same at a node that swings with the line, where the meter draws alternating current. */
+  private static final double STRAIGHT_RIPPLING_LOADING = 3e-5;
 
   private final CoupledSolver solver;
   private final List<CycleReport> reports = new ArrayList<>();
@@ -258,12 +264,30 @@ final class SolvedPoint implements OperatingPoint {
       return volts;
     }
     Integer unknown = solver.dc.unknowns.get(node);
-    if (source / meterOhms < STRAIGHT_LOADING || unknown == null) {
+    double straight = unknown == null ? STRAIGHT_RIPPLING_LOADING : STRAIGHT_LOADING;
+    if (source / meterOhms < straight) {
       return volts / (1 + source / meterOhms);
+    }
+    if (unknown == null) {
+      return withMeter(node, meterOhms);
     }
     synchronized (solver) {
       return solver.loadedVolts(unknown, meterOhms);
     }
+  }
+
+  /** Solves again with the meter as a part: needed where it draws alternating current too. */
+  private double withMeter(Node node, double meterOhms) {
+    List<Element> parts = new ArrayList<>(circuit().elements());
+    parts.add(
+        new Resistor("meter", node, circuit().reference(), meterOhms, Double.NaN, Double.NaN));
+    Circuit loaded = circuit().withElements(parts);
+    List<RippleGroup> groups = RippleGroups.of(loaded);
+    SupplyMap map =
+        new SupplyMap(
+            groups, map().supplyNodes(), map().undefined(), map().idleSections(), map().feeds());
+    CoupledSolver again = new CoupledSolver(loaded, map, false);
+    return again.startCold() && again.settle() ? new SolvedPoint(again).volts(node) : Double.NaN;
   }
 
   @Override

@@ -1,6 +1,7 @@
 package railwalk.solve;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Node;
@@ -60,6 +61,13 @@ final class Supply {
     }
     System.arraycopy(quick.means, 0, sweep.means, 0, sweep.means.length);
     return true;
+  }
+
+  /** Empties every reservoir and draws nothing. */
+  void reset() {
+    Arrays.fill(states, 0);
+    Arrays.fill(drawnAmps, 0);
+    Arrays.fill(drawnSiemens, 0);
   }
 
   /** Takes over the states and currents of a neighbouring solution of the same shape. */
