@@ -25,10 +25,12 @@ import railwalk.source.SourceText;
  * pin      1 A plate                   number, section id (none when all share it), electrode, or
  *                                      empty, internal, shield, sleeve
  * rating   system=design-centre plate=300V platewatts=1W
- * spread   0.70 1.30                   plate current of new tubes as shares, two sigma
+ * spread   0.70 1.30                   current of new tubes at fixed volts as shares, two sigma
  * source   rca54 RCA sheet 11-5-1954   id and text
  * point    plate=250V grid=-2V current=1.2mA gm=1.6mS source=rca54 …     see {@link PublishedPoint}
  * gas      strike=185V operating=151V minimum=5mA maximum=30mA regulation=2V
+ *                                      volts it surely lights at, volts at mid current, rated
+ *                                      current, change of volts over it
  * fit      triode mu=105.9412 …        constants, as railwalk.fit writes them
  * residual …                           how well the law meets each point, as railwalk.fit writes it
  * </pre>
@@ -43,11 +45,17 @@ public final class DataFile {
       Set.of("heater", "section", "pin", "rating", "source", "point", "fit", "residual");
 
   private final SourceText text;
+  private final Function<String, DataFile> others;
   private final List<DataLine> own;
   private final Map<String, List<DataLine>> lines;
 
-  private DataFile(SourceText text, List<DataLine> own, Map<String, List<DataLine>> lines) {
+  private DataFile(
+      SourceText text,
+      Function<String, DataFile> others,
+      List<DataLine> own,
+      Map<String, List<DataLine>> lines) {
     this.text = text;
+    this.others = others;
     this.own = own;
     this.lines = lines;
   }
@@ -86,7 +94,7 @@ public final class DataFile {
             }
           });
     }
-    return new DataFile(text, own, lines);
+    return new DataFile(text, others, own, lines);
   }
 
   /** Returns the text it was read from. */
@@ -109,16 +117,63 @@ public final class DataFile {
     return lines.containsKey("like") && own.stream().noneMatch(l -> l.key().equals("fit"));
   }
 
-  /** Returns the published points, in file order. */
-  public List<PublishedPoint> points() {
+  /** Returns where figures come from: the sources' texts by their ids. */
+  public Map<String, String> sources() {
     Map<String, String> sources = new LinkedHashMap<>();
     for (DataLine line : all("source")) {
       if (sources.put(line.word(0), line.rest(1)) != null) {
         throw line.error(0, "source " + line.word(0) + " stands twice", "");
       }
     }
-    PointReader reader = new PointReader(sources);
+    return sources;
+  }
+
+  /** Returns the published points, in file order. */
+  public List<PublishedPoint> points() {
+    PointReader reader = new PointReader(sources());
     return all("point").stream().map(reader::read).toList();
+  }
+
+  /**
+   * Returns the kinds of section whose laws are fitted, in file order: "triode", "pentode", "beam",
+   * "rectifier", "diode".
+   */
+  public List<String> curves() {
+    return all("section").stream()
+        .map(line -> line.word(line.size() - 1))
+        .filter(word -> !word.equals("regulator"))
+        .distinct()
+        .toList();
+  }
+
+  /** Returns the id of the first section of kind {@code curve}. */
+  public String sectionOf(String curve) {
+    return all("section").stream()
+        .filter(line -> line.word(line.size() - 1).equals(curve))
+        .map(line -> line.size() > 1 ? line.word(0) : "")
+        .findFirst()
+        .orElseThrow(() -> new IllegalArgumentException(name() + " has no " + curve));
+  }
+
+  /**
+   * Returns the points of sections of kind {@code curve}; one that names no section is the first's.
+   */
+  public List<PublishedPoint> points(String curve) {
+    String own = sectionOf(curve);
+    boolean first = curves().get(0).equals(curve);
+    return points().stream()
+        .filter(p -> p.section().isEmpty() ? first : p.section().equals(own))
+        .toList();
+  }
+
+  /** Returns this file with its fit and residual lines replaced by {@code fitted}. */
+  public DataFile with(List<String> fitted) {
+    List<String> kept = new ArrayList<>(text.lines());
+    kept.removeIf(
+        line -> line.startsWith("fit ") || line.startsWith("residual ") || line.isBlank());
+    kept.addAll(fitted);
+    kept.add("");
+    return read(new SourceText(text.fileName(), kept), others);
   }
 
   /** Returns the lines with {@code key}; none when there are none. */

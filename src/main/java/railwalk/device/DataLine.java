@@ -81,6 +81,11 @@ final class DataLine {
     return key.text;
   }
 
+  /** Returns the bare words that follow the key. */
+  List<String> words() {
+    return words.stream().map(Word::text).toList();
+  }
+
   /** Returns how many bare words follow the key. */
   int size() {
     return words.size();

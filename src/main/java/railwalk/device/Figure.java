@@ -1,5 +1,7 @@
 package railwalk.device;
 
+import java.math.BigDecimal;
+
 /** Numbers of data files: a decimal number, an SI prefix, unit letters: 1.2mA, 62.5k, 20uF. */
 final class Figure {
   private Figure() {}
@@ -10,10 +12,14 @@ final class Figure {
     while (end < text.length() && isNumberPart(text, end)) {
       end++;
     }
-    String unit = text.substring(end);
-    double scale = unit.isEmpty() ? 1 : scale(unit.charAt(0));
+    if (end == 0) {
+      return Double.NaN;
+    }
     try {
-      return end == 0 ? Double.NaN : Double.parseDouble(text.substring(0, end)) * scale;
+      BigDecimal number = new BigDecimal(text.substring(0, end));
+      return number
+          .scaleByPowerOfTen(end == text.length() ? 0 : power(text.charAt(end)))
+          .doubleValue();
     } catch (NumberFormatException e) {
       return Double.NaN;
     }
@@ -29,15 +35,15 @@ final class Figure {
         && !Character.isLetter(text.charAt(at + 1));
   }
 
-  private static double scale(char prefix) {
+  private static int power(char prefix) {
     return switch (prefix) {
-      case 'p' -> 1e-12;
-      case 'n' -> 1e-9;
-      case 'u' -> 1e-6;
-      case 'm' -> 1e-3;
-      case 'k' -> 1e3;
-      case 'M' -> 1e6;
-      default -> 1;
+      case 'p' -> -12;
+      case 'n' -> -9;
+      case 'u' -> -6;
+      case 'm' -> -3;
+      case 'k' -> 3;
+      case 'M' -> 6;
+      default -> 0;
     };
   }
 }

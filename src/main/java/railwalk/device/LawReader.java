@@ -82,7 +82,8 @@ final class LawReader {
   private static double constant(DataLine line, String name) {
     double value = line.required(name);
     if (value <= 0) {
-      throw line.error(name, "a constant of " + value + " makes no sense", "above zero");
+      throw line.error(
+          name, "a constant of " + line.option(name, "") + " makes no sense", "above zero");
     }
     return value;
   }

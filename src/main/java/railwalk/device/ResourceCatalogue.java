@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -18,6 +19,7 @@ final class ResourceCatalogue implements Catalogue {
   private static final String INDEX = "index";
 
   private final List<String> names;
+  private final Map<String, List<String>> aliases = new HashMap<>();
   private final TypeNames typeNames = new TypeNames();
   private final Map<String, TubeType> types = new ConcurrentHashMap<>();
 
@@ -25,9 +27,8 @@ final class ResourceCatalogue implements Catalogue {
     List<DataLine> index = DataLine.of(text(INDEX));
     for (DataLine line : index) {
       typeNames.put(line.key(), line.key());
-      for (int i = 0; i < line.size(); i++) {
-        typeNames.put(line.word(i), line.key());
-      }
+      aliases.put(line.key(), line.words());
+      line.words().forEach(alias -> typeNames.put(alias, line.key()));
     }
     names = index.stream().map(DataLine::key).sorted().toList();
   }
@@ -50,6 +51,11 @@ final class ResourceCatalogue implements Catalogue {
   @Override
   public Optional<DataFile> file(String name) {
     return typeNames.find(name).map(ResourceCatalogue::read);
+  }
+
+  /** Returns the aliases of {@code type} that the index lists. */
+  List<String> namesOf(String type) {
+    return aliases.getOrDefault(type, List.of());
   }
 
   private TubeType type(String name) {

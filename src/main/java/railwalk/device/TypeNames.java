@@ -6,14 +6,15 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
-import java.util.regex.Pattern;
+import java.util.Set;
 
 /** All names of the catalogue, and how a name that a person typed finds one of them. */
 final class TypeNames {
   /** Suffixes that tell an issue, a bulb or a maker's selection, not another tube. */
-  private static final Pattern SUFFIX =
-      Pattern.compile(
-          "(?<=[0-9A-Z])(WXT|WGT|WGB|WGC|GTA|GTB|GTY|GAY|WA|WB|WC|GT|EH|STR|LPS|A|B|C|G|W|S|M)$");
+  private static final Set<String> SUFFIXES =
+      Set.of(
+          "A", "B", "C", "G", "M", "S", "W", "EH", "GT", "GA", "WA", "WB", "WC", "GTA", "GTB",
+          "GTY", "WGT", "WGTA", "WXT");
 
   private final Map<String, String> typeByName = new LinkedHashMap<>();
 
@@ -25,38 +26,31 @@ final class TypeNames {
     }
   }
 
-  /** Returns the type that {@code typed} stands for. */
+  /**
+   * Returns the type that {@code typed} stands for: as it is; without its tag or hyphens; without
+   * suffixes; or as the short form of a name in GT.
+   */
   Optional<String> find(String typed) {
     String name = typed.strip().toUpperCase(Locale.ROOT);
     int underscore = name.indexOf('_');
-    String untagged = underscore > 0 ? name.substring(0, underscore) : name;
-    String exact = typeByName.getOrDefault(name, typeByName.get(untagged));
-    if (exact != null) {
-      return Optional.of(exact);
+    String untagged = (underscore > 0 ? name.substring(0, underscore) : name).replace("-", "");
+    if (typeByName.containsKey(name)) {
+      return Optional.of(typeByName.get(name));
     }
-    String bare = untagged;
-    while (true) {
-      String shorter = SUFFIX.matcher(bare).replaceFirst("");
-      if (shorter.equals(bare)) {
-        return shortForm(untagged);
-      }
-      String type = typeByName.get(shorter);
-      if (type != null) {
+    for (int cut = untagged.length(); cut > 0; cut--) {
+      String type = typeByName.get(untagged.substring(0, cut));
+      String suffix = untagged.substring(cut);
+      if (type != null && (suffix.isEmpty() || SUFFIXES.contains(suffix))) {
         return Optional.of(type);
       }
-      bare = shorter;
     }
+    return shortForm(untagged);
   }
 
-  /** Returns the type whose name is {@code name} and a bulb suffix: 6V6 for 6V6GT. */
+  /** Returns the GT type of that name without a bulb letter: 6V6 and 6V6G for 6V6GT. */
   private Optional<String> shortForm(String name) {
-    List<String> found =
-        typeByName.entrySet().stream()
-            .filter(e -> e.getKey().equals(name + "GT"))
-            .map(Map.Entry::getValue)
-            .distinct()
-            .toList();
-    return found.size() == 1 ? Optional.of(found.get(0)) : Optional.empty();
+    String stem = name.endsWith("G") ? name : name + "G";
+    return Optional.ofNullable(typeByName.get(stem + "T"));
   }
 
   /** Returns up to three names near {@code typed}, nearest first. */

@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import org.jspecify.annotations.Nullable;
 
 /** Makes a {@link TubeType} of a data file's lines. One piece of {@link DataFile}. */
 final class TypeReader {
@@ -38,15 +39,9 @@ final class TypeReader {
   TubeType read() {
     List<SectionType> sections = sections();
     DataLine base = file.one("base");
-    List<String> aliases = new ArrayList<>();
-    for (DataLine line : file.all("alias")) {
-      for (int i = 0; i < line.size(); i++) {
-        aliases.add(line.word(i));
-      }
-    }
     return new TubeType(
         file.name(),
-        aliases,
+        file.all("alias").stream().flatMap(line -> line.words().stream()).toList(),
         file.one("summary").rest(0),
         base.word(0),
         base.word(1),
@@ -74,10 +69,14 @@ final class TypeReader {
               laws.law(line, id, word),
               amplifies ? ratings(id) : Ratings.NONE,
               kind == SectionKind.RECTIFIER ? rectifierRatings(id) : RectifierRatings.NONE,
-              amplifies ? file.one("spread").figure(0) : 1,
-              amplifies ? file.one("spread").figure(1) : 1));
+              spread(0),
+              spread(1)));
     }
     return sections;
+  }
+
+  private double spread(int index) {
+    return file.all("spread").isEmpty() ? 1 : file.one("spread").figure(index);
   }
 
   private static SectionKind kind(DataLine line, String word) {
@@ -144,7 +143,7 @@ final class TypeReader {
         positive(line, "rms"));
   }
 
-  private @org.jspecify.annotations.Nullable DataLine rating(String id) {
+  private @Nullable DataLine rating(String id) {
     DataLine found = null;
     for (DataLine line : file.all("rating")) {
       line.allow(RATINGS);

@@ -2,22 +2,188 @@ package railwalk.device;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.List;
+import java.util.Map;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
-/** The catalogue's names: aliases, suffixes, near misses; and that every file reads. */
+/** The catalogue: names, pins, heaters, ratings. Laws have tests of their own. */
 class CatalogueTest {
   private final Catalogue catalogue = Catalogue.standard();
 
   @Test
   void everyFileReadsAndTheIndexAgreesWithIt() {
-    assertThat(catalogue.types()).hasSizeGreaterThanOrEqualTo(27);
+    assertThat(catalogue.types())
+        .extracting(TubeType::name)
+        .contains(
+            "12AX7", "12AT7", "12AU7", "12AY7", "6SN7GT", "6SL7GT", "6AV6", "12AV6", "EF86", "6SJ7")
+        .contains("6V6GT", "6L6GC", "5881", "EL84", "EL34", "KT66", "50C5", "KT88")
+        .contains("5Y3GT", "GZ34", "EZ80", "EZ81", "6X4", "5U4GB", "35W4", "0A2", "0B2");
+    ResourceCatalogue resources = (ResourceCatalogue) catalogue;
     for (TubeType type : catalogue.types()) {
-      assertThat(catalogue.find(type.name())).contains(type);
-      for (String alias : type.aliases()) {
-        assertThat(catalogue.find(alias)).contains(type);
-      }
+      assertThat(resources.namesOf(type.name()))
+          .as(type.name())
+          .containsExactlyElementsOf(type.aliases());
       assertThat(catalogue.file(type.name()).orElseThrow().points()).isNotNull();
-      assertThat(type.pins()).isNotEmpty();
+      assertThat(type.summary()).isNotBlank();
     }
+  }
+
+  /** Same tube under another number: sheets of both names print the same data. */
+  @ParameterizedTest
+  @CsvSource({
+    "ECC83,12AX7",
+    "7025,12AX7",
+    "ecc81,12AT7",
+    "ECC82,12AU7",
+    "6072,12AY7",
+    "6BQ5,EL84",
+    "6CA7,EL34",
+    "5AR4,GZ34",
+    "6CA4,EZ81",
+    "6V4,EZ80",
+    "EZ90,6X4",
+    "6267,EF86",
+    "EBC91,6AV6",
+    "6L6WGB,5881",
+    "OA2,0A2",
+    "ob2,0B2"
+  })
+  void aliases(String alias, String name) {
+    assertThat(catalogue.find(alias).orElseThrow().name()).isEqualTo(name);
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "12AX7A,12AX7",
+    "12ax7wa,12AX7",
+    "12AX7_JJ,12AX7",
+    "ECC83S,12AX7",
+    "12AU7A,12AU7",
+    "6V6GTA,6V6GT",
+    "6V6,6V6GT",
+    "6V6G,6V6GT",
+    "6V6-GT,6V6GT",
+    "5881WXT,5881",
+    "6SN7GTB,6SN7GT",
+    "6SN7,6SN7GT",
+    "5Y3,5Y3GT",
+    "6L6-GC,6L6GC",
+    "EL34B,EL34",
+    "KT88_new,KT88",
+    "6L6GC_x,6L6GC",
+    "6SJ7GT,6SJ7",
+    "6sl7,6SL7GT"
+  })
+  void suffixesThatTellAnIssueOrABulbAreStripped(String typed, String name) {
+    assertThat(catalogue.find(typed).orElseThrow().name()).isEqualTo(name);
+  }
+
+  /** Other tubes than the catalogue's, though the names look alike. */
+  @ParameterizedTest
+  @ValueSource(strings = {"6L6", "6L6GB", "5U4G", "12AX8", "12BH7", "EL8", "GZ3", "", "12", "X"})
+  void otherTubesAreNotFound(String typed) {
+    assertThat(catalogue.find(typed)).isEmpty();
+  }
+
+  @Test
+  void nearNames() {
+    assertThat(catalogue.near("12AX8")).hasSize(3).startsWith("12AX7");
+    assertThat(catalogue.near("EL48")).contains("EL84");
+    assertThat(catalogue.near("6L6")).contains("6L6GC");
+    assertThat(catalogue.near("5U4G")).startsWith("5U4GB");
+    assertThat(catalogue.near("2N3055XYZ")).isEmpty();
+  }
+
+  /** Socket pins, plate to cathode, checked against makers' basing diagrams. */
+  @ParameterizedTest
+  @CsvSource({
+    "12AX7,A,1,2,3", "12AX7,B,6,7,8", "12AU7,B,6,7,8", "6SN7GT,A,2,1,3", "6SN7GT,B,5,4,6",
+    "6SL7GT,A,2,1,3", "6AV6,T,7,1,2", "12AV6,T,7,1,2", "EF86,'',6,9,3", "6SJ7,'',8,4,5",
+    "6V6GT,'',3,5,8", "6L6GC,'',3,5,8", "EL84,'',7,2,3", "EL34,'',3,5,8", "KT88,'',3,5,8"
+  })
+  void pins(String name, String section, int plate, int grid, int cathode) {
+    TubeType type = catalogue.find(name).orElseThrow();
+    assertThat(type.pinsOf(section, Electrode.PLATE)).containsExactly(plate);
+    assertThat(type.pinsOf(section, Electrode.GRID)).containsExactly(grid);
+    assertThat(type.pinsOf(section, Electrode.CATHODE)).containsExactly(cathode);
+  }
+
+  @Test
+  void pinsWithAStoryOfTheirOwn() {
+    TubeType beam = catalogue.find("50C5").orElseThrow();
+    assertThat(beam.pinsOf("", Electrode.GRID)).containsExactly(2, 5);
+    TubeType regulator = catalogue.find("0A2").orElseThrow();
+    assertThat(regulator.pinsOf("", Electrode.PLATE)).containsExactly(1, 5);
+    assertThat(regulator.pinsOf("", Electrode.CATHODE)).containsExactly(2, 4, 7);
+    TubeType detector = catalogue.find("12AV6").orElseThrow();
+    assertThat(detector.pinsOf("D", Electrode.DIODE1)).containsExactly(6);
+    assertThat(detector.pinsOf("D", Electrode.CATHODE)).containsExactly(2);
+    assertThat(catalogue.find("KT88").orElseThrow().pins())
+        .containsEntry(1, new PinUse(PinUse.Role.SLEEVE, "", null));
+    assertThat(catalogue.find("EL84").orElseThrow().pins())
+        .containsEntry(1, new PinUse(PinUse.Role.INTERNAL, "", null));
+    assertThat(catalogue.find("6V6GT").orElseThrow().pins())
+        .containsEntry(6, new PinUse(PinUse.Role.EMPTY, "", null));
+  }
+
+  @Test
+  void everySocketTerminalIsListed() {
+    Map<String, Integer> terminals = Map.of("noval", 9, "octal", 8, "miniature-7", 7);
+    for (TubeType type : catalogue.types()) {
+      assertThat(type.pins()).as(type.name()).hasSize(terminals.getOrDefault(type.family(), 0));
+    }
+  }
+
+  @Test
+  void heaters() {
+    Heater twin = catalogue.find("12AX7").orElseThrow().heater();
+    assertThat(twin.connections())
+        .containsExactly(new Heater.Connection(12.6, 0.15), new Heater.Connection(6.3, 0.3));
+    assertThat(twin.tapVolts()).isEqualTo(6.3);
+    assertThat(catalogue.find("35W4").orElseThrow().heater().tapVolts()).isEqualTo(7.5);
+    assertThat(catalogue.find("12AV6").orElseThrow().heater().connections())
+        .containsExactly(new Heater.Connection(12.6, 0.15));
+    assertThat(catalogue.find("5Y3GT").orElseThrow().heater().directlyHeated()).isTrue();
+    assertThat(catalogue.find("5U4GB").orElseThrow().heater().directlyHeated()).isTrue();
+    Heater joined = catalogue.find("GZ34").orElseThrow().heater();
+    assertThat(joined.cathodeJoined()).isTrue();
+    assertThat(joined.directlyHeated()).isFalse();
+    assertThat(catalogue.find("0A2").orElseThrow().heater().connections()).isEmpty();
+  }
+
+  @Test
+  void aTypeLikeAnotherTakesItsPinsAndLaw() {
+    TubeType six = catalogue.find("6AV6").orElseThrow();
+    TubeType twelve = catalogue.find("12AV6").orElseThrow();
+    assertThat(twelve.pins()).isEqualTo(six.pins());
+    assertThat(twelve.sections()).isEqualTo(six.sections());
+    assertThat(twelve.aliases()).isEmpty();
+    assertThat(catalogue.file("12AV6").orElseThrow().borrowsLaw()).isTrue();
+  }
+
+  @Test
+  void ratings() {
+    SectionType output = catalogue.find("6L6GC").orElseThrow().sections().get(0);
+    assertThat(output.ratings().system()).isEqualTo("design-maximum");
+    assertThat(output.ratings().plateWattsMax()).isEqualTo(30);
+    assertThat(output.ratings().gridLeakFixedBiasOhmsMax()).isEqualTo(100_000);
+    assertThat(List.of(output.spreadLow(), output.spreadHigh())).containsExactly(0.70, 1.30);
+    SectionType rectifier = catalogue.find("5Y3GT").orElseThrow().sections().get(0);
+    assertThat(rectifier.rectifierRatings().peakInverseVoltsMax()).isEqualTo(1400);
+    assertThat(rectifier.rectifierRatings().firstCapacitorFaradsMax()).isEqualTo(20e-6);
+  }
+
+  @Test
+  void regulatorsStandAtTheirVolts() {
+    // RCA 0A2: 151 V at mid current, 2 V over 5 to 30 mA.
+    GasLaw law = (GasLaw) catalogue.find("0A2").orElseThrow().sections().get(0).law();
+    TwoPoleCurrent out = new TwoPoleCurrent();
+    law.lit().evaluate(151, out);
+    assertThat(out.amps).isBetween(0.0174, 0.0176);
+    law.lit().evaluate(152, out);
+    assertThat(out.amps).isBetween(0.0299, 0.0301);
   }
 }

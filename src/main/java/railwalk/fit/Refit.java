@@ -1,0 +1,9 @@
+package railwalk.fit;
+
+/**
+ * What fitting a type anew comes to.
+ *
+ * @param dataFile the type's data file with the new constants in place of the old
+ * @param sheet how well they meet the points
+ */
+public record Refit(String dataFile, TypeSheet sheet) {}
