@@ -17,7 +17,15 @@ import railwalk.walk.SupplyMap;
  */
 final class CoupledSolver {
   private static final int MOST_ROUNDS = 60;
-  private static final double SETTLED_SHARE = 1e-8;
+
+  /**
+   * The corrections shrink quadratically: after one of this size (share of the greatest volts) what
+   * is left is far below a microvolt in a volt.
+   */
+  private static final double SETTLED_SHARE = 2e-5;
+
+  /** From corrections of this size on, periods are run at full accuracy. */
+  private static final double NEAR_SHARE = 1e-2;
 
   /** Rounds after which the slopes of the drawn currents stay, so that the end is quadratic. */
   private static final int SLOPE_ROUNDS = 4;
@@ -31,6 +39,7 @@ final class CoupledSolver {
   final double[] x;
   private String failure = "";
   private String failedNode = "";
+  private boolean near;
 
   CoupledSolver(Circuit circuit, SupplyMap map, boolean tracing) {
     this.circuit = circuit;
@@ -65,16 +74,18 @@ final class CoupledSolver {
   }
 
   /** Starts from a solved neighbour of the same topology. */
-  void startFrom(CoupledSolver near) {
-    System.arraycopy(near.x, 0, x, 0, x.length);
-    dc.copyGlow(near.dc);
+  void startFrom(CoupledSolver neighbour) {
+    System.arraycopy(neighbour.x, 0, x, 0, x.length);
+    dc.copyGlow(neighbour.dc);
     for (int g = 0; g < supplies.size(); g++) {
-      supplies.get(g).copyFrom(near.supplies.get(g));
+      supplies.get(g).copyFrom(neighbour.supplies.get(g));
     }
+    near = true;
   }
 
   /** Forgets everything but the topology and the values. */
   void reset() {
+    near = false;
     Arrays.fill(x, 0);
     supplies.forEach(Supply::reset);
   }
@@ -105,14 +116,13 @@ final class CoupledSolver {
     if (supplies.isEmpty()) {
       return settleDc();
     }
-    double before = Double.POSITIVE_INFINITY;
     for (int round = 0; round < MOST_ROUNDS; round++) {
       for (int g = 0; g < supplies.size(); g++) {
         Supply supply = supplies.get(g);
         if (round < SLOPE_ROUNDS) {
           supply.setSlopes(loadSlopes(g));
         }
-        Thevenin tangent = supply.tangent();
+        Thevenin tangent = supply.tangent(near);
         if (tangent == null) {
           return fail(supply, "a rectifier did not settle within the period");
         }
@@ -125,11 +135,11 @@ final class CoupledSolver {
       for (int g = 0; g < supplies.size(); g++) {
         change = Math.max(change, supplies.get(g).correct(portAmps(g), portVolts(g)));
       }
-      trace.add("supply round %d: change %.3g", round + 1, change);
-      if (change < SETTLED_SHARE || (change < 1e-6 && change > 0.5 * before)) {
+      trace.add("supply round %d, %s: change %.3g", round + 1, near ? "fine" : "coarse", change);
+      if (near && change < SETTLED_SHARE) {
         return true;
       }
-      before = change;
+      near |= change < NEAR_SHARE;
     }
     return fail(supplies.get(0), "the reservoir volts did not come to rest");
   }

@@ -38,6 +38,7 @@ final class CycleSweep {
   private final double[] base;
   private final double[] values;
   private final double[] unknowns;
+  private final double[] fixed;
   private final double[] rightHandSide;
   private final double[] slopes;
   private final double[] factoredSlopes;
@@ -58,6 +59,7 @@ final class CycleSweep {
     base = net.matrix.newValues();
     values = net.matrix.newValues();
     unknowns = new double[net.size];
+    fixed = new double[net.size];
     rightHandSide = new double[net.size];
     slopes = new double[net.paths.size()];
     factoredSlopes = new double[net.paths.size()];
@@ -85,24 +87,15 @@ final class CycleSweep {
       double storeScale,
       List<CycleColumn> columns,
       @Nullable Observer observer) {
-    int stores = net.stores.size();
-    int count = columns.size();
     double stage = GAMMA * stepSeconds;
-    prepareBase(drawnSiemens, storeScale / stage);
+    double perStage = storeScale / stage;
+    prepareBase(drawnSiemens, perStage);
+    int stores = net.stores.size();
     double[] state = startStates.clone();
     double[] history = new double[stores];
     double[] rate = new double[stores];
-    double[][] stateBy = new double[count][stores];
-    double[][] historyBy = new double[count][stores];
-    double[][] rateBy = new double[count][stores];
-    double[] column = new double[net.size];
-    meansByColumn = new double[count][net.size];
+    CycleDerivatives derivatives = new CycleDerivatives(net, columns);
     Arrays.fill(means, 0);
-    for (int c = 0; c < count; c++) {
-      if (columns.get(c) instanceof CycleColumn.StartState start) {
-        stateBy[c][start.state()] = 1;
-      }
-    }
     double omega = 2 * Math.PI * net.hertz;
     for (int step = 0; step < steps; step++) {
       double from = step * stepSeconds;
@@ -113,7 +106,7 @@ final class CycleSweep {
         for (int s = 0; s < stores; s++) {
           history[s] = state[s] + carried * rate[s];
         }
-        if (!settle(history, drawnAmps, sine, storeScale / stage)) {
+        if (!settle(history, drawnAmps, sine, perStage)) {
           return false;
         }
         for (int n = 0; n < net.size; n++) {
@@ -122,36 +115,28 @@ final class CycleSweep {
         if (observer != null) {
           observer.stage(share, unknowns, pathAmps, pathVolts);
         }
-        for (int c = 0; c < count; c++) {
-          double[] hist = historyBy[c];
-          for (int s = 0; s < stores; s++) {
-            hist[s] = stateBy[c][s] + carried * rateBy[c][s];
-          }
-          derivative(columns.get(c), hist, sine, storeScale / stage, column);
-          for (int n = 0; n < net.size; n++) {
-            meansByColumn[c][n] += share * column[n];
-          }
-          advance(column, hist, half == 0 ? rateBy[c] : null, stateBy[c], stage);
+        if (!columns.isEmpty()) {
+          derivatives.stage(half, carried, share, stage, perStage, sine, unknowns, pathAmps);
         }
-        advance(unknowns, history, half == 0 ? rate : null, state, stage);
+        advance(history, half == 0 ? rate : null, state, stage);
       }
     }
     System.arraycopy(state, 0, endStates, 0, stores);
-    endByColumn = stateBy;
+    endByColumn = derivatives.endByColumn();
+    meansByColumn = derivatives.meansByColumn();
     return true;
   }
 
   /** Takes the states out of a solved stage: their rates after the first, themselves after both. */
-  private void advance(
-      double[] x, double[] history, double @Nullable [] rate, double[] state, double stage) {
-    List<CycleNetwork.Store> stores = net.stores;
+  private void advance(double[] history, double @Nullable [] rate, double[] state, double stage) {
     for (int s = 0; s < history.length; s++) {
-      CycleNetwork.Store store = stores.get(s);
-      double now = store.isChoke() ? x[store.branch()] : volts(x, store.a(), store.b());
+      CycleNetwork.Store store = net.stores.get(s);
+      double present =
+          store.isChoke() ? unknowns[store.branch()] : volts(unknowns, store.a(), store.b());
       if (rate != null) {
-        rate[s] = (now - history[s]) / stage;
+        rate[s] = (present - history[s]) / stage;
       } else {
-        state[s] = now;
+        state[s] = present;
       }
     }
   }
@@ -182,16 +167,17 @@ final class CycleSweep {
 
   /** Solves one stage by Newton's method, each path linearised where the stage before left it. */
   private boolean settle(double[] history, double[] drawnAmps, double sine, double perStage) {
+    System.arraycopy(net.source, 0, fixed, 0, net.size);
+    for (int n = 0; n < net.nodeCount; n++) {
+      fixed[n] -= drawnAmps[n];
+    }
+    for (CycleNetwork.Emf emf : net.emfs) {
+      fixed[emf.branch()] += emf.peakVolts() * sine;
+    }
+    addHistory(history, perStage, fixed);
     List<CycleNetwork.Path> paths = net.paths;
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
-      System.arraycopy(net.source, 0, rightHandSide, 0, net.size);
-      for (int n = 0; n < net.nodeCount; n++) {
-        rightHandSide[n] -= drawnAmps[n];
-      }
-      for (CycleNetwork.Emf emf : net.emfs) {
-        rightHandSide[emf.branch()] += emf.peakVolts() * sine;
-      }
-      addHistory(history, perStage, rightHandSide);
+      System.arraycopy(fixed, 0, rightHandSide, 0, net.size);
       boolean sameSlopes = factored;
       for (int p = 0; p < paths.size(); p++) {
         CycleNetwork.Path path = paths.get(p);
@@ -260,38 +246,5 @@ final class CycleSweep {
     if (index >= 0) {
       target[index] += amount;
     }
-  }
-
-  /** Puts the derivative of the stage's unknowns by one column into {@code column}. */
-  private void derivative(
-      CycleColumn by, double[] history, double sine, double perStage, double[] column) {
-    Arrays.fill(column, 0);
-    addHistory(history, perStage, column);
-    if (by instanceof CycleColumn.Drawn drawn) {
-      column[drawn.node()] -= 1;
-    } else if (by instanceof CycleColumn.WindingVolts winding) {
-      for (CycleNetwork.Emf emf : net.emfs) {
-        if (emf.winding().equals(winding.winding())) {
-          column[emf.branch()] += emf.peakVolts() * sine;
-        }
-      }
-    } else if (by instanceof CycleColumn.PartOhms part) {
-      if (part.branch() >= 0) {
-        column[part.branch()] += part.ohms() * unknowns[part.branch()];
-      } else {
-        double amps = volts(unknowns, part.a(), part.b()) / part.ohms();
-        add(column, part.a(), amps);
-        add(column, part.b(), -amps);
-      }
-    } else if (by instanceof CycleColumn.Emission emission) {
-      for (int p = 0; p < slopes.length; p++) {
-        CycleNetwork.Path path = net.paths.get(p);
-        if (path.element().equals(emission.element())) {
-          add(column, path.anode(), -pathAmps[p]);
-          add(column, path.cathode(), pathAmps[p]);
-        }
-      }
-    }
-    net.matrix.lu().solve(column, column);
   }
 }

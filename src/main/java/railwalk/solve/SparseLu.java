@@ -37,6 +37,7 @@ final class SparseLu {
   private double[] slots = new double[0];
   private double[] columnScale = new double[0];
   private double[] work = new double[0];
+  private double[] manyWork = new double[0];
 
   /**
    * @param size order of the matrix
@@ -80,6 +81,44 @@ final class SparseLu {
     }
     for (int k = 0; k < size; k++) {
       x[columnOf[k]] = y[k];
+    }
+  }
+
+  /**
+   * Solves A·X = B in place for {@code count} right-hand sides at once; {@code b} holds them row by
+   * row: element (row, k) at row · count + k.
+   */
+  void solveMany(double[] b, int count) {
+    if (manyWork.length < size * count) {
+      manyWork = new double[size * count];
+    }
+    double[] y = manyWork;
+    for (int k = 0; k < size; k++) {
+      System.arraycopy(b, rowOf[k] * count, y, k * count, count);
+    }
+    for (int k = 0; k < size; k++) {
+      for (int i = lowerStart[k]; i < lowerStart[k + 1]; i++) {
+        subtract(y, lowerRow[i] * count, slots[lowerSlot[i]], k * count, count);
+      }
+    }
+    for (int k = size - 1; k >= 0; k--) {
+      for (int i = upperStart[k]; i < upperStart[k + 1]; i++) {
+        subtract(y, k * count, slots[upperSlot[i]], upperColumn[i] * count, count);
+      }
+      double inverse = 1 / slots[pivotSlot[k]];
+      int at = k * count;
+      for (int c = 0; c < count; c++) {
+        y[at + c] *= inverse;
+      }
+    }
+    for (int k = 0; k < size; k++) {
+      System.arraycopy(y, k * count, b, columnOf[k] * count, count);
+    }
+  }
+
+  private static void subtract(double[] y, int target, double factor, int source, int count) {
+    for (int c = 0; c < count; c++) {
+      y[target + c] -= factor * y[source + c];
     }
   }
 
