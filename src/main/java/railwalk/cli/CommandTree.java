@@ -6,10 +6,12 @@ import org.jspecify.annotations.Nullable;
 import picocli.CommandLine;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Model.OptionSpec;
+import picocli.CommandLine.Model.PositionalParamSpec;
 
 /** All commands under the program's name. */
 final class CommandTree {
-  private static final List<Command> COMMANDS = List.of(new CompletionCommand());
+  private static final List<Command> COMMANDS =
+      List.of(new TubesCommand(), new FitCommand(), new CompletionCommand());
 
   private CommandTree() {}
 
@@ -46,6 +48,18 @@ final class CommandTree {
                 .versionHelp(true)
                 .description("Print the version and stop.")
                 .build());
+  }
+
+  /** Returns a command's only argument. */
+  static PositionalParamSpec argument(
+      String label, String arity, String description, Class<?> type) {
+    return PositionalParamSpec.builder()
+        .paramLabel(label)
+        .index("0")
+        .arity(arity)
+        .type(type)
+        .description(description)
+        .build();
   }
 
   private static CommandSpec bare(@Nullable Command command) {

@@ -17,4 +17,24 @@ public record Comparison(
   public double errorShare() {
     return law / published - 1;
   }
+
+  /** Returns the point in a few words: "250 V, screen 250 V, cathode 135 Ω". */
+  public String pointWords() {
+    return PointWords.of(point);
+  }
+
+  /** Returns the published figure with its unit. */
+  public String publishedWords() {
+    return PointWords.figure(published, measure);
+  }
+
+  /** Returns what the law gives, with its unit. */
+  public String lawWords() {
+    return PointWords.figure(law, measure);
+  }
+
+  /** Returns how far the law is off, in per cent with a sign. */
+  public String errorWords() {
+    return PointWords.percent(errorShare());
+  }
 }

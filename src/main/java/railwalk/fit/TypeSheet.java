@@ -66,11 +66,11 @@ public record TypeSheet(TubeType type, List<Comparison> rows, List<String> sourc
                 String.format(
                     Locale.ROOT,
                     "%-52s %-15s %9s %9s %6s %%",
-                    PointWords.of(r.point()),
+                    r.pointWords(),
                     r.measure().words(),
-                    PointWords.figure(r.published(), r.measure()),
-                    PointWords.figure(r.law(), r.measure()),
-                    PointWords.percent(r.errorShare())))
+                    r.publishedWords(),
+                    r.lawWords(),
+                    r.errorWords()))
         .toList();
   }
 }

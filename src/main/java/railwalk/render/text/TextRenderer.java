@@ -14,20 +14,31 @@ public final class TextRenderer {
     sheet.paragraph("Voltage chart of " + chart.fileName(), 0);
     sheet.paragraph(chart.conditionsLine(), 0);
     sheet.rule('=');
-    BlockText blocks = new BlockText(sheet);
     for (Page page : chart.pages()) {
-      if (!page.title().isEmpty()) {
-        sheet.blank();
-        sheet.ruleWith(page.title(), '=');
-      }
-      for (Block block : page.blocks()) {
-        sheet.blank();
-        block.accept(blocks);
-      }
+      append(sheet, page);
     }
     sheet.blank();
     sheet.rule('-');
     sheet.paragraph(chart.standingCaution(), 0);
     return sheet.text();
+  }
+
+  /** Returns one page that stands alone, each line ending in a newline. */
+  public String render(Page page) {
+    Sheet sheet = new Sheet();
+    append(sheet, page);
+    return sheet.text();
+  }
+
+  private static void append(Sheet sheet, Page page) {
+    if (!page.title().isEmpty()) {
+      sheet.blank();
+      sheet.ruleWith(page.title(), '=');
+    }
+    BlockText blocks = new BlockText(sheet);
+    for (Block block : page.blocks()) {
+      sheet.blank();
+      block.accept(blocks);
+    }
   }
 }
