@@ -74,9 +74,9 @@ final class HotChassis {
     }
     return switches.isEmpty()
         ? ", switched on or off"
-        : "; live even when off, since "
+        : "; live even when off: "
             + String.join(", ", switches)
-            + " stands in the negative side and the other wire comes through the set";
+            + " breaks only the negative side, and the other wire still reaches it through the set";
   }
 
   /** Returns what the target is called: the chassis, unless it has a node of its own elsewhere. */

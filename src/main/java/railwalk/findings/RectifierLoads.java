@@ -36,7 +36,7 @@ final class RectifierLoads {
         solved,
         section,
         FindingCode.RECTIFIER_DC,
-        " passes ",
+        ": DC ",
         new Excess(dcAmps, limits.dcAmpsMax(), "A", system));
     Reservoir reservoir = Reservoir.at(solved.scene(), section.cathode());
     double peakAmps =
@@ -50,14 +50,14 @@ final class RectifierLoads {
         solved,
         section,
         FindingCode.RECTIFIER_PEAK,
-        " passes in its charging peaks ",
+        ": charging peaks ",
         new Excess(peakAmps, limits.peakPlateAmpsMax(), "A", system));
     add(
         findings,
         solved,
         section,
         FindingCode.RECTIFIER_INVERSE,
-        " stands in the inverse half-wave ",
+        ": inverse peak ",
         new Excess(
             inverseVolts(solved, section, swing), limits.peakInverseVoltsMax(), "V", system));
     return findings;

@@ -42,31 +42,31 @@ final class TubeLoads {
                     solved,
                     section,
                     FindingCode.PLATE_WATTS,
-                    " turns at its {plate} ",
+                    ": {plate} ",
                     new Excess(point.plateWatts(), limits.plateWattsMax(), "W", system)),
                 over(
                     solved,
                     section,
                     FindingCode.SCREEN_WATTS,
-                    " turns at its screen ",
+                    ": screen ",
                     new Excess(point.screenWatts(), limits.screenWattsMax(), "W", system)),
                 over(
                     solved,
                     section,
                     FindingCode.PLATE_VOLTS,
-                    " has {plate} to cathode ",
+                    ": {plate} to cathode ",
                     new Excess(point.plateVolts(), limits.plateVoltsMax(), "V", system)),
                 over(
                     solved,
                     section,
                     FindingCode.SCREEN_VOLTS,
-                    " has screen to cathode ",
+                    ": screen to cathode ",
                     new Excess(point.screenVolts(), limits.screenVoltsMax(), "V", system)),
                 over(
                     solved,
                     section,
                     FindingCode.CATHODE_CURRENT,
-                    " passes from its cathode ",
+                    ": cathode current ",
                     new Excess(point.cathodeAmps(), limits.cathodeAmpsMax(), "A", system)))
             .flatMap(Optional::stream);
     return Stream.concat(
