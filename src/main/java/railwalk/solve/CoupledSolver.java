@@ -16,7 +16,8 @@ import railwalk.walk.SupplyMap;
  * tangent. Since every tangent is exact this is Newton's method on both at once.
  */
 final class CoupledSolver {
-  private static final int MOST_ROUNDS = 60;
+  private static final int MOST_ROUNDS = 120;
+  private static final int PATIENT_ROUNDS = 10;
 
   /**
    * The corrections shrink quadratically: after one of this size (share of the greatest volts) what
@@ -117,6 +118,7 @@ final class CoupledSolver {
       return settleDc();
     }
     for (int round = 0; round < MOST_ROUNDS; round++) {
+      double share = near ? 1 : correctionShare(round);
       for (int g = 0; g < supplies.size(); g++) {
         Supply supply = supplies.get(g);
         if (round < SLOPE_ROUNDS) {
@@ -133,7 +135,7 @@ final class CoupledSolver {
       }
       double change = 0;
       for (int g = 0; g < supplies.size(); g++) {
-        change = Math.max(change, supplies.get(g).correct(portAmps(g), portVolts(g)));
+        change = Math.max(change, supplies.get(g).correct(portAmps(g), portVolts(g), share));
       }
       trace.add("supply round %d, %s: change %.3g", round + 1, near ? "fine" : "coarse", change);
       if (near && change < SETTLED_SHARE) {
@@ -142,6 +144,14 @@ final class CoupledSolver {
       near |= change < NEAR_SHARE;
     }
     return fail(supplies.get(0), "the reservoir volts did not come to rest");
+  }
+
+  /**
+   * Returns how much of a correction to make: all of it at first; less and less when a supply hunts
+   * between two patterns of conduction, full corrections being tried again now and then.
+   */
+  private static double correctionShare(int round) {
+    return round < PATIENT_ROUNDS || round % 6 == 0 ? 1 : PATIENT_ROUNDS / (2.0 * round);
   }
 
   private boolean settleDc() {

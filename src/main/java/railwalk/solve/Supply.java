@@ -17,9 +17,7 @@ import railwalk.circuit.Node;
  * by {@link #setSlopes}.
  */
 final class Supply {
-  /**
-   * Steps a period: means then stand within 0.1 % on the hardest of the conduction-angle table.
-   */
+  /** Steps a period: means then stand within 0.1 % on the hardest of the conduction-angle table. */
   private static final int STEPS = 72;
 
   /** Steps a period while the states are still far off. */
@@ -195,9 +193,10 @@ final class Supply {
   /**
    * Corrects states and drawn currents after the DC network has answered the last tangent.
    *
+   * @param share of the correction to make, 1 for all of it
    * @return the greatest correction, as a share of the group's greatest volts
    */
-  double correct(double[] portAmps, double[] portVolts) {
+  double correct(double[] portAmps, double[] portVolts, double share) {
     Linear last = linear;
     if (last == null) {
       throw new IllegalStateException("no tangent to correct by");
@@ -211,14 +210,14 @@ final class Supply {
       int n = portUnknowns[p];
       double drawn = portAmps[p] - drawnSiemens[n] * portVolts[p];
       double by = drawn - last.startDrawn[n];
-      drawnAmps[n] = drawn;
+      drawnAmps[n] = last.startDrawn[n] + share * by;
       for (int s = 0; s < change.length; s++) {
         change[s] += last.stateByDrawn[p][s] * by;
       }
     }
     double greatest = 0;
     for (int s = 0; s < change.length; s++) {
-      states[s] = last.startStates[s] + change[s];
+      states[s] = last.startStates[s] + share * change[s];
       double scale = net.stores.get(s).isChoke() ? 1e-3 * greatestVolts : greatestVolts;
       greatest = Math.max(greatest, Math.abs(change[s]) / scale);
     }
