@@ -89,6 +89,22 @@ public record Circuit(
         words);
   }
 
+  /** Returns this circuit with other tubes: its parts, and nodes that they need more. */
+  Circuit withTubes(List<Node> moreNodes, List<Element> changed, List<Bottle> fitted) {
+    return new Circuit(
+        title,
+        moreNodes,
+        reference,
+        changed,
+        fitted,
+        transformers,
+        line,
+        meter,
+        spread,
+        states,
+        words);
+  }
+
   /** Returns this circuit on another line. */
   public Circuit withLine(Line changed) {
     return new Circuit(

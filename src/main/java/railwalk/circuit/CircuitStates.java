@@ -2,6 +2,7 @@ package railwalk.circuit;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.UnaryOperator;
 
 /** Makes the circuit of a state out of the circuit of the first column. */
 final class CircuitStates {
@@ -17,35 +18,75 @@ final class CircuitStates {
 
   private static Circuit apply(Circuit circuit, StateChange change) {
     if (change instanceof StateChange.SwitchPosition set) {
-      return circuit.withElements(replace(circuit, set));
+      return replaced(circuit, Switch.class, set.name(), s -> s.onPosition(set.position()));
     }
     if (change instanceof StateChange.ControlSet set) {
-      return circuit.withElements(replace(circuit, set));
+      return replaced(circuit, Potentiometer.class, set.name(), p -> p.setTo(set.share()));
     }
     if (change instanceof StateChange.LineVolts set) {
       Line line = circuit.line();
-      double design = line.stated() ? line.designVolts() : set.volts();
-      return circuit.withLine(new Line(set.volts(), line.hertz(), design));
+      double designVolts = line.stated() ? line.designVolts() : set.volts();
+      return circuit.withLine(new Line(set.volts(), line.hertz(), designVolts));
     }
-    return circuit;
+    if (change instanceof StateChange.TubeOut out) {
+      return circuit.withElements(
+          circuit.elements().stream()
+              .filter(e -> !e.bottle().equalsIgnoreCase(out.bottle()))
+              .toList());
+    }
+    return refitted(circuit, (StateChange.TubeFitted) change);
   }
 
-  private static List<Element> replace(Circuit circuit, StateChange.SwitchPosition set) {
+  private static <E extends Element> Circuit replaced(
+      Circuit circuit, Class<E> kind, String name, UnaryOperator<E> change) {
     List<Element> elements = new ArrayList<>();
     for (Element element : circuit.elements()) {
-      boolean meant = element instanceof Switch && element.name().equalsIgnoreCase(set.name());
-      elements.add(meant ? ((Switch) element).onPosition(set.position()) : element);
+      boolean meant = kind.isInstance(element) && element.name().equalsIgnoreCase(name);
+      elements.add(meant ? change.apply(kind.cast(element)) : element);
     }
-    return elements;
+    return circuit.withElements(elements);
   }
 
-  private static List<Element> replace(Circuit circuit, StateChange.ControlSet set) {
+  private static Circuit refitted(Circuit circuit, StateChange.TubeFitted fitted) {
+    Bottle old =
+        circuit
+            .bottle(fitted.bottle())
+            .orElseThrow(() -> new IllegalArgumentException("no tube " + fitted.bottle()));
+    List<Node> nodes = new ArrayList<>(circuit.nodes());
+    Fitting fitting = fit(circuit, old, fitted, name -> inside(nodes, name));
     List<Element> elements = new ArrayList<>();
+    boolean placed = false;
     for (Element element : circuit.elements()) {
-      boolean meant =
-          element instanceof Potentiometer && element.name().equalsIgnoreCase(set.name());
-      elements.add(meant ? ((Potentiometer) element).setTo(set.share()) : element);
+      if (!element.bottle().equals(old.name())) {
+        elements.add(element);
+      } else if (!placed) {
+        elements.addAll(fitting.elements());
+        placed = true;
+      }
     }
-    return elements;
+    List<Bottle> bottles =
+        circuit.bottles().stream().map(b -> b.equals(old) ? fitting.bottle() : b).toList();
+    return circuit.withTubes(nodes, elements, bottles);
+  }
+
+  private static Fitting fit(
+      Circuit circuit, Bottle old, StateChange.TubeFitted fitted, Socket.NodeMaker maker) {
+    if (old.wiring() == Bottle.Wiring.BY_PIN) {
+      return Socket.byPins(old.name(), fitted.type(), old.pins(), maker);
+    }
+    List<Lead> leads = new Leads(old, fitted.type()).of(circuit.elements());
+    return Socket.byLeads(old.name(), fitted.type(), old.wiring(), leads, maker);
+  }
+
+  /** Returns the node called {@code name}, at the end of the list when there is none yet. */
+  private static Node inside(List<Node> nodes, String name) {
+    for (Node node : nodes) {
+      if (node.name().equals(name)) {
+        return node;
+      }
+    }
+    Node made = new Node(nodes.size(), name);
+    nodes.add(made);
+    return made;
   }
 }

@@ -34,6 +34,11 @@ public sealed interface Element
   /** Returns the nodes it touches, in netlist order, repeated where it touches one twice. */
   List<Node> nodes();
 
+  /** Returns the tube that it is a piece of; empty for every other part. */
+  default String bottle() {
+    return "";
+  }
+
   /** Calls the visitor's method for this kind of part. */
   <R> R accept(ElementVisitor<R> visitor);
 }

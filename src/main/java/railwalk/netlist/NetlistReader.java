@@ -1,18 +1,21 @@
 package railwalk.netlist;
 
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import railwalk.device.Catalogue;
-import railwalk.source.Diagnostic;
-import railwalk.source.Severity;
+import railwalk.source.SourceText;
 
-/** The door: a netlist file or text in, a {@link NetlistResult} out. Never throws on bad text. */
+/**
+ * The door: a netlist file or text in, a {@link NetlistResult} out. Bad text never makes it throw;
+ * everything wrong with it comes back at once, as diagnostics.
+ */
 public final class NetlistReader {
+  private static final int LONGEST_LINE = 20_000;
+
   private NetlistReader() {}
 
   /**
@@ -21,19 +24,51 @@ public final class NetlistReader {
    * @throws IOException when {@code file} itself cannot be read
    */
   public static NetlistResult read(Path file, Catalogue catalogue) throws IOException {
-    return readText(
-        String.valueOf(file.getFileName()),
-        new String(Files.readAllBytes(file), StandardCharsets.UTF_8),
-        catalogue);
+    String name = String.valueOf(file.getFileName());
+    if (Files.size(file) > FileBytes.LARGEST_BYTES) {
+      return refused(Problem.FILE_TOO_LARGE, name, "");
+    }
+    byte[] bytes = Files.readAllBytes(file);
+    Optional<String> foreign = FileBytes.foreignKind(bytes);
+    if (foreign.isPresent()) {
+      return refused(Problem.NOT_A_NETLIST, name, foreign.get());
+    }
+    SourceText text = SourceText.of(name, FileBytes.decode(bytes));
+    return read(new SourceFile(text, file.toRealPath()), Includes.of(file), catalogue);
   }
 
   /** Reads netlist text that stands alone: an include in it is noted and passed over. */
   public static NetlistResult readText(String fileName, String text, Catalogue catalogue) {
-    Diagnostic nothing =
-        new Diagnostic(Severity.ERROR, "empty-netlist", "no part in " + fileName, "", null);
+    if (text.length() > FileBytes.LARGEST_BYTES) {
+      return refused(Problem.FILE_TOO_LARGE, fileName, "");
+    }
+    String plain = text.startsWith("\ufeff") ? text.substring(1) : text;
+    Optional<String> foreign = FileBytes.foreignKind(plain);
+    if (foreign.isPresent()) {
+      return refused(Problem.NOT_A_NETLIST, fileName, foreign.get());
+    }
+    SourceText source = SourceText.of(fileName, plain);
+    return read(new SourceFile(source, null), Includes.none(), catalogue);
+  }
+
+  private static NetlistResult read(SourceFile file, Includes includes, Catalogue catalogue) {
+    if (file.text().lines().stream().allMatch(String::isBlank)) {
+      return refused(Problem.EMPTY_FILE, file.text().fileName(), "");
+    }
+    if (file.text().lines().stream().anyMatch(line -> line.length() > LONGEST_LINE)) {
+      return refused(Problem.NOT_A_NETLIST, file.text().fileName(), "one endless line");
+    }
+    Report report = new Report();
+    Deck deck = DeckReader.read(file, includes, report);
+    CircuitAssembler.Assembled assembled = CircuitAssembler.assemble(deck, catalogue, report);
+    return new NetlistResult(
+        assembled.circuit(), assembled.origins(), assembled.report().inOrder(deck.files()));
+  }
+
+  private static NetlistResult refused(Problem problem, String fileName, String kind) {
     return new NetlistResult(
         Optional.empty(),
         new Origins(Map.of(), Map.of(), Map.of(), Map.of(), List.of()),
-        List.of(nothing));
+        List.of(problem.at(null, fileName, kind)));
   }
 }

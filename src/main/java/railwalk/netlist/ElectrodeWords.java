@@ -1,0 +1,93 @@
+package railwalk.netlist;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalInt;
+import java.util.regex.Pattern;
+import org.jspecify.annotations.Nullable;
+import railwalk.device.Electrode;
+
+/** How people write electrodes and socket pins. */
+final class ElectrodeWords {
+  private static final Map<String, Electrode> WORDS =
+      Map.ofEntries(
+          Map.entry("plate", Electrode.PLATE),
+          Map.entry("anode", Electrode.PLATE),
+          Map.entry("a", Electrode.PLATE),
+          Map.entry("p", Electrode.PLATE),
+          Map.entry("grid", Electrode.GRID),
+          Map.entry("g1", Electrode.GRID),
+          Map.entry("g", Electrode.GRID),
+          Map.entry("screen", Electrode.SCREEN),
+          Map.entry("g2", Electrode.SCREEN),
+          Map.entry("suppressor", Electrode.SUPPRESSOR),
+          Map.entry("g3", Electrode.SUPPRESSOR),
+          Map.entry("bp", Electrode.SUPPRESSOR),
+          Map.entry("cathode", Electrode.CATHODE),
+          Map.entry("k", Electrode.CATHODE),
+          Map.entry("plate1", Electrode.PLATE1),
+          Map.entry("anode1", Electrode.PLATE1),
+          Map.entry("a1", Electrode.PLATE1),
+          Map.entry("p1", Electrode.PLATE1),
+          Map.entry("plate2", Electrode.PLATE2),
+          Map.entry("anode2", Electrode.PLATE2),
+          Map.entry("a2", Electrode.PLATE2),
+          Map.entry("p2", Electrode.PLATE2),
+          Map.entry("diode1", Electrode.DIODE1),
+          Map.entry("d1", Electrode.DIODE1),
+          Map.entry("diode2", Electrode.DIODE2),
+          Map.entry("d2", Electrode.DIODE2),
+          Map.entry("heater1", Electrode.HEATER1),
+          Map.entry("h1", Electrode.HEATER1),
+          Map.entry("f1", Electrode.HEATER1),
+          Map.entry("heater2", Electrode.HEATER2),
+          Map.entry("h2", Electrode.HEATER2),
+          Map.entry("f2", Electrode.HEATER2),
+          Map.entry("heatertap", Electrode.HEATER_TAP));
+
+  private static final Pattern PIN = Pattern.compile("\\d{1,2}");
+  private static final String CAP = "cap";
+
+  private ElectrodeWords() {}
+
+  /** Returns the electrode that {@code word} names. */
+  static Optional<Electrode> electrode(String word) {
+    return Optional.ofNullable(WORDS.get(word.toLowerCase(Locale.ROOT)));
+  }
+
+  /** Returns the socket pin that {@code word} names, 0 for the top cap. */
+  static OptionalInt pin(String word) {
+    if (word.equalsIgnoreCase(CAP)) {
+      return OptionalInt.of(0);
+    }
+    return PIN.matcher(word).matches()
+        ? OptionalInt.of(Integer.parseInt(word))
+        : OptionalInt.empty();
+  }
+
+  /** Returns how a message names a pin. */
+  static String pinName(int pin) {
+    return pin == 0 ? "the top cap" : "pin " + pin;
+  }
+
+  /** Returns the electrodes in the order of {@code words}; null when a word names none. */
+  static @Nullable List<Electrode> order(List<Word> words) {
+    List<Electrode> order = new ArrayList<>();
+    for (Word word : words) {
+      Optional<Electrode> electrode = electrode(word.text());
+      if (electrode.isEmpty()) {
+        return null;
+      }
+      order.add(electrode.get());
+    }
+    return order.isEmpty() ? null : order;
+  }
+
+  /** Returns the electrode words, for suggestions. */
+  static List<String> all() {
+    return WORDS.keySet().stream().filter(word -> word.length() > 3).sorted().toList();
+  }
+}
