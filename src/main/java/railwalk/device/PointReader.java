@@ -42,38 +42,50 @@ final class PointReader {
   PublishedPoint read(DataLine line) {
     line.allow(OPTIONS);
     PublishedPoint point =
-        new PublishedPoint(
-            line.option("section", ""),
-            line.required("plate"),
-            line.figure("screen"),
-            line.figure("grid", line.has("cathode") ? 0 : Double.NaN),
-            line.figure("cathode", 0),
-            reference(line),
-            (int) line.figure("sharing", 1),
-            line.figure("load", 0),
-            line.figure("screenload", 0),
-            line.option("connection", "").equals("triode"),
-            line.figure("current"),
-            line.figure("screencurrent"),
-            line.figure("cathodecurrent"),
-            line.figure("gm"),
-            line.figure("mu"),
-            line.figure("screenmu"),
-            line.figure("rp"),
-            oneOf(line, "confidence", "high", "medium"),
-            oneOf(line, "provenance", "transcription", "memory", "mixed"),
-            source(line),
-            line.option("of", ""),
-            line.figure("weight", 1));
-    if (Double.isNaN(point.plateAmps()) && Double.isNaN(point.cathodeAmps())) {
+        new PublishedPoint(line.option("section", ""), setup(line), figures(line), credit(line));
+    PublishedPoint.Figures figures = point.published();
+    if (Double.isNaN(figures.plateAmps()) && Double.isNaN(figures.cathodeAmps())) {
       throw line.error("the point has no current", "current=… or cathodecurrent=…");
     }
-    double product = point.gmSiemens() * point.plateOhms();
-    if (Math.abs(point.mu() / product - 1) > ROUNDING) {
+    double product = figures.gmSiemens() * figures.plateOhms();
+    if (Math.abs(figures.mu() / product - 1) > ROUNDING) {
       throw line.error(
           "mu", "mu and gm · rp differ by more than 15 %", "one of the three is misread");
     }
     return point;
+  }
+
+  private static PublishedPoint.Setup setup(DataLine line) {
+    return new PublishedPoint.Setup(
+        line.required("plate"),
+        line.figure("screen"),
+        line.figure("grid", line.has("cathode") ? 0 : Double.NaN),
+        line.figure("cathode", 0),
+        reference(line),
+        (int) line.figure("sharing", 1),
+        line.figure("load", 0),
+        line.figure("screenload", 0),
+        line.option("connection", "").equals("triode"));
+  }
+
+  private static PublishedPoint.Figures figures(DataLine line) {
+    return new PublishedPoint.Figures(
+        line.figure("current"),
+        line.figure("screencurrent"),
+        line.figure("cathodecurrent"),
+        line.figure("gm"),
+        line.figure("mu"),
+        line.figure("screenmu"),
+        line.figure("rp"));
+  }
+
+  private PublishedPoint.Credit credit(DataLine line) {
+    return new PublishedPoint.Credit(
+        source(line),
+        oneOf(line, "provenance", "transcription", "memory", "mixed"),
+        oneOf(line, "confidence", "high", "medium"),
+        line.option("of", ""),
+        line.figure("weight", 1));
   }
 
   private static PublishedPoint.Reference reference(DataLine line) {

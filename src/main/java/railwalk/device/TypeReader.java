@@ -39,6 +39,7 @@ final class TypeReader {
   TubeType read() {
     List<SectionType> sections = sections();
     DataLine base = file.one("base");
+    base.allow(Set.of("source"));
     return new TubeType(
         file.name(),
         file.all("alias").stream().flatMap(line -> line.words().stream()).toList(),
@@ -55,6 +56,7 @@ final class TypeReader {
     List<SectionType> sections = new ArrayList<>();
     file.one("section");
     for (DataLine line : file.all("section")) {
+      line.allow(Set.of());
       String id = line.size() > 1 ? line.word(0) : "";
       String word = line.word(line.size() > 1 ? 1 : 0);
       SectionKind kind = kind(line, word);
@@ -76,7 +78,12 @@ final class TypeReader {
   }
 
   private double spread(int index) {
-    return file.all("spread").isEmpty() ? 1 : file.one("spread").figure(index);
+    if (file.all("spread").isEmpty()) {
+      return 1;
+    }
+    DataLine line = file.one("spread");
+    line.allow(Set.of("source"));
+    return line.figure(index);
   }
 
   private static SectionKind kind(DataLine line, String word) {
@@ -171,6 +178,7 @@ final class TypeReader {
   private SortedMap<Integer, PinUse> pins(List<SectionType> sections) {
     SortedMap<Integer, PinUse> pins = new TreeMap<>();
     for (DataLine line : file.all("pin")) {
+      line.allow(Set.of());
       int number = (int) line.figure(0);
       String id = line.size() > 2 ? line.word(1) : "";
       if (sections.stream().noneMatch(s -> id.isEmpty() || s.id().equals(id))) {

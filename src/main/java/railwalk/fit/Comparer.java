@@ -30,7 +30,7 @@ final class Comparer {
     this.cutOffAmps =
         CUT_OFF_SHARE
             * points.stream()
-                .mapToDouble(PublishedPoint::plateAmps)
+                .mapToDouble(p -> p.published().plateAmps())
                 .filter(a -> !Double.isNaN(a))
                 .max()
                 .orElse(0);
@@ -44,25 +44,32 @@ final class Comparer {
   }
 
   private void compare(AmplifierLaw law, PublishedPoint point, List<Comparison> all) {
-    if (point.plateAmps() < cutOffAmps) {
+    if (point.published().plateAmps() < cutOffAmps) {
       double bias = CutOff.gridVolts(law, point);
-      add(all, point, Measure.BIAS, point.gridVolts(), bias, BIAS);
+      add(all, point, Measure.BIAS, point.setup().gridVolts(), bias, BIAS);
       return;
     }
     Standing at = Standing.of(law, point);
     SectionCurrents is = at.currents();
-    double plate = is.plateAmps + (point.triodeConnected() ? is.screenAmps : 0);
-    add(all, point, Measure.PLATE_CURRENT, point.plateAmps(), plate, CURRENT);
+    double plate = is.plateAmps + (point.setup().triodeConnected() ? is.screenAmps : 0);
+    add(all, point, Measure.PLATE_CURRENT, point.published().plateAmps(), plate, CURRENT);
     add(
         all,
         point,
         Measure.CATHODE_CURRENT,
-        point.cathodeAmps(),
+        point.published().cathodeAmps(),
         is.plateAmps + is.screenAmps,
         CATHODE_CURRENT);
-    add(all, point, Measure.SCREEN_CURRENT, point.screenAmps(), is.screenAmps, SCREEN_CURRENT);
-    if (point.loadOhms() > 0) {
-      double published = point.plateVolts() - point.loadOhms() * point.plateAmps();
+    add(
+        all,
+        point,
+        Measure.SCREEN_CURRENT,
+        point.published().screenAmps(),
+        is.screenAmps,
+        SCREEN_CURRENT);
+    if (point.setup().loadOhms() > 0) {
+      double published =
+          point.setup().plateVolts() - point.setup().loadOhms() * point.published().plateAmps();
       add(
           all,
           point,
@@ -75,28 +82,28 @@ final class Comparer {
   }
 
   private static void slopes(PublishedPoint point, SectionCurrents is, List<Comparison> all) {
-    boolean joined = point.triodeConnected();
+    boolean joined = point.setup().triodeConnected();
     double byGrid = is.plateByGridSiemens + (joined ? is.screenByGridSiemens : 0);
     double byPlate =
         is.plateByPlateSiemens
             + (joined
                 ? is.plateByScreenSiemens + is.screenByPlateSiemens + is.screenByScreenSiemens
                 : 0);
-    boolean triode = joined || Double.isNaN(point.screenVolts());
-    add(all, point, Measure.MUTUAL_CONDUCTANCE, point.gmSiemens(), byGrid, SLOPE);
-    add(all, point, Measure.AMPLIFICATION, point.mu(), byGrid / byPlate, SLOPE);
+    boolean triode = joined || Double.isNaN(point.setup().screenVolts());
+    add(all, point, Measure.MUTUAL_CONDUCTANCE, point.published().gmSiemens(), byGrid, SLOPE);
+    add(all, point, Measure.AMPLIFICATION, point.published().mu(), byGrid / byPlate, SLOPE);
     add(
         all,
         point,
         Measure.SCREEN_AMPLIFICATION,
-        point.screenMu(),
+        point.published().screenMu(),
         byGrid / is.plateByScreenSiemens,
         SCREEN_MU);
     add(
         all,
         point,
         Measure.PLATE_RESISTANCE,
-        point.plateOhms(),
+        point.published().plateOhms(),
         1 / byPlate,
         triode ? SLOPE : PENTODE_RESISTANCE);
   }
@@ -115,13 +122,13 @@ final class Comparer {
 
   /** Returns how much a point counts: a sheet at hand most, memory less, medium confidence half. */
   static double weight(PublishedPoint point) {
-    double confidence = point.confidence().equals("high") ? 1 : 0.5;
+    double confidence = point.credit().confidence().equals("high") ? 1 : 0.5;
     double provenance =
-        switch (point.provenance()) {
+        switch (point.credit().provenance()) {
           case "transcription" -> 1;
           case "mixed" -> 0.85;
           default -> 0.7;
         };
-    return confidence * provenance * point.weight();
+    return confidence * provenance * point.credit().weight();
   }
 }

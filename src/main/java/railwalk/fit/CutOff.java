@@ -18,18 +18,19 @@ final class CutOff {
    * current's logarithm, which rises with the grid and bends down. NaN when not found.
    */
   static double gridVolts(AmplifierLaw law, PublishedPoint point) {
-    boolean joined = point.triodeConnected();
+    PublishedPoint.Setup setup = point.setup();
+    boolean joined = setup.triodeConnected();
     double screen =
-        joined ? point.plateVolts() : Double.isNaN(point.screenVolts()) ? 0 : point.screenVolts();
+        joined ? setup.plateVolts() : Double.isNaN(setup.screenVolts()) ? 0 : setup.screenVolts();
     SectionCurrents is = new SectionCurrents();
-    double grid = point.gridVolts();
+    double grid = setup.gridVolts();
     for (int step = 0; step < STEPS; step++) {
-      law.evaluate(point.plateVolts(), screen, grid, is);
+      law.evaluate(setup.plateVolts(), screen, grid, is);
       double amps = is.plateAmps + (joined ? is.screenAmps : 0);
       double slope = is.plateByGridSiemens + (joined ? is.screenByGridSiemens : 0);
       double push =
           amps > 0 && slope > 0
-              ? Math.log(point.plateAmps() / amps) * amps / slope
+              ? Math.log(point.published().plateAmps() / amps) * amps / slope
               : LONGEST_STEP_VOLTS;
       grid += Math.max(-LONGEST_STEP_VOLTS, Math.min(LONGEST_STEP_VOLTS, push));
       if (Math.abs(push) < 1e-10) {

@@ -51,14 +51,15 @@ final class LeastSquaresFit {
   private RealVector start(List<PublishedPoint> points) {
     RealVector start = new ArrayRealVector(centres);
     points.stream()
-        .mapToDouble(p -> Double.isNaN(p.mu()) ? p.screenMu() : p.mu())
+        .mapToDouble(
+            p -> Double.isNaN(p.published().mu()) ? p.published().screenMu() : p.published().mu())
         .filter(mu -> !Double.isNaN(mu))
         .average()
         .ifPresent(mu -> start.setEntry(0, Math.log(mu)));
     // kg divides all currents: one step brings the first current to its place.
     List<Comparison> first = comparer.compare(curve.law(natural(start)));
     first.stream()
-        .filter(c -> c.measure() == Measure.PLATE_CURRENT && c.point().cathodeOhms() == 0)
+        .filter(c -> c.measure() == Measure.PLATE_CURRENT && c.point().setup().cathodeOhms() == 0)
         .findFirst()
         .ifPresent(c -> start.addToEntry(2, Math.log(c.law() / c.published())));
     return start;

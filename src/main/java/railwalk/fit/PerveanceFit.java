@@ -23,9 +23,9 @@ final class PerveanceFit {
 
   /** Returns the published drop beside the law's at the same current. */
   static Comparison compare(RectifierLaw law, PublishedPoint point) {
-    double drop = Math.pow(point.plateAmps() / law.perveance(), 2.0 / 3);
+    double drop = Math.pow(point.published().plateAmps() / law.perveance(), 2.0 / 3);
     double tolerance = DROP / Comparer.weight(point);
-    return new Comparison(point, Measure.DROP, point.plateVolts(), drop, tolerance);
+    return new Comparison(point, Measure.DROP, point.setup().plateVolts(), drop, tolerance);
   }
 
   /** Returns K, ampere per volt^1.5. */
@@ -37,7 +37,9 @@ final class PerveanceFit {
       double tolerance = DROP / Comparer.weight(point);
       double weight = 1 / (tolerance * tolerance);
       weights += weight;
-      sum += weight * Math.log(point.plateAmps() / Math.pow(point.plateVolts(), 1.5));
+      sum +=
+          weight
+              * Math.log(point.published().plateAmps() / Math.pow(point.setup().plateVolts(), 1.5));
     }
     return Math.exp(sum / weights);
   }

@@ -11,26 +11,27 @@ final class PointWords {
   private PointWords() {}
 
   static String of(PublishedPoint point) {
+    PublishedPoint.Setup setup = point.setup();
     List<String> words = new ArrayList<>();
-    words.add(Quantity.volts(point.plateVolts()));
-    if (point.loadOhms() > 0) {
-      words.set(0, words.get(0) + " through " + Quantity.ohms(point.loadOhms()));
+    words.add(Quantity.volts(setup.plateVolts()));
+    if (setup.loadOhms() > 0) {
+      words.set(0, words.get(0) + " through " + Quantity.ohms(setup.loadOhms()));
     }
-    if (point.triodeConnected()) {
+    if (setup.triodeConnected()) {
       words.add("as triode");
-    } else if (point.screenOhms() > 0) {
-      words.add("screen through " + Quantity.ohms(point.screenOhms()));
-    } else if (!Double.isNaN(point.screenVolts())) {
-      words.add("screen " + Quantity.volts(point.screenVolts()));
+    } else if (setup.screenOhms() > 0) {
+      words.add("screen through " + Quantity.ohms(setup.screenOhms()));
+    } else if (!Double.isNaN(setup.screenVolts())) {
+      words.add("screen " + Quantity.volts(setup.screenVolts()));
     }
-    if (point.cathodeOhms() > 0) {
-      String shared = point.sharing() > 1 ? " for " + point.sharing() : "";
-      words.add("cathode " + Quantity.ohms(point.cathodeOhms()) + shared);
-    } else if (!Double.isNaN(point.gridVolts())) {
-      words.add("grid " + Quantity.volts(point.gridVolts()));
+    if (setup.cathodeOhms() > 0) {
+      String shared = setup.sharing() > 1 ? " for " + setup.sharing() : "";
+      words.add("cathode " + Quantity.ohms(setup.cathodeOhms()) + shared);
+    } else if (!Double.isNaN(setup.gridVolts())) {
+      words.add("grid " + Quantity.volts(setup.gridVolts()));
     }
-    if (!point.of().isEmpty()) {
-      words.add(point.of());
+    if (!point.credit().of().isEmpty()) {
+      words.add(point.credit().of());
     }
     return String.join(", ", words);
   }
@@ -42,7 +43,9 @@ final class PointWords {
   }
 
   static String percent(double share) {
-    String text = String.format(Locale.ROOT, "%+.1f", 100 * share);
-    return text.replace('-', '\u2212');
+    double rounded = Math.rint(1000 * share) / 10;
+    return rounded == 0
+        ? "0.0"
+        : String.format(Locale.ROOT, "%+.1f", rounded).replace('-', '\u2212');
   }
 }

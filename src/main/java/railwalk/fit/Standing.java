@@ -14,21 +14,21 @@ final class Standing {
   private static final double SETTLED = 1e-12;
 
   private final AmplifierLaw law;
-  private final PublishedPoint point;
+  private final PublishedPoint.Setup setup;
   private final SectionCurrents currents = new SectionCurrents();
   private double plateVolts;
   private double screenVolts;
   private double gridVolts;
 
-  private Standing(AmplifierLaw law, PublishedPoint point) {
+  private Standing(AmplifierLaw law, PublishedPoint.Setup setup) {
     this.law = law;
-    this.point = point;
+    this.setup = setup;
   }
 
   /** Returns where {@code law} settles at {@code point}. */
   static Standing of(AmplifierLaw law, PublishedPoint point) {
-    Standing standing = new Standing(law, point);
-    standing.settle();
+    Standing standing = new Standing(law, point.setup());
+    standing.settle(point.published());
     return standing;
   }
 
@@ -50,21 +50,23 @@ final class Standing {
 
   /** Returns plate volts against the foot of the cathode resistor. */
   double plateVoltsToFoot() {
-    return point.plateVolts() - point.loadOhms() * currents.plateAmps;
+    return setup.plateVolts() - setup.loadOhms() * currents.plateAmps;
   }
 
-  private void settle() {
-    double plate = Double.isNaN(point.plateAmps()) ? 0.8 * point.cathodeAmps() : point.plateAmps();
+  /** Settles, starting from the published currents. */
+  private void settle(PublishedPoint.Figures published) {
+    double plate =
+        Double.isNaN(published.plateAmps()) ? 0.8 * published.cathodeAmps() : published.plateAmps();
     double screen = hasScreen() ? 0.15 * plate : 0;
     double off = mismatch(plate, screen);
     for (int step = 0; step < STEPS && off > SETTLED; step++) {
       double common = -(lifted() ? cathodeOhms() : 0);
-      double joined = point.triodeConnected() ? -point.loadOhms() : 0;
-      double plateVoltsByPlate = common - point.loadOhms();
+      double joined = setup.triodeConnected() ? -setup.loadOhms() : 0;
+      double plateVoltsByPlate = common - setup.loadOhms();
       double plateVoltsByScreen = common + joined;
-      double screenVoltsByPlate = point.triodeConnected() ? plateVoltsByPlate : common;
+      double screenVoltsByPlate = setup.triodeConnected() ? plateVoltsByPlate : common;
       double screenVoltsByScreen =
-          point.triodeConnected() ? plateVoltsByScreen : common - point.screenOhms();
+          setup.triodeConnected() ? plateVoltsByScreen : common - setup.screenOhms();
       double a = row(plateVoltsByPlate, screenVoltsByPlate, true) - 1;
       double b = row(plateVoltsByScreen, screenVoltsByScreen, true);
       double c = row(plateVoltsByPlate, screenVoltsByPlate, false);
@@ -90,13 +92,13 @@ final class Standing {
   private double mismatch(double plate, double screen) {
     double lift = cathodeOhms() * (plate + screen);
     double foot = lifted() ? lift : 0;
-    double load = point.loadOhms() * (point.triodeConnected() ? plate + screen : plate);
-    plateVolts = point.plateVolts() - foot - load;
+    double load = setup.loadOhms() * (setup.triodeConnected() ? plate + screen : plate);
+    plateVolts = setup.plateVolts() - foot - load;
     screenVolts =
-        point.triodeConnected()
+        setup.triodeConnected()
             ? plateVolts
-            : hasScreen() ? point.screenVolts() - foot - point.screenOhms() * screen : 0;
-    gridVolts = point.gridVolts() - lift;
+            : hasScreen() ? setup.screenVolts() - foot - setup.screenOhms() * screen : 0;
+    gridVolts = setup.gridVolts() - lift;
     law.evaluate(plateVolts, screenVolts, gridVolts, currents);
     return Math.abs(currents.plateAmps - plate) + Math.abs(currents.screenAmps - screen);
   }
@@ -113,14 +115,14 @@ final class Standing {
   }
 
   private double cathodeOhms() {
-    return point.cathodeOhms() * point.sharing();
+    return setup.cathodeOhms() * setup.sharing();
   }
 
   private boolean lifted() {
-    return point.reference() == PublishedPoint.Reference.SUPPLY;
+    return setup.reference() == PublishedPoint.Reference.SUPPLY;
   }
 
   private boolean hasScreen() {
-    return point.triodeConnected() || !Double.isNaN(point.screenVolts());
+    return setup.triodeConnected() || !Double.isNaN(setup.screenVolts());
   }
 }

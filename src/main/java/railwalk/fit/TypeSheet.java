@@ -60,12 +60,14 @@ public record TypeSheet(TubeType type, List<Comparison> rows, List<String> sourc
 
   /** Returns the rows as text, a line each: point, figure, published, law, error. */
   public List<String> lines() {
+    int width = rows.stream().mapToInt(r -> r.pointWords().length()).max().orElse(1);
+    String format = "%-" + width + "s  %-15s %9s %9s %6s %%";
     return rows.stream()
         .map(
             r ->
                 String.format(
                     Locale.ROOT,
-                    "%-52s %-15s %9s %9s %6s %%",
+                    format,
                     r.pointWords(),
                     r.measure().words(),
                     r.publishedWords(),

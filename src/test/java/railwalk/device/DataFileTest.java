@@ -36,9 +36,9 @@ class DataFileTest {
     assertThat(type.name()).isEqualTo("DEMO");
     assertThat(type.sections().get(0).ratings().plateWattsMax()).isEqualTo(1);
     PublishedPoint point = file.points().get(0);
-    assertThat(point.plateAmps()).isEqualTo(1.2e-3);
-    assertThat(point.plateOhms()).isEqualTo(62_500);
-    assertThat(point.source()).isEqualTo("made up");
+    assertThat(point.published().plateAmps()).isEqualTo(1.2e-3);
+    assertThat(point.published().plateOhms()).isEqualTo(62_500);
+    assertThat(point.credit().source()).isEqualTo("made up");
     assertThat(file.curves()).containsExactly("triode");
   }
 

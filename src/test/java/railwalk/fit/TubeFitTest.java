@@ -104,29 +104,10 @@ class TubeFitTest {
   }
 
   private static PublishedPoint point(double plateVolts, double gridVolts, double plateAmps) {
-    double none = Double.NaN;
     return new PublishedPoint(
         "",
-        plateVolts,
-        none,
-        gridVolts,
-        0,
-        PublishedPoint.Reference.CATHODE,
-        1,
-        0,
-        0,
-        false,
-        plateAmps,
-        none,
-        none,
-        none,
-        none,
-        none,
-        none,
-        "high",
-        "transcription",
-        "made up",
-        "",
-        1);
+        PublishedPoint.Setup.triode(plateVolts, gridVolts),
+        PublishedPoint.Figures.current(plateAmps),
+        new PublishedPoint.Credit("made up", "transcription", "high", "", 1));
   }
 }

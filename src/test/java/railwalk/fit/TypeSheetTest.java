@@ -23,7 +23,7 @@ class TypeSheetTest {
         continue;
       }
       for (Comparison row : TypeSheet.of(CATALOGUE.file(type.name()).orElseThrow()).rows()) {
-        boolean own = row.point().of().isEmpty() && row.point().confidence().equals("high");
+        boolean own = row.point().credit().isHigh();
         if (own && row.measure() == measure) {
           System.out.printf(
               "%-7s %-50s %8s %8s %6s %%%n",
@@ -42,7 +42,9 @@ class TypeSheetTest {
   @Test
   void plateCurrentsOfPublishedPoints() {
     List<Comparison> rows =
-        rows(Measure.PLATE_CURRENT).stream().filter(r -> r.point().loadOhms() == 0).toList();
+        rows(Measure.PLATE_CURRENT).stream()
+            .filter(r -> r.point().setup().loadOhms() == 0)
+            .toList();
     long near = rows.stream().filter(r -> Math.abs(r.errorShare()) <= 0.05).count();
     double worst = rows.stream().mapToDouble(r -> Math.abs(r.errorShare())).max().orElseThrow();
     System.out.printf("%d of %d within 5 %%, worst %.1f %%%n", near, rows.size(), 100 * worst);
@@ -62,7 +64,7 @@ class TypeSheetTest {
   @Test
   void plateVoltsOfResistanceCoupledStages() {
     List<Comparison> rows =
-        rows(Measure.PLATE_VOLTS).stream().filter(r -> r.point().loadOhms() > 0).toList();
+        rows(Measure.PLATE_VOLTS).stream().filter(r -> r.point().setup().loadOhms() > 0).toList();
     assertThat(rows).hasSizeGreaterThanOrEqualTo(7);
     assertThat(rows).allMatch(r -> Math.abs(r.errorShare()) <= 0.04);
   }
@@ -89,7 +91,9 @@ class TypeSheetTest {
   @Test
   void mutualConductance() {
     assertThat(
-            rows(Measure.MUTUAL_CONDUCTANCE).stream().filter(r -> r.point().weight() == 1).toList())
+            rows(Measure.MUTUAL_CONDUCTANCE).stream()
+                .filter(r -> r.point().credit().weight() == 1)
+                .toList())
         .hasSizeGreaterThan(20)
         .allMatch(r -> Math.abs(r.errorShare()) <= 0.15);
   }
