@@ -228,15 +228,20 @@ final class CoupledSolver {
     return slopes;
   }
 
-  /** Returns the settled network's derivatives, factored; valid until the network is used again. */
+  /**
+   * Returns the settled network's derivatives, factored; valid until the network is used again.
+   * Nodes that float are tied by as little as will do.
+   */
   SparseLu factored() {
     double[] residual = new double[dc.size];
     double[] jacobian = dc.matrix.newValues();
-    dc.evaluate(x, 1, 0, residual, jacobian);
-    if (!dc.matrix.lu().factor(jacobian)) {
-      throw new IllegalStateException("a settled network has no unique answer");
+    for (double tieSiemens : new double[] {0, 1e-12, 1e-9}) {
+      dc.evaluate(x, 1, tieSiemens, residual, jacobian);
+      if (dc.matrix.lu().factor(jacobian)) {
+        return dc.matrix.lu();
+      }
     }
-    return dc.matrix.lu();
+    throw new IllegalStateException("a settled network has no unique answer");
   }
 
   /** Returns the greatest current that is missing at any node of the DC network, ampere. */

@@ -84,19 +84,24 @@ final class Newton {
       if (trace.wanted()) {
         trace.add("%d: step share %.3g, worst node %s", iteration, share, net.nodeName(worstNode));
       }
-      if (settled && balanced(x, drive, tieSiemens)) {
+      if (settled && unbalancedAmps(x, drive, tieSiemens) <= SETTLED_AMPS) {
         return true;
       }
     }
     return false;
   }
 
-  private boolean balanced(double[] x, double drive, double tieSiemens) {
+  /** Returns whether no more than {@code amps} are missing at any node, ties taken off. */
+  boolean balanced(double[] x, double amps) {
+    return unbalancedAmps(x, 1, 0) <= amps;
+  }
+
+  private double unbalancedAmps(double[] x, double drive, double tieSiemens) {
     net.evaluate(x, drive, tieSiemens, residual, jacobian);
-    double through = 0;
+    double greatest = 0;
     for (int n = 0; n < net.nodeCount; n++) {
-      through = Math.max(through, Math.abs(residual[n]));
+      greatest = Math.max(greatest, Math.abs(residual[n]));
     }
-    return through <= SETTLED_AMPS;
+    return greatest;
   }
 }

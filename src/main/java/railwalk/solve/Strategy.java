@@ -25,11 +25,13 @@ interface Strategy {
 
   /**
    * Ties every node to the reference by a conductance, and takes that away decade by decade: the
-   * last run is without any.
+   * last run is without any. Where only dark tubes lead to a node it floats and no answer is the
+   * only one; then the last tied one holds if currents balance in it without the ties.
    */
   record FadingTies() implements Strategy {
     private static final double FIRST_SIEMENS = 1e-2;
     private static final double LAST_SIEMENS = 1e-12;
+    private static final double AFLOAT_AMPS = 1e-9;
 
     @Override
     public String name() {
@@ -59,7 +61,12 @@ interface Strategy {
           }
         }
       }
-      return newton.run(x, 1, 0);
+      System.arraycopy(x, 0, good, 0, x.length);
+      if (newton.run(x, 1, 0)) {
+        return true;
+      }
+      System.arraycopy(good, 0, x, 0, x.length);
+      return newton.balanced(x, AFLOAT_AMPS);
     }
   }
 
