@@ -8,9 +8,17 @@ final class Newton {
   private static final int MOST_ITERATIONS = 200;
 
   /** A step is the last when no volt moves by more than this part of itself, or this many volts. */
-  private static final double SETTLED_SHARE = 1e-10;
+  private static final double SETTLED_SHARE = 1e-9;
 
-  private static final double SETTLED_VOLTS = 1e-9;
+  private static final double SETTLED_VOLTS = 1e-8;
+
+  /**
+   * After that many steps rounding is taken to be all that still moves, up to this many times the
+   * limits above; the currents must balance all the same.
+   */
+  private static final int ROUNDING_ITERATIONS = 30;
+
+  private static final double ROUNDING_FACTOR = 1e3;
 
   /** Greatest current that may be missing at a node of a settled network. */
   private static final double SETTLED_AMPS = 1e-11;
@@ -63,6 +71,7 @@ final class Newton {
       net.matrix.lu().solve(step, step);
       double share = limit.share(net, x, step);
       boolean settled = share == 1;
+      double limitFactor = iteration < ROUNDING_ITERATIONS ? 1 : ROUNDING_FACTOR;
       double worst = 0;
       for (int n = 0; n < net.size; n++) {
         double move = share * step[n];
@@ -73,7 +82,7 @@ final class Newton {
         if (n < net.nodeCount) {
           double scale = SETTLED_SHARE * Math.abs(x[n]) + SETTLED_VOLTS;
           double size = Math.abs(move) / scale;
-          settled &= size <= 1;
+          settled &= size <= limitFactor;
           if (size > worst) {
             worst = size;
             worstNode = n;
