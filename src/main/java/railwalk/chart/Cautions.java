@@ -21,6 +21,9 @@ final class Cautions {
   /** Code of the finding that line and chassis are one. */
   static final String HOT_CHASSIS = "hot-chassis";
 
+  /** Ways of the line to the chassis that the large box names. */
+  private static final int MOST_SHOWN = 3;
+
   private final ChartInput input;
   private final Column first;
   private final Circuit circuit;
@@ -51,7 +54,10 @@ final class Cautions {
     if (points.isEmpty()) {
       return Optional.empty();
     }
-    List<String> all = new ArrayList<>(points);
+    List<String> all = new ArrayList<>(points.subList(0, Math.min(MOST_SHOWN, points.size())));
+    if (points.size() > MOST_SHOWN) {
+      all.add((points.size() - MOST_SHOWN) + " more ways are listed under Findings.");
+    }
     all.add(
         wording.say(
             "Touch nothing metal while the plug is in. Work behind an isolating transformer only, and"

@@ -10,7 +10,7 @@ import java.util.List;
  * @param fileName of the netlist
  * @param conditionsLine the conditions in one line, for the head of every sheet
  * @param standingCaution one sentence for the foot of every sheet
- * @param pages in reading order; each starts a sheet of its own on paper
+ * @param pages in reading order
  * @param figures the same results at full precision, a column for each state: what machines read.
  *     The first is the amplifier as its netlist stands
  */

@@ -39,7 +39,7 @@ final class ChartComposition {
     pages.add(new TubesPage(first, cells, wording).page());
     List<Block> drops = new DropsTable(first, wording).blocks().toList();
     if (!drops.isEmpty()) {
-      pages.add(new Page("Drops show currents", drops));
+      pages.add(new Page("Drops and what they tell of currents", drops));
     }
     if (!input.states().isEmpty()) {
       pages.add(new StatesPage(input, figures, wording).page());

@@ -3,6 +3,7 @@ package railwalk.chart;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Line;
 import railwalk.circuit.Meter;
@@ -10,6 +11,7 @@ import railwalk.circuit.Potentiometer;
 import railwalk.circuit.Spread;
 import railwalk.circuit.State;
 import railwalk.circuit.Switch;
+import railwalk.source.Severity;
 import railwalk.units.Quantity;
 
 /** The first page: what the figures hold for, and the cautions. */
@@ -71,10 +73,25 @@ final class ConditionsPage {
     }
     entries.add(plain(wording.say("{Tubes} in"), tubesIn()));
     entries.add(plain("Low–high", bandText(circuit.spread())));
+    entries.add(findings());
     for (State state : statesShown()) {
       entries.add(plain("State " + state.name(), new StateWords(circuit, wording).changes(state)));
     }
     return entries;
+  }
+
+  private KeyFigures.Entry findings() {
+    long warnings =
+        Stream.concat(input.diagnostics().stream(), input.first().findings().stream())
+            .filter(d -> d.severity() != Severity.NOTE)
+            .distinct()
+            .count();
+    return new KeyFigures.Entry(
+        "Findings",
+        warnings == 0
+            ? "none"
+            : warnings + (warnings == 1 ? " warning" : " warnings") + ", listed at the end",
+        warnings > 0);
   }
 
   private List<State> statesShown() {

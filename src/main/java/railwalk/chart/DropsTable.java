@@ -51,7 +51,7 @@ final class DropsTable {
         groups.add(new Table.Group(wording.say(role.title), "", rows, List.of()));
       }
     }
-    return groups.isEmpty() ? Stream.empty() : Stream.of(new Table("Drops", columns(), groups));
+    return groups.isEmpty() ? Stream.empty() : Stream.of(new Table("", columns(), groups));
   }
 
   private static List<Table.Column> columns() {

@@ -30,11 +30,12 @@ public record Ladder(List<Feed> feeds) implements Block {
   /**
    * The head of one rail.
    *
+   * @param negative whether the rail stands below the reference
    * @param name of the rectifier or source
    * @param lines what else is to be said of it
    * @param rail the way to the first node
    */
-  public record Feed(Source source, String name, List<String> lines, Span rail) {
+  public record Feed(Source source, boolean negative, String name, List<String> lines, Span rail) {
     public Feed {
       lines = List.copyOf(lines);
     }

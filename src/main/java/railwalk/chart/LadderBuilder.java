@@ -6,7 +6,6 @@ import java.util.List;
 import java.util.Objects;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
-import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.circuit.VoltageSource;
 import railwalk.circuit.Winding;
@@ -36,6 +35,7 @@ final class LadderBuilder {
 
   private Ladder.Feed feed(SupplyNode first) {
     Ladder.Span rail = span(first);
+    boolean negative = column.point().volts(first.node()) < 0;
     if (first.group() < 0) {
       List<VoltageSource> sources =
           column.circuit().elements(VoltageSource.class).stream()
@@ -43,7 +43,7 @@ final class LadderBuilder {
               .toList();
       String name = sources.stream().map(VoltageSource::name).collect(Collectors.joining(" "));
       return new Ladder.Feed(
-          Ladder.Source.FIXED_SOURCE, name.isEmpty() ? "source" : name, List.of(), rail);
+          Ladder.Source.FIXED_SOURCE, negative, name.isEmpty() ? "source" : name, List.of(), rail);
     }
     RippleGroup group = column.map().groups().get(first.group());
     List<String> tubes = GroupWords.rectifierTubes(group);
@@ -64,23 +64,21 @@ final class LadderBuilder {
     lines.add(group.arrangement());
     return new Ladder.Feed(
         tubes.isEmpty() ? Ladder.Source.DIODE_RECTIFIER : Ladder.Source.TUBE_RECTIFIER,
+        negative,
         String.join(" ", GroupWords.rectifiers(group)),
         lines,
         rail);
   }
 
   private Ladder.Span span(SupplyNode supply) {
-    List<Ladder.Part> parts = supply.droppers().stream().map(this::part).toList();
+    List<Ladder.Part> parts =
+        Rung.to(supply).stream()
+            .map(
+                rung ->
+                    new Ladder.Part(
+                        rung.symbol(), rung.names(), rung.values(), rung.load(column.point())))
+            .toList();
     return new Ladder.Span(parts, stop(supply));
-  }
-
-  private Ladder.Part part(Element dropper) {
-    PartFace face = PartFace.of(dropper);
-    return new Ladder.Part(
-        face.symbol(),
-        dropper.name(),
-        face.value(),
-        PartLoad.of(dropper, column.point()).inShort());
   }
 
   private Ladder.Stop stop(SupplyNode supply) {

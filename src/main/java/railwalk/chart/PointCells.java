@@ -67,6 +67,7 @@ final class PointCells {
   List<String> remarks(Node node) {
     List<String> remarks = new ArrayList<>();
     double volts = column.point().volts(node);
+    WindingVolts.at(node, column.circuit()).ifPresent(remarks::add);
     if (Double.isNaN(volts)) {
       remarks.add("not predictable at DC");
       return remarks;

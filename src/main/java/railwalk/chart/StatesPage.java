@@ -55,7 +55,7 @@ final class StatesPage {
     List<Table.Column> columns = new ArrayList<>();
     columns.add(new Table.Column("Point", Use.WORDS));
     columns.add(new Table.Column("Electrode", Use.WORDS));
-    columns.add(new Table.Column(FIRST + " V", Use.FIGURES));
+    columns.add(new Table.Column(FIRST, Use.FIGURES));
     for (Column state : input.columns().subList(from, to)) {
       columns.add(new Table.Column(state.state(), "V", Use.KEY_FIGURES));
       columns.add(new Table.Column(state.state(), "Low–high", Use.FIGURES));

@@ -1,18 +1,13 @@
 package railwalk.chart;
 
+import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
-import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.walk.SupplyNode;
 
 /** The currents that run down a supply. */
-final class SupplyFlow {
-  private final Column column;
-
-  SupplyFlow(Column column) {
-    this.column = column;
-  }
+record SupplyFlow(Column column) {
 
   /**
    * Returns the current fed into a supply node: what leaves the rectifier at a first node (negative
@@ -29,10 +24,10 @@ final class SupplyFlow {
     if (rectified.isPresent()) {
       return rectified;
     }
-    return supply.droppers().stream()
-        .filter(dropper -> dropper.nodes().contains(node))
-        .map(dropper -> inwards(dropper, node))
-        .reduce(Double::sum);
+    List<Rung> rungs = Rung.to(supply);
+    return rungs.isEmpty()
+        ? Optional.empty()
+        : Optional.of(rungs.get(rungs.size() - 1).amps(column.point()));
   }
 
   /** Returns what of it is not passed on to further supply nodes. */
@@ -44,10 +39,5 @@ final class SupplyFlow {
             .mapToDouble(Double::doubleValue)
             .sum();
     return fed(supply).map(amps -> amps - passedOn);
-  }
-
-  private double inwards(Element dropper, Node node) {
-    double amps = column.point().amps(dropper);
-    return dropper.nodes().get(0).equals(node) ? -amps : amps;
   }
 }

@@ -96,8 +96,8 @@ final class SupplyPage {
 
   private String fedThrough(SupplyNode supply) {
     String droppers =
-        supply.droppers().stream()
-            .map(e -> (e.name() + " " + PartFace.of(e).value()).strip())
+        Rung.to(supply).stream()
+            .map(rung -> (rung.names() + " " + rung.values()).strip())
             .collect(Collectors.joining(", "));
     Node parent = supply.parent();
     if (parent == null) {

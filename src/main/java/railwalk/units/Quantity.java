@@ -50,6 +50,11 @@ public final class Quantity {
     return of(watts, "W");
   }
 
+  /** Returns a power in watts without prefix, to be held against a rating: {@code 0.123 W}. */
+  public static String wattsUnscaled(double watts) {
+    return Double.isNaN(watts) ? UNKNOWN : signed(digits(watts, 3, 3)) + " W";
+  }
+
   /** Returns a share in whole per cent: {@code 62 %}. */
   public static String percent(double share) {
     if (Double.isNaN(share)) {

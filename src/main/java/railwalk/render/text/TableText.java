@@ -10,6 +10,10 @@ import railwalk.render.type.ColumnFit;
 final class TableText {
   private static final int WRITING_COLUMNS = 8;
   private static final int LEAST_WRITING_COLUMNS = 5;
+
+  /** A word longer than this may be cut where room is short; figures never are. */
+  private static final int LONG_WORD = 8;
+
   private static final int LINES_IN_SIGHT = 22;
   private static final int REMARK_INDENT = 4;
 
@@ -56,7 +60,10 @@ final class TableText {
           natural[i] = Math.max(natural[i], whole);
           least[i] =
               Math.max(
-                  least[i], column.use() == Use.WORDS ? Sheet.BREAKER.widestWord(cell) : whole);
+                  least[i],
+                  column.use() == Use.WORDS
+                      ? Math.min(Sheet.BREAKER.widestWord(cell), LONG_WORD)
+                      : whole);
         }
       }
     }

@@ -39,6 +39,17 @@ public final class LineBreaker {
     return lines;
   }
 
+  /** Returns the first {@code most} lines; an ellipsis at the end says that there were more. */
+  public List<String> lines(String text, double width, int most) {
+    List<String> lines = lines(text, width);
+    if (lines.size() <= most) {
+      return lines;
+    }
+    List<String> shown = new ArrayList<>(lines.subList(0, most));
+    shown.set(most - 1, clipped(shown.get(most - 1) + " …", width));
+    return shown;
+  }
+
   /** Returns the width of the widest word. */
   public double widestWord(String text) {
     double widest = 0;

@@ -1,0 +1,144 @@
+package railwalk.render.type;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.ByteBuffer;
+import java.nio.charset.StandardCharsets;
+import java.util.HashMap;
+import java.util.Map;
+
+/**
+ * One weight of the typeface that charts are set in: which signs it has and how wide they run. Read
+ * from the TrueType file itself (tables head, hhea, hmtx and the format 4 part of cmap, as in
+ * ISO/IEC 14496-22).
+ */
+public final class Typeface {
+  private static final String FOLDER = "/railwalk/render/";
+
+  /** Width of the box drawn for a sign the typeface lacks, in ems. */
+  public static final double MISSING_EMS = 0.6;
+
+  private final byte[] file;
+  private final double unitsPerEm;
+  private final Map<Integer, Integer> glyphs = new HashMap<>();
+  private final int[] advances;
+
+  private Typeface(byte[] file) {
+    this.file = file;
+    ByteBuffer font = ByteBuffer.wrap(file);
+    Map<String, Integer> tables = tables(font);
+    unitsPerEm = unsigned(font, at(tables, "head") + 18);
+    int count = unsigned(font, at(tables, "hhea") + 34);
+    advances = new int[count];
+    for (int glyph = 0; glyph < count; glyph++) {
+      advances[glyph] = unsigned(font, at(tables, "hmtx") + 4 * glyph);
+    }
+    readGlyphs(font, at(tables, "cmap"));
+  }
+
+  /** Returns the weight for running text. */
+  public static Typeface regular() {
+    return load("IBMPlexSans-Regular.ttf");
+  }
+
+  /** Returns the weight for titles and key figures. */
+  public static Typeface semiBold() {
+    return load("IBMPlexSans-SemiBold.ttf");
+  }
+
+  private static Typeface load(String name) {
+    try (InputStream in = Typeface.class.getResourceAsStream(FOLDER + name)) {
+      if (in == null) {
+        throw new IllegalStateException("the font " + name + " is not in the program");
+      }
+      return new Typeface(in.readAllBytes());
+    } catch (IOException e) {
+      throw new UncheckedIOException("cannot read the font " + name, e);
+    }
+  }
+
+  /** Returns the TrueType file. */
+  public byte[] file() {
+    return file.clone();
+  }
+
+  /** Returns whether there is a sign for {@code codePoint}. */
+  public boolean has(int codePoint) {
+    return glyphs.containsKey(codePoint);
+  }
+
+  /** Returns the width of {@code text} at {@code size}, a box counted for each missing sign. */
+  public double width(String text, double size) {
+    return size * text.codePoints().mapToDouble(this::ems).sum();
+  }
+
+  private double ems(int codePoint) {
+    Integer glyph = glyphs.get(codePoint);
+    return glyph == null
+        ? MISSING_EMS
+        : advances[Math.min(glyph, advances.length - 1)] / unitsPerEm;
+  }
+
+  private static Map<String, Integer> tables(ByteBuffer font) {
+    Map<String, Integer> offsets = new HashMap<>();
+    int count = unsigned(font, 4);
+    for (int i = 0; i < count; i++) {
+      int entry = 12 + 16 * i;
+      byte[] tag = new byte[4];
+      font.get(entry, tag);
+      offsets.put(new String(tag, StandardCharsets.ISO_8859_1), font.getInt(entry + 8));
+    }
+    return offsets;
+  }
+
+  private static int at(Map<String, Integer> tables, String tag) {
+    Integer offset = tables.get(tag);
+    if (offset == null) {
+      throw new IllegalStateException("the font has no table " + tag);
+    }
+    return offset;
+  }
+
+  /** Reads the segments of the first format 4 subtable: the signs of the basic plane. */
+  private void readGlyphs(ByteBuffer font, int cmap) {
+    int count = unsigned(font, cmap + 2);
+    for (int i = 0; i < count; i++) {
+      int table = cmap + font.getInt(cmap + 4 + 8 * i + 4);
+      if (unsigned(font, table) == 4) {
+        readSegments(font, table);
+        return;
+      }
+    }
+    throw new IllegalStateException("the font has no format 4 character map");
+  }
+
+  private void readSegments(ByteBuffer font, int table) {
+    int twice = unsigned(font, table + 6);
+    int ends = table + 14;
+    int starts = ends + twice + 2;
+    int deltas = starts + twice;
+    int ranges = deltas + twice;
+    for (int i = 0; i < twice; i += 2) {
+      int delta = unsigned(font, deltas + i);
+      int range = unsigned(font, ranges + i);
+      int last = Math.min(unsigned(font, ends + i), 0xFFFE);
+      for (int code = unsigned(font, starts + i); code <= last; code++) {
+        int glyph =
+            range == 0
+                ? code
+                : unsigned(font, ranges + i + range + 2 * (code - unsigned(font, starts + i)));
+        if (range == 0 || glyph != 0) {
+          int index = glyph + delta & 0xFFFF;
+          if (index != 0) {
+            glyphs.put(code, index);
+          }
+        }
+      }
+    }
+  }
+
+  private static int unsigned(ByteBuffer font, int at) {
+    return font.getShort(at) & 0xFFFF;
+  }
+}
