@@ -48,6 +48,9 @@ public final class RippleGroups {
   /** Growth stops where a stage's ripple is this small a part of the reservoir's. */
   private static final double RIPPLE_LEFT = 0.02;
 
+  /** A smaller capacitor ends a stage when it takes at least this much of the ripple away. */
+  private static final double SMOOTHING = 0.7;
+
   /** Usual inductance of a filter choke where the netlist gives none (common practice). */
   public static final double USUAL_CHOKE_HENRIES = 5;
 
@@ -298,8 +301,9 @@ public final class RippleGroups {
       here = next.get();
       passed.add(here);
       double farads = faradsToReference(here);
-      if (farads > 0 && stageFactor(ohms, henries, farads) < 1) {
-        return Optional.of(new Stage(passed, here, stageFactor(ohms, henries, farads)));
+      double passes = stageFactor(ohms, henries, farads);
+      if (farads >= HOLDING_FARADS || passes < SMOOTHING) {
+        return Optional.of(new Stage(passed, here, passes));
       }
       Element onward = onward(here, part);
       if (onward == null) {
