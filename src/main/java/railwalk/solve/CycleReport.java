@@ -224,9 +224,11 @@ record CycleReport(
         }
         return amps;
       }
+      if (!part.nodes().contains(node)) {
+        return 0;
+      }
       double through = TwoTerminal.amps(part, net.branches, net.unknowns, x);
-      List<Node> nodes = part.nodes();
-      return nodes.get(nodes.size() - 1).equals(node) ? through : -through;
+      return part.nodes().get(0).equals(node) ? -through : through;
     }
 
     CycleReport report(
