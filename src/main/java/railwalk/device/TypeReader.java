@@ -71,15 +71,16 @@ final class TypeReader {
               laws.law(line, id, word),
               amplifies ? ratings(id) : Ratings.NONE,
               kind == SectionKind.RECTIFIER ? rectifierRatings(id) : RectifierRatings.NONE,
-              spread(0),
-              spread(1)));
+              spread(amplifies, 0),
+              spread(amplifies, 1)));
     }
     return sections;
   }
 
-  private double spread(int index) {
-    if (file.all("spread").isEmpty()) {
-      return 1;
+  /** Returns a limit of the spread; NaN for kinds that have none. */
+  private double spread(boolean amplifies, int index) {
+    if (!amplifies) {
+      return Double.NaN;
     }
     DataLine line = file.one("spread");
     line.allow(Set.of("source"));
