@@ -11,7 +11,12 @@ import picocli.CommandLine.Model.PositionalParamSpec;
 /** All commands under the program's name. */
 final class CommandTree {
   private static final List<Command> COMMANDS =
-      List.of(new TubesCommand(), new FitCommand(), new CompletionCommand());
+      List.of(
+          new ChartCommand(),
+          new CheckCommand(),
+          new TubesCommand(),
+          new FitCommand(),
+          new CompletionCommand());
 
   private CommandTree() {}
 
@@ -57,6 +62,7 @@ final class CommandTree {
         .paramLabel(label)
         .index("0")
         .arity(arity)
+        .required(!arity.startsWith("0"))
         .type(type)
         .description(description)
         .build();

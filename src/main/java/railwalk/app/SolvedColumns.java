@@ -1,0 +1,66 @@
+package railwalk.app;
+
+import java.util.ArrayList;
+import java.util.List;
+import railwalk.chart.Column;
+import railwalk.circuit.Circuit;
+import railwalk.circuit.State;
+import railwalk.findings.Finding;
+import railwalk.findings.Findings;
+import railwalk.netlist.Origins;
+import railwalk.solve.OperatingPoint;
+import railwalk.solve.OperatingPointSolver;
+import railwalk.solve.SolveOutcome;
+import railwalk.source.Diagnostic;
+import railwalk.spread.FirstOrderBands;
+import railwalk.walk.SupplyMap;
+import railwalk.walk.Walk;
+
+/** The columns of a chart: the amplifier as its netlist stands, then each of its states, solved. */
+final class SolvedColumns {
+  private SolvedColumns() {}
+
+  /** Returns all columns of {@code amplifier}; refuses where one would not settle. */
+  static List<Column> of(TracedAmplifier amplifier) throws CannotDo {
+    Circuit circuit = amplifier.circuit();
+    List<Column> columns = new ArrayList<>();
+    columns.add(column("", circuit, amplifier.origins()));
+    for (State state : circuit.states()) {
+      columns.add(column(state.name(), circuit.inState(state), amplifier.origins()));
+    }
+    return columns;
+  }
+
+  private static Column column(String state, Circuit circuit, Origins origins) throws CannotDo {
+    SupplyMap map = Walk.of(circuit);
+    OperatingPoint point = solve(state, circuit, map);
+    List<Diagnostic> findings = placed(Findings.of(circuit, map, point), origins);
+    return new Column(state, point, FirstOrderBands.of(point), findings);
+  }
+
+  /** Returns the operating point of {@code circuit}, or a refusal that names the node. */
+  static OperatingPoint solve(String state, Circuit circuit, SupplyMap map) throws CannotDo {
+    SolveOutcome outcome = OperatingPointSolver.solve(circuit, map);
+    if (outcome instanceof SolveOutcome.Solved solved) {
+      return solved.point();
+    }
+    SolveOutcome.NotSolved failure = (SolveOutcome.NotSolved) outcome;
+    String which = state.isEmpty() ? "" : " in state " + state;
+    throw new CannotDo(
+        "no operating point" + which + ": node " + failure.worstNode() + ": " + failure.reason());
+  }
+
+  /** Returns {@code findings} with the line of the part each is about. */
+  static List<Diagnostic> placed(List<Finding> findings, Origins origins) {
+    return findings.stream().map(finding -> placed(finding, origins)).toList();
+  }
+
+  private static Diagnostic placed(Finding finding, Origins origins) {
+    return new Diagnostic(
+        finding.severity(),
+        finding.code(),
+        finding.message(),
+        finding.hint(),
+        origins.of(finding.elementName()).orElse(null));
+  }
+}

@@ -1,0 +1,123 @@
+package railwalk.cli;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Model.OptionSpec;
+import picocli.CommandLine.ParseResult;
+import picocli.CommandLine.TypeConversionException;
+import railwalk.app.BenchConditions;
+import railwalk.app.CannotDo;
+import railwalk.app.ChartFormat;
+import railwalk.app.ChartJob;
+import railwalk.render.pdf.Paper;
+
+/** Prints the voltage chart of a netlist. */
+final class ChartCommand implements Command {
+  private static final List<String> PAPERS = List.of("a4", "letter");
+
+  @Override
+  public CommandSpec spec() {
+    CommandSpec spec =
+        CommandTree.named("chart", this)
+            .addPositional(
+                CommandTree.argument("NETLIST", "1", "The amplifier as traced.", Path.class))
+            .addOption(
+                OptionSpec.builder("-o", "--output")
+                    .paramLabel("FILE")
+                    .type(Path.class)
+                    .description("Write to this file.")
+                    .build())
+            .addOption(
+                OptionSpec.builder("--as")
+                    .paramLabel("FORMAT")
+                    .type(ChartFormat.class)
+                    .converters(ChartCommand::format)
+                    .completionCandidates(ChartFormat.words())
+                    .description("One format only: " + String.join(", ", ChartFormat.words()) + ".")
+                    .build())
+            .addOption(
+                OptionSpec.builder("--line")
+                    .paramLabel("VOLTS")
+                    .type(String.class)
+                    .description("Line volts in place of the netlist's.")
+                    .build())
+            .addOption(
+                OptionSpec.builder("--meter")
+                    .paramLabel("SPEC")
+                    .type(String.class)
+                    .description(
+                        "Meter in place of the netlist's: 10M, or 20k/V, or \"20k/V 50 250 500\".")
+                    .build())
+            .addOption(
+                OptionSpec.builder("--paper")
+                    .paramLabel("SIZE")
+                    .type(Paper.class)
+                    .converters(ChartCommand::paper)
+                    .completionCandidates(PAPERS)
+                    .description("a4 (used when nothing is said) or letter.")
+                    .build());
+    spec.usageMessage()
+        .description(
+            "Print the voltage chart of a netlist. Without --as it is written as NAME-chart.pdf in"
+                + " the current folder and printed as text. With --as it goes to standard output,"
+                + " or to the file that -o names; a PDF always goes to a file.");
+    return spec;
+  }
+
+  @Override
+  public int run(ParseResult given, Console console) throws CannotDo {
+    Path netlist = given.matchedPositionalValue(0, Path.of(""));
+    Optional<ChartFormat> format = Optional.ofNullable(given.matchedOptionValue("--as", null));
+    Optional<Path> output = Optional.ofNullable(given.matchedOptionValue("-o", null));
+    Paper paper = given.matchedOptionValue("--paper", Paper.A4);
+    BenchConditions conditions =
+        new BenchConditions(
+            Optional.ofNullable(given.matchedOptionValue("--line", null)),
+            Optional.ofNullable(given.matchedOptionValue("--meter", null)));
+    if (format.isEmpty() && output.isPresent()) {
+      refuseOtherSuffix(output.get());
+    }
+    ChartJob job = Progress.during(console, "solving …", () -> ChartJob.of(netlist, conditions));
+    if (output.isPresent() || format.orElse(ChartFormat.PDF) == ChartFormat.PDF) {
+      Path target = console.folder().resolve(output.orElse(Path.of(ChartJob.pdfName(netlist))));
+      job.write(target, format.orElse(ChartFormat.PDF), paper);
+      console.err().println("wrote " + target);
+    } else {
+      console.out().print(job.print(format.get()));
+    }
+    if (format.isEmpty()) {
+      console.out().print(job.print(ChartFormat.TEXT));
+    }
+    return Main.DONE;
+  }
+
+  /** A file called chart.csv with a PDF in it is never what was meant. */
+  private static void refuseOtherSuffix(Path output) throws CannotDo {
+    String name = String.valueOf(output.getFileName()).toLowerCase(Locale.ROOT);
+    String suffix = name.substring(name.lastIndexOf('.') + 1).replace("txt", "text");
+    Optional<ChartFormat> other = ChartFormat.of(suffix).filter(f -> f != ChartFormat.PDF);
+    if (other.isPresent()) {
+      throw new CannotDo(
+          "without --as the file is a PDF: for " + output + " add --as " + other.get().word());
+    }
+  }
+
+  private static ChartFormat format(String word) {
+    return ChartFormat.of(word).orElseThrow(() -> notOneOf(ChartFormat.words()));
+  }
+
+  private static Paper paper(String word) {
+    return switch (PAPERS.indexOf(word.toLowerCase(Locale.ROOT))) {
+      case 0 -> Paper.A4;
+      case 1 -> Paper.LETTER;
+      default -> throw notOneOf(PAPERS);
+    };
+  }
+
+  private static TypeConversionException notOneOf(List<String> words) {
+    return new TypeConversionException("expected one of " + String.join(", ", words));
+  }
+}
