@@ -35,6 +35,26 @@ public final class Quantity {
     return signed(digits(volts, 3, 3));
   }
 
+  /** Returns a bare number with exactly {@code decimals} places after the point: {@code −0.50}. */
+  public static String fixed(double value, int decimals) {
+    if (Double.isNaN(value)) {
+      return UNKNOWN;
+    }
+    BigDecimal rounded = new BigDecimal(value).setScale(decimals, RoundingMode.HALF_EVEN);
+    return signed((rounded.signum() == 0 ? rounded.abs() : rounded).toPlainString());
+  }
+
+  /**
+   * Returns how many places after the point three significant digits of a value need, 3 at most.
+   */
+  public static int decimals(double value) {
+    if (value == 0 || Double.isNaN(value)) {
+      return 0;
+    }
+    BigDecimal rounded = new BigDecimal(value).round(new MathContext(3, RoundingMode.HALF_EVEN));
+    return Math.max(0, Math.min(3, 2 - (rounded.precision() - rounded.scale() - 1)));
+  }
+
   /** Returns a current: {@code 1.18 mA}, {@code 38 µA}. */
   public static String amps(double amps) {
     return of(amps, "A");

@@ -15,6 +15,7 @@ import org.jgrapht.graph.WeightedMultigraph;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Diode;
 import railwalk.circuit.Element;
+import railwalk.circuit.Filament;
 import railwalk.circuit.Node;
 import railwalk.circuit.RectifierSection;
 import railwalk.circuit.VoltageSource;
@@ -41,13 +42,26 @@ final class Charge {
   List<DcStep> pathTo(Node node) {
     for (RippleGroup group : groups) {
       if (group.nodes().contains(node)) {
-        return through(group, node);
+        return through(group, node, true);
       }
     }
     for (VoltageSource source : circuit.elements(VoltageSource.class)) {
       if (Root.begins(source, grounds) && source.nodes().contains(node)) {
         Node other = source.a().equals(node) ? source.b() : source.a();
         return List.of(new DcStep(other, source, node));
+      }
+    }
+    return List.of();
+  }
+
+  /**
+   * Returns the steps through a winding, and leads without a rectifier, to a node on the
+   * alternating side of a ripple group; empty for any other node.
+   */
+  List<DcStep> alternatingPathTo(Node node) {
+    for (RippleGroup group : groups) {
+      if (group.nodes().contains(node) && !grounds.common(node)) {
+        return through(group, node, false);
       }
     }
     return List.of();
@@ -68,7 +82,7 @@ final class Charge {
     return parts;
   }
 
-  private List<DcStep> through(RippleGroup group, Node node) {
+  private List<DcStep> through(RippleGroup group, Node node, boolean rectified) {
     if (grounds.common(node)) {
       return List.of();
     }
@@ -77,7 +91,10 @@ final class Charge {
     Map<DefaultWeightedEdge, DcBranch> parts = new HashMap<>();
     group.nodes().forEach(graph::addVertex);
     for (DcBranch branch : branches) {
-      boolean lead = branch.way() != DcBranch.Way.WINDING && branch.way() != DcBranch.Way.LEAK;
+      boolean lead =
+          branch.way() == DcBranch.Way.CONDUCTOR
+              || (rectified && branch.way() == DcBranch.Way.RECTIFIER)
+              || (rectified && branch.way() == DcBranch.Way.DIODE);
       if (lead
           && inside.contains(branch.element())
           && !grounds.common(branch.a())
@@ -97,7 +114,7 @@ final class Charge {
       for (Node end : winding.nodes()) {
         GraphPath<Node, DefaultWeightedEdge> path =
             grounds.common(end) ? null : dijkstra.getPath(end, node);
-        if (path != null && path.getWeight() < bestOhms && rectifies(path, parts)) {
+        if (path != null && path.getWeight() < bestOhms && rectifies(path, parts) == rectified) {
           bestOhms = path.getWeight();
           best = new ArrayList<>(turns(winding, end));
           best.addAll(steps(path, parts));
@@ -125,7 +142,24 @@ final class Charge {
         at = branch.other(at);
       }
     }
-    return steps;
+    return withoutFilaments(steps);
+  }
+
+  /** Lets a rectifier whose filament is its cathode reach straight to the filament's pin. */
+  private static List<DcStep> withoutFilaments(List<DcStep> steps) {
+    List<DcStep> joined = new ArrayList<>();
+    for (DcStep step : steps) {
+      DcStep last = joined.isEmpty() ? null : joined.get(joined.size() - 1);
+      if (step.element() instanceof Filament filament
+          && last != null
+          && last.element() instanceof RectifierSection section
+          && section.bottle().equals(filament.bottle())) {
+        joined.set(joined.size() - 1, new DcStep(last.from(), section, step.to()));
+      } else {
+        joined.add(step);
+      }
+    }
+    return joined;
   }
 
   /** Returns the steps along a winding to {@code end} from its tap on ground, or its far end. */

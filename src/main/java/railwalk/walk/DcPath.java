@@ -13,7 +13,7 @@ import railwalk.circuit.Node;
  *     to the point, each beginning where the one before ended; for a point that hangs from ground
  *     the steps from the reference to it
  * @param back the steps from the point through tube and cathode circuit to the reference and the
- *     winding; empty for a supply node, a grid, and a point from which no current goes on
+ *     winding; empty for a supply node, a grid, and a point above the tubes
  */
 public record DcPath(Node target, @Nullable Node supply, List<DcStep> there, List<DcStep> back) {
   public DcPath {

@@ -34,6 +34,11 @@ public final class DcPaths {
   private final Charge charge;
   private final Graph<Node, DefaultWeightedEdge> flow =
       new DirectedWeightedMultigraph<>(DefaultWeightedEdge.class);
+
+  /** The same without what touches ground: no way down to a point leads through ground. */
+  private final Graph<Node, DefaultWeightedEdge> aloft =
+      new DirectedWeightedMultigraph<>(DefaultWeightedEdge.class);
+
   private final Map<DefaultWeightedEdge, DcStep> steps = new HashMap<>();
 
   private DcPaths(SupplyMap map, Circuit circuit) {
@@ -46,6 +51,7 @@ public final class DcPaths {
             circuit, branches, map.groups(), grounds, Root.of(circuit, map.groups(), grounds));
     this.charge = new Charge(circuit, map.groups(), branches, grounds);
     circuit.nodes().forEach(flow::addVertex);
+    circuit.nodes().forEach(aloft::addVertex);
     branches.stream().filter(branch -> branch.way() != DcBranch.Way.LEAK).forEach(this::addFlow);
   }
 
@@ -57,9 +63,17 @@ public final class DcPaths {
   }
 
   private void addFlow(DcBranch branch, Node from, Node to) {
-    DefaultWeightedEdge edge = flow.addEdge(from, to);
+    addFlow(flow, branch, from, to);
+    if (!grounds.common(from) && !grounds.common(to)) {
+      addFlow(aloft, branch, from, to);
+    }
+  }
+
+  private void addFlow(
+      Graph<Node, DefaultWeightedEdge> graph, DcBranch branch, Node from, Node to) {
+    DefaultWeightedEdge edge = graph.addEdge(from, to);
     double factor = branch.way() == DcBranch.Way.SCREEN ? SCREEN_FACTOR : 1;
-    flow.setEdgeWeight(edge, branch.ohms() * factor + CONTACT_OHMS);
+    graph.setEdgeWeight(edge, branch.ohms() * factor + CONTACT_OHMS);
     steps.put(edge, new DcStep(from, branch.element(), to));
   }
 
@@ -76,7 +90,11 @@ public final class DcPaths {
         }
       }
     }
-    return new DcPath(target, paths.supplyOf(target), paths.there(target), List.of());
+    List<DcStep> there = paths.there(target);
+    boolean throughTube =
+        there.stream().anyMatch(step -> step.element() instanceof AmplifierSection);
+    List<DcStep> back = throughTube ? paths.home(target, there) : List.of();
+    return new DcPath(target, paths.supplyOf(target), there, back);
   }
 
   /**
@@ -91,6 +109,15 @@ public final class DcPaths {
       throw new IllegalArgumentException(section.name() + " has no " + electrode.word());
     }
     return new DcPaths(map, circuit).toElectrode(section, electrode, target);
+  }
+
+  /** Returns the steps by which current can leave {@code node} through resistors and the like. */
+  public static List<DcStep> at(Circuit circuit, Node node) {
+    return DcBranches.of(circuit).stream()
+        .filter(branch -> branch.way() == DcBranch.Way.CONDUCTOR)
+        .filter(branch -> branch.a().equals(node) || branch.b().equals(node))
+        .map(branch -> new DcStep(node, branch.element(), branch.other(node)))
+        .toList();
   }
 
   private static @Nullable Node nodeOf(AmplifierSection section, Electrode electrode) {
@@ -135,12 +162,12 @@ public final class DcPaths {
   private List<DcStep> there(Node node) {
     Optional<SupplyNode> supply = map.supplyOf(node).flatMap(map::supplyNode);
     if (supply.isEmpty()) {
-      List<DcStep> inside = charge.pathTo(node);
-      return inside.isEmpty() ? shortest(circuit.reference(), node) : inside;
+      List<DcStep> inside = charge.alternatingPathTo(node);
+      return inside.isEmpty() ? shortest(flow, circuit.reference(), node) : inside;
     }
     List<DcStep> there = new ArrayList<>(toSupply(supply.get().node()));
     List<DcStep> drop = down(supply.get().node(), node);
-    there.addAll(drop.isEmpty() ? shortest(supply.get().node(), node) : drop);
+    there.addAll(drop.isEmpty() ? shortest(aloft, supply.get().node(), node) : drop);
     return there;
   }
 
@@ -175,23 +202,23 @@ public final class DcPaths {
   /** Returns the steps from a cathode through the reference to where {@code there} began. */
   private List<DcStep> home(Node cathode, List<DcStep> there) {
     if (there.isEmpty()) {
-      return shortest(cathode, circuit.reference());
+      return shortest(flow, cathode, circuit.reference());
     }
     Node start = there.get(0).from();
-    List<DcStep> toGround = shortest(cathode, circuit.reference());
+    List<DcStep> toGround = shortest(flow, cathode, circuit.reference());
     if (toGround.isEmpty() && !grounds.nodes().contains(cathode)) {
-      return shortest(cathode, start);
+      return shortest(flow, cathode, start);
     }
     List<DcStep> home = new ArrayList<>(toGround);
-    home.addAll(shortest(circuit.reference(), start));
+    home.addAll(shortest(flow, circuit.reference(), start));
     return home;
   }
 
-  private List<DcStep> shortest(Node from, Node to) {
+  private List<DcStep> shortest(Graph<Node, DefaultWeightedEdge> graph, Node from, Node to) {
     if (from.equals(to)) {
       return List.of();
     }
-    GraphPath<Node, DefaultWeightedEdge> path = new DijkstraShortestPath<>(flow).getPath(from, to);
+    GraphPath<Node, DefaultWeightedEdge> path = new DijkstraShortestPath<>(graph).getPath(from, to);
     if (path == null) {
       return List.of();
     }

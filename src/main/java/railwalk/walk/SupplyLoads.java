@@ -1,6 +1,7 @@
 package railwalk.walk;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -8,6 +9,7 @@ import java.util.Map;
 import java.util.Set;
 import java.util.stream.Collectors;
 import railwalk.circuit.Circuit;
+import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 
 /** Tells what draws current from a supply node. */
@@ -15,11 +17,13 @@ public final class SupplyLoads {
   private final Ladder ladder;
   private final Electrodes electrodes;
   private final Set<Node> supplies;
+  private final Set<Element> feeders = new HashSet<>();
 
-  private SupplyLoads(Ladder ladder, Electrodes electrodes, Set<Node> supplies) {
-    this.ladder = ladder;
-    this.electrodes = electrodes;
-    this.supplies = supplies;
+  private SupplyLoads(SupplyMap map, Circuit circuit) {
+    this.ladder = Ladder.of(circuit, map.groups());
+    this.electrodes = Electrodes.of(circuit);
+    this.supplies = map.supplyNodes().stream().map(SupplyNode::node).collect(Collectors.toSet());
+    map.groups().forEach(group -> feeders.addAll(group.feeders()));
   }
 
   /**
@@ -27,11 +31,7 @@ public final class SupplyLoads {
    * away from it, in netlist order. What feeds the node, and the parts of a rectifier, are none.
    */
   public static List<SupplyLoad> of(SupplyMap map, Circuit circuit, Node supplyNode) {
-    Set<Node> supplies =
-        map.supplyNodes().stream().map(SupplyNode::node).collect(Collectors.toSet());
-    SupplyLoads loads =
-        new SupplyLoads(Ladder.of(circuit, map.groups()), Electrodes.of(circuit), supplies);
-    return loads.at(supplyNode);
+    return new SupplyLoads(map, circuit).at(supplyNode);
   }
 
   private List<SupplyLoad> at(Node node) {
@@ -42,7 +42,7 @@ public final class SupplyLoads {
     Map<Node, List<DcStep>> byFarEnd = new LinkedHashMap<>();
     List<DcBranch> feeds = ladder.feedsSideBySide(node);
     for (DcBranch branch : ladder.conductorsAt(node)) {
-      if (!feeds.contains(branch)) {
+      if (!feeds.contains(branch) && !feeders.contains(branch.element())) {
         Node far = branch.other(node);
         byFarEnd
             .computeIfAbsent(far, key -> new ArrayList<>())
