@@ -43,7 +43,7 @@ final class WalkLines {
   /** Returns the words of a text, each unit together with its figure. */
   private static List<String> glued(String text) {
     List<String> words = new ArrayList<>();
-    for (String word : text.split(" ")) {
+    for (String word : text.split(" ", -1)) {
       String bare = word.replaceAll("[,.;:)]+$", "");
       if (UNITS.contains(bare) && !words.isEmpty()) {
         words.set(words.size() - 1, words.get(words.size() - 1) + " " + word);

@@ -113,7 +113,7 @@ class WalkTextTest {
       return false;
     }
     BigDecimal total = BigDecimal.ZERO;
-    for (String share : shares.group(2).split(", ")) {
+    for (String share : shares.group(2).split(", ", -1)) {
       total = total.add(number(share.substring(share.lastIndexOf(' ') + 1)));
     }
     assertThat(total).as(line).isEqualByComparingTo(number(shares.group(1)));
