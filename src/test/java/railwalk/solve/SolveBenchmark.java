@@ -1,12 +1,16 @@
 package railwalk.solve;
 
+import java.io.IOException;
 import java.lang.management.ManagementFactory;
 import java.lang.management.ThreadMXBean;
+import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.List;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Element;
 import railwalk.circuit.Resistor;
+import railwalk.device.Catalogue;
+import railwalk.netlist.NetlistReader;
 import railwalk.walk.SupplyMap;
 import railwalk.walk.Walk;
 
@@ -24,8 +28,11 @@ public final class SolveBenchmark {
     void run();
   }
 
-  public static void main(String[] args) {
-    Circuit circuit = SampleAmps.fixedBias(1).build();
+  public static void main(String[] args) throws IOException {
+    Circuit circuit =
+        NetlistReader.read(Path.of("test-netlists/amps/millrace.cir"), Catalogue.standard())
+            .circuit()
+            .orElseThrow();
     SupplyMap map = Walk.of(circuit);
     Circuit changed = fivePercentOff(circuit);
     CoupledSolver solver = new CoupledSolver(circuit, map, false);
