@@ -15,6 +15,7 @@ import railwalk.circuit.Winding;
 import railwalk.source.Diagnostic;
 import railwalk.units.Quantity;
 import railwalk.walk.RippleGroup;
+import railwalk.walk.SupplyNode;
 
 /** The cautions that go with a chart: some always, some where the circuit asks for them. */
 final class Cautions {
@@ -92,9 +93,10 @@ final class Cautions {
 
   private String highVolts() {
     Optional<Node> highest =
-        circuit.nodes().stream()
+        Stream.concat(
+                first.map().supplyNodes().stream().map(SupplyNode::node), circuit.nodes().stream())
             .filter(n -> !Double.isNaN(first.point().volts(n)))
-            .max(Comparator.comparingDouble(n -> Math.abs(first.point().volts(n))));
+            .max(Comparator.comparingLong(n -> Math.round(Math.abs(first.point().volts(n)))));
     String here =
         highest
             .map(

@@ -2,6 +2,7 @@ package railwalk.chart;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import railwalk.circuit.Circuit;
@@ -56,26 +57,21 @@ final class ConditionsPage {
     entries.add(plain(wording.say("{Line}"), lineText(circuit.line())));
     entries.add(plain("Meter", meterText(circuit.meter())));
     entries.add(new KeyFigures.Entry("Black lead on", circuit.reference().name(), true));
-    entries.add(
-        plain(
-            "Reference",
-            "all volts are DC against "
-                + circuit.reference().name()
-                + (chassisApart()
-                    ? ", which is not the chassis: clip the black lead there, not to metal"
-                    : "")));
-    entries.add(plain("Signal", "none; load connected to the output"));
-    for (Potentiometer control : circuit.elements(Potentiometer.class)) {
-      entries.add(plain(control.name(), controlText(control)));
+    if (chassisApart()) {
+      entries.add(
+          plain("Chassis", "is not the reference: clip the black lead to the node named above"));
     }
+    entries.add(plain("Signal", "none; all volts are DC; load connected to the output"));
+    controls().ifPresent(entries::add);
     for (Switch contact : circuit.elements(Switch.class)) {
-      entries.add(plain(contact.name(), "switch " + SwitchWords.joined(contact)));
+      entries.add(plain("Switch", contact.name() + " " + SwitchWords.joined(contact)));
     }
     entries.add(plain(wording.say("{Tubes} in"), tubesIn()));
     entries.add(plain("Low–high", bandText(circuit.spread())));
     entries.add(findings());
     for (State state : statesShown()) {
-      entries.add(plain("State " + state.name(), new StateWords(circuit, wording).changes(state)));
+      entries.add(
+          plain("State", state.name() + ": " + new StateWords(circuit, wording).changes(state)));
     }
     return entries;
   }
@@ -130,15 +126,33 @@ final class ConditionsPage {
     return meterShort(meter) + "; ranges " + ranges + " V, each point on the lowest that holds it";
   }
 
+  private Optional<KeyFigures.Entry> controls() {
+    List<Potentiometer> controls = circuit.elements(Potentiometer.class);
+    if (controls.isEmpty()) {
+      return Optional.empty();
+    }
+    return Optional.of(
+        plain(
+            "Controls",
+            controls.stream()
+                .map(ConditionsPage::controlText)
+                .collect(
+                    Collectors.joining(
+                        ", ",
+                        "",
+                        " (0 % has the wiper at the first end named, 100 % at the last)"))));
+  }
+
   private static String controlText(Potentiometer control) {
-    return Quantity.ohms(control.ohms())
+    return control.name()
+        + " "
+        + Quantity.ohms(control.ohms())
         + " at "
         + Quantity.percent(control.share())
-        + " (0 % has the wiper at "
+        + " from "
         + control.b().name()
-        + ", 100 % at "
-        + control.a().name()
-        + ")";
+        + " to "
+        + control.a().name();
   }
 
   private String tubesIn() {

@@ -21,6 +21,8 @@ final class DropsTable {
   /** Parts of no particular role are listed from this heat on. */
   private static final double NOTABLE_WATTS = 0.005;
 
+  private static final double NOTABLE_AMPS = 1e-7;
+
   private final Column column;
   private final Circuit circuit;
   private final Wording wording;
@@ -32,7 +34,12 @@ final class DropsTable {
     this.circuit = column.circuit();
     this.wording = wording;
     column.map().supplyNodes().forEach(s -> droppers.addAll(s.droppers()));
-    column.map().groups().forEach(g -> beforeTheReservoir.addAll(g.elements()));
+    Set<Node> steady = new HashSet<>(Set.of(circuit.reference()));
+    column.map().supplyNodes().forEach(s -> steady.add(s.node()));
+    column.map().groups().stream()
+        .flatMap(g -> g.elements().stream())
+        .filter(e -> !steady.containsAll(e.nodes()))
+        .forEach(beforeTheReservoir::add);
     beforeTheReservoir.removeAll(droppers);
   }
 
@@ -93,6 +100,9 @@ final class DropsTable {
     }
     if (droppers.contains(element)) {
       return Role.DROPPER;
+    }
+    if (load.amps() < NOTABLE_AMPS) {
+      return Role.NONE;
     }
     boolean winding = element instanceof Inductor;
     for (AmplifierSection section : circuit.elements(AmplifierSection.class)) {

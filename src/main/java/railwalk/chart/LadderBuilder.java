@@ -8,13 +8,14 @@ import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import railwalk.circuit.Node;
 import railwalk.circuit.VoltageSource;
-import railwalk.circuit.Winding;
 import railwalk.units.Quantity;
-import railwalk.walk.RippleGroup;
 import railwalk.walk.SupplyNode;
 
 /** Lays the supply trees out as a {@link Ladder}. */
 final class LadderBuilder {
+  /** Below this a node is but a place where the rail passes through. */
+  private static final double NOTABLE_AMPS = 1e-6;
+
   private final Column column;
   private final PointCells cells;
   private final SupplyFlow flow;
@@ -45,27 +46,18 @@ final class LadderBuilder {
       return new Ladder.Feed(
           Ladder.Source.FIXED_SOURCE, negative, name.isEmpty() ? "source" : name, List.of(), rail);
     }
-    RippleGroup group = column.map().groups().get(first.group());
-    List<String> tubes = GroupWords.rectifierTubes(group);
+    RectifierFeed rectifier =
+        RectifierFeed.of(column.circuit(), column.map().groups().get(first.group()), first.node());
     List<String> lines = new ArrayList<>();
-    if (!tubes.isEmpty()) {
-      lines.add(
-          tubes.stream()
-              .flatMap(name -> column.circuit().bottle(name).stream())
-              .map(bottle -> bottle.type().name())
-              .distinct()
-              .collect(Collectors.joining(" ")));
+    if (!rectifier.types().isEmpty()) {
+      lines.add(rectifier.types());
     }
-    lines.addAll(
-        group.elements().stream()
-            .filter(Winding.class::isInstance)
-            .map(w -> GroupWords.windingVolts((Winding) w, column.circuit().line()))
-            .toList());
-    lines.add(group.arrangement());
+    lines.addAll(rectifier.windingVolts());
+    lines.add(rectifier.arrangement());
     return new Ladder.Feed(
-        tubes.isEmpty() ? Ladder.Source.DIODE_RECTIFIER : Ladder.Source.TUBE_RECTIFIER,
+        rectifier.tubes().isEmpty() ? Ladder.Source.DIODE_RECTIFIER : Ladder.Source.TUBE_RECTIFIER,
         negative,
-        String.join(" ", GroupWords.rectifiers(group)),
+        rectifier.names(),
         lines,
         rail);
   }
@@ -91,8 +83,11 @@ final class LadderBuilder {
             .toList();
     List<String> lines =
         Stream.of(
-                cells.band(node).isEmpty() ? "" : cells.band(node) + " V",
-                flow.usedHere(supply).map(amps -> Quantity.amps(amps) + " used here").orElse(""),
+                cells.band(node).isEmpty() ? "" : cells.band(node).replace("\u200B", "") + " V",
+                flow.usedHere(supply)
+                    .filter(amps -> Math.abs(amps) > NOTABLE_AMPS)
+                    .map(amps -> Quantity.amps(amps) + " used here")
+                    .orElse(""),
                 column
                     .point()
                     .rippleVoltsRms(node)

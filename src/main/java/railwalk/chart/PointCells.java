@@ -28,7 +28,10 @@ final class PointCells {
     return Quantity.plainVolts(column.point().volts(node));
   }
 
-  /** Returns the band, without unit: "297–328", "−52.1 to −46.3"; empty when there is none. */
+  /**
+   * Returns the band, without unit: "297–328", "−52.1 to −46.3"; empty when there is none. A
+   * zero-width space marks where it may be broken.
+   */
   String band(Node node) {
     Figures.Point point = byNode.get(node.name());
     if (point == null || Double.isNaN(point.lowVolts())) {
@@ -40,7 +43,7 @@ final class PointCells {
       return low;
     }
     boolean negative = point.lowVolts() < 0 || point.highVolts() < 0;
-    return low + (negative ? " to " : "–") + high;
+    return low + (negative ? " to \u200B" : "–") + high;
   }
 
   /** Returns what the meter reads where it differs by more than one per cent; else empty. */

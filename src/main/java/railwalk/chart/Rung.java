@@ -16,6 +16,9 @@ import railwalk.walk.SupplyNode;
  * One step of the way down a supply: a dropper, or several side by side, from one node to the next.
  */
 record Rung(List<Element> parts, Node from, Node to) {
+  /** Below this a part is a contact, not a resistance. */
+  private static final double NOTABLE_WATTS = 1e-6;
+
   Rung {
     parts = List.copyOf(parts);
   }
@@ -102,6 +105,6 @@ record Rung(List<Element> parts, Node from, Node to) {
     double watts =
         parts.stream().mapToDouble(part -> PartLoad.of(part, from, to, point).watts()).sum();
     String current = Quantity.amps(Math.abs(amps(point)));
-    return watts == 0 ? current : current + " · " + Quantity.watts(watts);
+    return watts < NOTABLE_WATTS ? current : current + " · " + Quantity.watts(watts);
   }
 }

@@ -17,7 +17,6 @@ import railwalk.device.SectionKind;
 import railwalk.device.SectionType;
 import railwalk.solve.SupplyPoint;
 import railwalk.units.Quantity;
-import railwalk.walk.RippleGroup;
 import railwalk.walk.SupplyNode;
 
 /** The supply: its drawing, its nodes from the rectifier down, the rectifiers, the windings. */
@@ -104,7 +103,8 @@ final class SupplyPage {
       String from =
           supply.group() < 0
               ? "fixed source"
-              : String.join(" ", GroupWords.rectifiers(column.map().groups().get(supply.group())));
+              : RectifierFeed.of(circuit, column.map().groups().get(supply.group()), supply.node())
+                  .names();
       return droppers.isEmpty() ? from : from + ", " + droppers;
     }
     return droppers.isEmpty() ? parent.name() : droppers + " from " + parent.name();
@@ -152,24 +152,17 @@ final class SupplyPage {
   }
 
   private Table.Row row(SupplyPoint supply) {
-    Optional<RippleGroup> group =
-        column.map().groups().stream().filter(g -> g.outputs().contains(supply.node())).findFirst();
-    List<Bottle> tubes =
-        group.stream()
-            .flatMap(g -> GroupWords.rectifierTubes(g).stream())
-            .flatMap(name -> circuit.bottle(name).stream())
-            .toList();
-    String names =
-        group.map(g -> String.join(" ", GroupWords.rectifiers(g))).orElse("")
-            + tubes.stream()
-                .map(t -> " " + t.type().name())
-                .distinct()
-                .collect(Collectors.joining());
+    Optional<RectifierFeed> feed =
+        column.map().groups().stream()
+            .filter(g -> g.outputs().contains(supply.node()))
+            .map(g -> RectifierFeed.of(circuit, g, supply.node()))
+            .findFirst();
+    List<Bottle> tubes = feed.map(RectifierFeed::tubes).orElse(List.of());
     return new Table.Row(
         List.of(
             supply.node().name(),
-            names,
-            group.map(RippleGroup::arrangement).orElse(""),
+            feed.map(f -> (f.names() + " " + f.types()).strip()).orElse(""),
+            feed.map(RectifierFeed::arrangement).orElse(""),
             Quantity.amps(supply.dcAmps()),
             Quantity.amps(supply.peakAmps()),
             Quantity.of(supply.rippleVoltsRms(), "V")),

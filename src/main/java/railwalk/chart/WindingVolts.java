@@ -37,7 +37,7 @@ final class WindingVolts {
   }
 
   /** Returns the volts rms between two ends or taps. */
-  private static double between(Winding winding, int a, int b, Circuit circuit) {
+  static double between(Winding winding, int a, int b, Circuit circuit) {
     double written =
         winding.sections().subList(Math.min(a, b), Math.max(a, b)).stream()
             .mapToDouble(Winding.Section::openRmsVolts)

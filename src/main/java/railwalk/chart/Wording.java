@@ -3,16 +3,8 @@ package railwalk.chart;
 import railwalk.circuit.Words;
 import railwalk.device.Electrode;
 
-/**
- * The two vocabularies of the trade. Sentences are written with the words that differ in braces,
- * {@code "the {plate} of each {tube}"}, and come out in the vocabulary asked for.
- */
-final class Wording {
-  private final Words words;
-
-  Wording(Words words) {
-    this.words = words;
-  }
+/** The chart's wording in one of the trade's two vocabularies. */
+record Wording(Words words) {
 
   /** Returns {@code sentence} with the words in braces said in this vocabulary. */
   String say(String sentence) {
@@ -23,8 +15,8 @@ final class Wording {
   String electrode(Electrode electrode) {
     return switch (electrode) {
       case PLATE -> say("{plate}");
-      case PLATE1 -> say("{plate}") + " 1";
-      case PLATE2 -> say("{plate}") + " 2";
+      case PLATE1 -> say("{plate} 1");
+      case PLATE2 -> say("{plate} 2");
       case DIODE1 -> "diode 1";
       case DIODE2 -> "diode 2";
       case HEATER1, HEATER2 -> "heater";

@@ -21,13 +21,8 @@ final class Arrangement {
   private Arrangement() {}
 
   /** Returns the arrangement of the parts that feed {@code outputs}, one phrase for each output. */
-  static String of(Circuit circuit, List<Element> alternating, List<Node> outputs) {
-    String text =
-        outputs.stream()
-            .map(n -> name(circuit, alternating, n))
-            .distinct()
-            .collect(Collectors.joining(" and "));
-    return text.isEmpty() ? "rectifier" : text;
+  static List<String> of(Circuit circuit, List<Element> alternating, List<Node> outputs) {
+    return outputs.stream().map(n -> name(circuit, alternating, n)).toList();
   }
 
   private record Path(Node anode, Node cathode) {}

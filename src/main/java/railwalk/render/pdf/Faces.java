@@ -19,8 +19,13 @@ record Faces(Typeface regular, Typeface bold) {
     return of(face).width(text, size);
   }
 
-  /** Returns a breaker that measures in points. */
+  /** Returns a breaker of words that measures in points. */
   LineBreaker breaker(Ink.Face face, double size) {
-    return new LineBreaker(text -> width(text, face, size));
+    return LineBreaker.ofWords(text -> width(text, face, size));
+  }
+
+  /** Returns a breaker of figures that measures in points. */
+  LineBreaker figureBreaker(Ink.Face face, double size) {
+    return LineBreaker.ofFigures(text -> width(text, face, size));
   }
 }

@@ -6,7 +6,6 @@ import railwalk.chart.Block;
 import railwalk.chart.Chart;
 import railwalk.chart.Heading;
 import railwalk.chart.Page;
-import railwalk.render.type.LineBreaker;
 
 /** A chart as a PDF for paper. The same chart gives the same bytes. Stateless. */
 public final class PdfRenderer {
@@ -104,9 +103,7 @@ public final class PdfRenderer {
   }
 
   private static Slice titleBlock(Chart chart, Faces faces, double width) {
-    List<String> titles =
-        new LineBreaker(text -> faces.width(text, Ink.Face.BOLD, Style.TITLE))
-            .lines(chart.title(), width);
+    List<String> titles = faces.breaker(Ink.Face.BOLD, Style.TITLE).lines(chart.title(), width);
     List<String> shown = titles.subList(0, Math.min(4, titles.size()));
     double leading = Style.TITLE * 1.15;
     double height = shown.size() * leading + 34;

@@ -58,29 +58,32 @@ record TableColumns(double[] lefts, double[] widths) {
     return use == Use.KEY_FIGURES ? Ink.Face.BOLD : Ink.Face.REGULAR;
   }
 
+  /** Returns what breaks the cells of a column. */
+  static LineBreaker breaker(Use use, Faces faces) {
+    return use == Use.WORDS ? faces.breaker(face(use), CELL) : faces.figureBreaker(face(use), CELL);
+  }
+
   private static void measure(Table table, int i, Faces faces, double[] natural, double[] least) {
     Table.Column column = table.columns().get(i);
     LineBreaker head = faces.breaker(Ink.Face.BOLD, Style.HEAD);
     natural[i] =
         Math.max(
-            head.widestWord(column.head()),
+            head.widestPiece(column.head()),
             Math.min(faces.width(column.head(), Ink.Face.BOLD, Style.HEAD), WIDEST_HEAD));
-    least[i] = head.widestWord(column.head());
+    least[i] = head.widestPiece(column.head());
     if (column.use() == Use.WRITING) {
       natural[i] = Math.max(natural[i], WRITING);
       least[i] = Math.max(least[i], LEAST_WRITING);
       return;
     }
-    LineBreaker cells = faces.breaker(face(column.use()), CELL);
+    LineBreaker cells = breaker(column.use(), faces);
     for (Table.Group group : table.groups()) {
       for (Table.Row row : group.rows()) {
         String cell = row.cells().get(i);
-        double whole = faces.width(cell, face(column.use()), CELL);
-        natural[i] = Math.max(natural[i], whole);
+        natural[i] = Math.max(natural[i], cells.width(cell));
+        double piece = cells.widestPiece(cell);
         least[i] =
-            Math.max(
-                least[i],
-                column.use() == Use.WORDS ? Math.min(cells.widestWord(cell), LONG_WORD) : whole);
+            Math.max(least[i], column.use() == Use.WORDS ? Math.min(piece, LONG_WORD) : piece);
       }
     }
   }

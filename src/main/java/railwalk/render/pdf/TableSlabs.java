@@ -168,8 +168,7 @@ final class TableSlabs {
     List<List<String>> cells = new ArrayList<>();
     for (int i = 0; i < table.columns().size(); i++) {
       cells.add(
-          faces
-              .breaker(TableColumns.face(table.columns().get(i).use()), TableColumns.CELL)
+          TableColumns.breaker(table.columns().get(i).use(), faces)
               .lines(row.cells().get(i), columns.widths()[i], MOST_LINES));
     }
     int lines = cells.stream().mapToInt(List::size).max().orElse(1);

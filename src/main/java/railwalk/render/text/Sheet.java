@@ -6,7 +6,7 @@ import railwalk.render.type.LineBreaker;
 final class Sheet {
   static final int COLUMNS = 80;
 
-  static final LineBreaker BREAKER = new LineBreaker(TextWidth::of);
+  static final LineBreaker BREAKER = LineBreaker.ofWords(TextWidth::of);
 
   private final StringBuilder out = new StringBuilder();
   private int lines;

@@ -5,6 +5,7 @@ import java.util.List;
 import railwalk.chart.Table;
 import railwalk.chart.Table.Use;
 import railwalk.render.type.ColumnFit;
+import railwalk.render.type.LineBreaker;
 
 /** One table as aligned columns. The head comes again where it has scrolled out of sight. */
 final class TableText {
@@ -15,6 +16,7 @@ final class TableText {
   private static final int LONG_WORD = 8;
 
   private static final int LINES_IN_SIGHT = 22;
+  private static final LineBreaker FIGURES = LineBreaker.ofFigures(TextWidth::of);
   private static final int REMARK_INDENT = 4;
 
   private final Sheet sheet;
@@ -46,7 +48,7 @@ final class TableText {
   private void measure(double[] natural, double[] least) {
     for (int i = 0; i < count; i++) {
       Table.Column column = table.columns().get(i);
-      double head = Sheet.BREAKER.widestWord(column.head());
+      double head = Sheet.BREAKER.widestPiece(column.head());
       natural[i] = head;
       least[i] = head;
       if (column.use() == Use.WRITING) {
@@ -56,17 +58,18 @@ final class TableText {
       for (Table.Group group : table.groups()) {
         for (Table.Row row : group.rows()) {
           String cell = Sheet.clean(row.cells().get(i));
-          double whole = TextWidth.of(cell);
-          natural[i] = Math.max(natural[i], whole);
+          LineBreaker breaker = breaker(column.use());
+          natural[i] = Math.max(natural[i], breaker.width(cell));
+          double piece = breaker.widestPiece(cell);
           least[i] =
-              Math.max(
-                  least[i],
-                  column.use() == Use.WORDS
-                      ? Math.min(Sheet.BREAKER.widestWord(cell), LONG_WORD)
-                      : whole);
+              Math.max(least[i], column.use() == Use.WORDS ? Math.min(piece, LONG_WORD) : piece);
         }
       }
     }
+  }
+
+  private static LineBreaker breaker(Use use) {
+    return use == Use.WORDS ? Sheet.BREAKER : FIGURES;
   }
 
   void print() {
@@ -143,7 +146,8 @@ final class TableText {
       cells.add(
           table.columns().get(i).use() == Use.WRITING
               ? List.of("_".repeat(widths[i]))
-              : Sheet.BREAKER.lines(Sheet.clean(row.cells().get(i)), widths[i]));
+              : breaker(table.columns().get(i).use())
+                  .lines(Sheet.clean(row.cells().get(i)), widths[i]));
     }
     lines(cells);
     if (!row.remark().isEmpty()) {

@@ -3,28 +3,52 @@ package railwalk.render.type;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
+import java.util.regex.Pattern;
 
 /**
- * Breaks text into lines at blanks, and inside a word only where the word alone is wider than a
- * line. A no-break space (U+00A0) is no place to break.
+ * Breaks text into lines: words at blanks, except between a figure and its unit; figures only where
+ * a zero-width space (U+200B) allows it; inside a piece only where the piece alone is wider than a
+ * line. Lines come back with no-break spaces (U+00A0) where no break was allowed.
  */
 public final class LineBreaker {
+  /** The blank between a figure and its unit: they stay together. */
+  private static final Pattern BEFORE_A_UNIT =
+      Pattern.compile("(?<=[0-9]) (?=(?:[pnµmkMG]?(?:V|A|W|Ω|F|H|Hz)|%)(?!\\p{L}))");
+
+  private static final String NO_BREAK_SPACE = "\u00A0";
+  private static final String ZERO_WIDTH_SPACE = "\u200B";
+
   private final ToDoubleFunction<String> widthOf;
+  private final String breakAt;
+  private final String joinWith;
+
+  private LineBreaker(ToDoubleFunction<String> widthOf, String breakAt, String joinWith) {
+    this.widthOf = widthOf;
+    this.breakAt = breakAt;
+    this.joinWith = joinWith;
+  }
 
   /**
+   * Returns a breaker of words.
+   *
    * @param widthOf width of a piece of text, in the unit that lines are measured in
    */
-  public LineBreaker(ToDoubleFunction<String> widthOf) {
-    this.widthOf = widthOf;
+  public static LineBreaker ofWords(ToDoubleFunction<String> widthOf) {
+    return new LineBreaker(widthOf, " ", " ");
+  }
+
+  /** Returns a breaker of figures, which stay in one piece but at a zero-width space. */
+  public static LineBreaker ofFigures(ToDoubleFunction<String> widthOf) {
+    return new LineBreaker(widthOf, ZERO_WIDTH_SPACE, "");
   }
 
   /** Returns the lines, at least one; none is wider than {@code width} unless a single sign is. */
   public List<String> lines(String text, double width) {
     List<String> lines = new ArrayList<>();
     StringBuilder line = new StringBuilder();
-    for (String word : text.split(" ", -1)) {
-      if (!line.isEmpty() && widthOf.applyAsDouble(line + " " + word) <= width) {
-        line.append(' ').append(word);
+    for (String word : pieces(text)) {
+      if (!line.isEmpty() && widthOf.applyAsDouble(line + joinWith + word) <= width) {
+        line.append(joinWith).append(word);
         continue;
       }
       if (!line.isEmpty()) {
@@ -39,6 +63,11 @@ public final class LineBreaker {
     return lines;
   }
 
+  /** Returns the width of the text in one line. */
+  public double width(String text) {
+    return widthOf.applyAsDouble(String.join(joinWith, pieces(text)));
+  }
+
   /** Returns the first {@code most} lines; an ellipsis at the end says that there were more. */
   public List<String> lines(String text, double width, int most) {
     List<String> lines = lines(text, width);
@@ -50,10 +79,10 @@ public final class LineBreaker {
     return shown;
   }
 
-  /** Returns the width of the widest word. */
-  public double widestWord(String text) {
+  /** Returns the width of the widest piece between two places to break. */
+  public double widestPiece(String text) {
     double widest = 0;
-    for (String word : text.split(" ", -1)) {
+    for (String word : pieces(text)) {
       widest = Math.max(widest, widthOf.applyAsDouble(word));
     }
     return widest;
@@ -69,6 +98,10 @@ public final class LineBreaker {
       end = text.offsetByCodePoints(end, -1);
     }
     return text.substring(0, end) + "…";
+  }
+
+  private String[] pieces(String text) {
+    return BEFORE_A_UNIT.matcher(text).replaceAll(NO_BREAK_SPACE).split(breakAt, -1);
   }
 
   /** Adds full lines of a word too wide for one, and returns what is left of it. */

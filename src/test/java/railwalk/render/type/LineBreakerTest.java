@@ -5,7 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import org.junit.jupiter.api.Test;
 
 class LineBreakerTest {
-  private static final LineBreaker BREAKER = new LineBreaker(String::length);
+  private static final LineBreaker BREAKER = LineBreaker.ofWords(String::length);
 
   @Test
   void breaksAtBlanks() {
@@ -20,6 +20,23 @@ class LineBreakerTest {
   @Test
   void keepsNoBreakSpacesTogether() {
     assertThat(BREAKER.lines("about 12\u00A0V", 8)).containsExactly("about", "12\u00A0V");
+  }
+
+  @Test
+  void keepsAFigureWithItsUnit() {
+    assertThat(BREAKER.lines("at 4.7 kΩ, so 5 Volts", 9))
+        .containsExactly("at", "4.7\u00A0kΩ,", "so 5", "Volts");
+    assertThat(BREAKER.lines("share 60 %", 9)).containsExactly("share", "60\u00A0%");
+  }
+
+  @Test
+  void breaksFiguresOnlyWhereAllowed() {
+    LineBreaker figures = LineBreaker.ofFigures(String::length);
+    assertThat(figures.lines("−52 to \u200B−48", 20)).containsExactly("−52 to −48");
+    assertThat(figures.lines("−52 to \u200B−48", 8)).containsExactly("−52 to ", "−48");
+    assertThat(figures.widestPiece("−52 to \u200B−48")).isEqualTo(7);
+    assertThat(figures.width("−52 to \u200B−48")).isEqualTo(10);
+    assertThat(figures.lines("12.3 mA", 7)).containsExactly("12.3\u00A0mA");
   }
 
   @Test
