@@ -28,6 +28,12 @@ final class CoupledSolver {
   /** From corrections of this size on, periods are run at full accuracy. */
   private static final double NEAR_SHARE = 1e-2;
 
+  /** After a correction this small the derivatives of the last sweep serve for the next. */
+  private static final double CHORD_SHARE = 2e-3;
+
+  /** … as long as each round gains this much on the one before. */
+  private static final double CHORD_GAIN = 0.2;
+
   /** Rounds after which the slopes of the drawn currents stay, so that the end is quadratic. */
   private static final int SLOPE_ROUNDS = 4;
 
@@ -117,14 +123,16 @@ final class CoupledSolver {
     if (supplies.isEmpty()) {
       return settleDc();
     }
+    boolean chord = near && guessByNeighbour();
+    double before = Double.POSITIVE_INFINITY;
     for (int round = 0; round < MOST_ROUNDS; round++) {
       double share = near ? 1 : correctionShare(round);
       for (int g = 0; g < supplies.size(); g++) {
         Supply supply = supplies.get(g);
-        if (round < SLOPE_ROUNDS) {
+        if (!chord && round < SLOPE_ROUNDS) {
           supply.setSlopes(loadSlopes(g));
         }
-        Thevenin tangent = supply.tangent(near);
+        Thevenin tangent = supply.tangent(near, chord);
         if (tangent == null) {
           return fail(supply, "a rectifier did not settle within the period");
         }
@@ -141,9 +149,34 @@ final class CoupledSolver {
       if (near && change < SETTLED_SHARE) {
         return true;
       }
+      chord = near && change < CHORD_SHARE && change < CHORD_GAIN * before;
+      before = change;
       near |= change < NEAR_SHARE;
     }
     return fail(supplies.get(0), "the reservoir volts did not come to rest");
+  }
+
+  /**
+   * Takes the first step by the neighbour's tangents, which hold as long as only parts outside the
+   * supplies differ. Returns whether they may serve for the next sweep too.
+   */
+  private boolean guessByNeighbour() {
+    for (int g = 0; g < supplies.size(); g++) {
+      Thevenin tangent = supplies.get(g).tangentAsBefore();
+      if (tangent == null) {
+        return false;
+      }
+      dc.setSupply(g, tangent);
+    }
+    if (!settleDc()) {
+      return false;
+    }
+    double change = 0;
+    for (int g = 0; g < supplies.size(); g++) {
+      change = Math.max(change, supplies.get(g).correct(portAmps(g), portVolts(g), 1));
+    }
+    trace.add("by the neighbour's tangents: change %.3g", change);
+    return change < CHORD_SHARE;
   }
 
   /**

@@ -35,11 +35,14 @@ final class Supply {
   private final double[] drawnAmps;
   private final double[] drawnSiemens;
   private final List<CycleColumn> columns = new ArrayList<>();
-  private @Nullable Linear linear;
+  private @Nullable PeriodMap map;
+  private @Nullable Start start;
 
-  /** The tangent of the period map at the last sweep. */
-  private record Linear(
-      double[] startStates, double[] startDrawn, double[][] stateByDrawn, double[] stateByGap) {}
+  /** The derivatives of the period map, from the last sweep that carried them. */
+  private record PeriodMap(DenseLu shooting, double[][] stateByDrawn, double[][] meansByColumn) {}
+
+  /** Where the last sweep started, and how far its start is to move to close the period. */
+  private record Start(double[] states, double[] drawnAmps, double[] stateByGap) {}
 
   Supply(CycleNetwork net) {
     this.net = net;
@@ -84,7 +87,11 @@ final class Supply {
     System.arraycopy(other.states, 0, states, 0, states.length);
     System.arraycopy(other.drawnAmps, 0, drawnAmps, 0, drawnAmps.length);
     System.arraycopy(other.drawnSiemens, 0, drawnSiemens, 0, drawnSiemens.length);
+    sweep = fine;
     System.arraycopy(other.sweep.means, 0, sweep.means, 0, sweep.means.length);
+    System.arraycopy(other.sweep.endStates, 0, sweep.endStates, 0, sweep.endStates.length);
+    map = other.map;
+    start = other.start;
   }
 
   /** Returns the mean volts of a port over the last sweep. */
@@ -110,18 +117,40 @@ final class Supply {
    * Runs a period and returns the tangent seen from the ports; null when a stage did not settle.
    *
    * @param near whether the states are close to their end, so that full accuracy pays
+   * @param chord whether the derivatives of an earlier sweep will do
    */
-  @Nullable Thevenin tangent(boolean near) {
+  @Nullable Thevenin tangent(boolean near, boolean chord) {
     sweep = near ? fine : coarse;
-    if (!sweep.run(states, drawnAmps, drawnSiemens, 1, columns, null)) {
+    boolean derive = !chord || map == null;
+    List<CycleColumn> wanted = derive ? columns : List.of();
+    if (!sweep.run(states, drawnAmps, drawnSiemens, 1, wanted, null)) {
       return null;
     }
+    if (derive) {
+      map = derivatives();
+    }
+    return map == null ? null : tangentBy(map);
+  }
+
+  /** Returns the tangent at the present states without running the period: for a first guess. */
+  @Nullable Thevenin tangentAsBefore() {
+    return map == null || start == null ? null : tangentBy(map);
+  }
+
+  private Thevenin tangentBy(PeriodMap by) {
+    double[] gap = new double[states.length];
+    for (int i = 0; i < gap.length; i++) {
+      gap[i] = sweep.endStates[i] - states[i];
+    }
+    double[] stateByGap = by.shooting.solve(gap);
+    start = new Start(states.clone(), drawnAmps.clone(), stateByGap);
+    return theveninOf(stateByGap, by);
+  }
+
+  private @Nullable PeriodMap derivatives() {
     int n = states.length;
-    int ports = portUnknowns.length;
-    double[] gap = new double[n];
     double[][] shooting = new double[n][n];
     for (int i = 0; i < n; i++) {
-      gap[i] = sweep.endStates[i] - states[i];
       for (int j = 0; j < n; j++) {
         shooting[i][j] = (i == j ? 1 : 0) - sweep.endByColumn[j][i];
       }
@@ -130,31 +159,29 @@ final class Supply {
     if (lu == null) {
       return null;
     }
-    double[][] stateByDrawn = new double[ports][];
-    for (int p = 0; p < ports; p++) {
+    double[][] stateByDrawn = new double[portUnknowns.length][];
+    for (int p = 0; p < stateByDrawn.length; p++) {
       stateByDrawn[p] = lu.solve(sweep.endByColumn[n + p]);
     }
-    double[] stateByGap = lu.solve(gap);
-    linear = new Linear(states.clone(), drawnAmps.clone(), stateByDrawn, stateByGap);
-    return theveninOf(stateByGap, stateByDrawn);
+    return new PeriodMap(lu, stateByDrawn, sweep.meansByColumn);
   }
 
   /**
    * Port volts as a function of the constant part J of the drawn current are v = v0 + T · (J − J0).
    * With J = I − G·v this becomes (1 + T·G) · v = v0 − T·J0 + T·I.
    */
-  private Thevenin theveninOf(double[] stateByGap, double[][] stateByDrawn) {
+  private Thevenin theveninOf(double[] stateByGap, PeriodMap by) {
     int ports = portUnknowns.length;
     double[][] byDrawn = new double[ports][ports];
     double[] right = new double[ports];
     double[][] left = new double[ports][ports];
     for (int r = 0; r < ports; r++) {
       int unknown = portUnknowns[r];
-      right[r] = sweep.means[unknown] + meanByStates(unknown, stateByGap);
+      right[r] = sweep.means[unknown] + meanByStates(by, unknown, stateByGap);
       for (int c = 0; c < ports; c++) {
         byDrawn[r][c] =
-            sweep.meansByColumn[states.length + c][unknown]
-                + meanByStates(unknown, stateByDrawn[c]);
+            by.meansByColumn[states.length + c][unknown]
+                + meanByStates(by, unknown, by.stateByDrawn[c]);
       }
     }
     for (int r = 0; r < ports; r++) {
@@ -182,10 +209,10 @@ final class Supply {
     return new Thevenin(lu.solve(right), ohms);
   }
 
-  private double meanByStates(int unknown, double[] stateChange) {
+  private static double meanByStates(PeriodMap by, int unknown, double[] stateChange) {
     double sum = 0;
     for (int s = 0; s < stateChange.length; s++) {
-      sum += sweep.meansByColumn[s][unknown] * stateChange[s];
+      sum += by.meansByColumn[s][unknown] * stateChange[s];
     }
     return sum;
   }
@@ -197,8 +224,9 @@ final class Supply {
    * @return the greatest correction, as a share of the group's greatest volts
    */
   double correct(double[] portAmps, double[] portVolts, double share) {
-    Linear last = linear;
-    if (last == null) {
+    Start last = start;
+    PeriodMap by = map;
+    if (last == null || by == null) {
       throw new IllegalStateException("no tangent to correct by");
     }
     double greatestVolts = 1;
@@ -209,15 +237,15 @@ final class Supply {
     for (int p = 0; p < portUnknowns.length; p++) {
       int n = portUnknowns[p];
       double drawn = portAmps[p] - drawnSiemens[n] * portVolts[p];
-      double by = drawn - last.startDrawn[n];
-      drawnAmps[n] = last.startDrawn[n] + share * by;
+      double more = drawn - last.drawnAmps[n];
+      drawnAmps[n] = last.drawnAmps[n] + share * more;
       for (int s = 0; s < change.length; s++) {
-        change[s] += last.stateByDrawn[p][s] * by;
+        change[s] += by.stateByDrawn[p][s] * more;
       }
     }
     double greatest = 0;
     for (int s = 0; s < change.length; s++) {
-      states[s] = last.startStates[s] + share * change[s];
+      states[s] = last.states[s] + share * change[s];
       double scale = net.stores.get(s).isChoke() ? 1e-3 * greatestVolts : greatestVolts;
       greatest = Math.max(greatest, Math.abs(change[s]) / scale);
     }
