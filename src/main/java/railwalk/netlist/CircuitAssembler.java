@@ -33,10 +33,12 @@ final class CircuitAssembler {
         new Frame("", Map.of(), draft.globalScope(), lines.plainNames(deck.parts()), List.of());
     this.settings = new Settings(draft, top);
     for (Card card : deck.parameters()) {
+      card.words().forEach(word -> report.add(Problem.PARAMETER_SHAPE, word.span(), word.text()));
       card.options()
           .forEach(o -> draft.globalScope().define(o.key().text(), o.value(), draft.globalScope()));
     }
     settings.read(deck.settings());
+    settings.check(deck.orders().values());
     lines.read(deck.parts(), top);
     draft.tubes().fit();
     draft.runChecks();
@@ -90,7 +92,7 @@ final class CircuitAssembler {
     }
     boolean windings = draft.elements().stream().anyMatch(Winding.class::isInstance);
     if (windings && !draft.line().stated()) {
-      report.add(Problem.LINE_NOT_STATED, null);
+      report.add(Problem.LINE_NOT_STATED, null, Math.round(line().hertz()));
     }
     Origins origins =
         new Origins(

@@ -263,10 +263,7 @@ final class DeckReader {
         take(found.file(), 1);
       }
     } else if (outcome instanceof Includes.Outcome.Missing) {
-      report.add(
-          file.path() == null ? Problem.INCLUDE_NOT_HERE : Problem.INCLUDE_MISSING,
-          first.span(),
-          written);
+      report.add(Problem.INCLUDE_MISSING, first.span(), written);
     } else if (outcome instanceof Includes.Outcome.Refused) {
       report.add(Problem.INCLUDE_REFUSED, first.span(), written);
     } else if (outcome instanceof Includes.Outcome.Unreadable unreadable) {

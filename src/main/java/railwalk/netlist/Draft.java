@@ -107,11 +107,10 @@ final class Draft {
   /** Counts a line of a part; returns whether there is still room. */
   boolean nextCard(SourceSpan span) {
     cards++;
-    if (cards > MOST_PARTS) {
+    if (cards == MOST_PARTS + 1) {
       report.add(Problem.TOO_MANY_PARTS, span, MOST_PARTS);
-      return false;
     }
-    return true;
+    return cards <= MOST_PARTS;
   }
 
   /** Returns the number of the line being read: parts stand in the circuit in this order. */

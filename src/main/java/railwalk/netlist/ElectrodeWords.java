@@ -70,7 +70,7 @@ final class ElectrodeWords {
 
   /** Returns how a message names a pin. */
   static String pinName(int pin) {
-    return pin == 0 ? "the top cap" : "pin " + pin;
+    return pin == 0 ? "top cap" : "pin " + pin;
   }
 
   /** Returns the electrodes in the order of {@code words}; null when a word names none. */

@@ -67,6 +67,9 @@ final class Expansion {
     }
     for (Card line : subcircuit.cards()) {
       if (line.isDot(".param") || line.isDot(".params")) {
+        for (Word word : line.words()) {
+          draft.report().add(Problem.PARAMETER_SHAPE, word.span(), word.text());
+        }
         for (Field.Option option : line.options()) {
           scope.define(option.key().text(), option.value(), scope);
           known.add(option.key().text().toLowerCase(Locale.ROOT));

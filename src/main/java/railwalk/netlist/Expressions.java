@@ -108,10 +108,16 @@ final class Expressions {
     @Override
     public Double visitNumber(ExpressionParser.NumberContext context) {
       Token token = context.NUMBER().getSymbol();
-      if (ValueReader.read(token.getText(), Measure.NUMBER) instanceof ValueReading.Value value) {
+      ValueReading reading = ValueReader.read(token.getText(), Measure.NUMBER);
+      if (reading instanceof ValueReading.Value value) {
         return value.amount();
       }
-      throw new Unreadable(Problem.EXPRESSION_NUMBER.at(place(word, token), token.getText()));
+      String example = ((ValueReading.Refused) reading).hint();
+      throw new Unreadable(
+          Problem.EXPRESSION_NUMBER.at(
+              place(word, token),
+              token.getText(),
+              example.isEmpty() ? "" : "did you mean " + example + "?"));
     }
 
     @Override

@@ -15,6 +15,7 @@ import railwalk.source.SourceText;
  */
 public final class NetlistReader {
   private static final int LONGEST_LINE = 20_000;
+  private static final String FAR_TOO_LARGE = "a file far too large for one";
 
   private NetlistReader() {}
 
@@ -26,7 +27,7 @@ public final class NetlistReader {
   public static NetlistResult read(Path file, Catalogue catalogue) throws IOException {
     String name = String.valueOf(file.getFileName());
     if (Files.size(file) > FileBytes.LARGEST_BYTES) {
-      return refused(Problem.FILE_TOO_LARGE, name, "");
+      return refused(Problem.NOT_A_NETLIST, name, FAR_TOO_LARGE);
     }
     byte[] bytes = Files.readAllBytes(file);
     Optional<String> foreign = FileBytes.foreignKind(bytes);
@@ -40,7 +41,7 @@ public final class NetlistReader {
   /** Reads netlist text that stands alone: an include in it is noted and passed over. */
   public static NetlistResult readText(String fileName, String text, Catalogue catalogue) {
     if (text.length() > FileBytes.LARGEST_BYTES) {
-      return refused(Problem.FILE_TOO_LARGE, fileName, "");
+      return refused(Problem.NOT_A_NETLIST, fileName, FAR_TOO_LARGE);
     }
     String plain = text.startsWith("\ufeff") ? text.substring(1) : text;
     Optional<String> foreign = FileBytes.foreignKind(plain);

@@ -1,5 +1,6 @@
 package railwalk.netlist;
 
+import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
@@ -85,14 +86,14 @@ final class PartLines {
       case 'F' -> SourceParts.controlledSource(part, ControlledSource.Kind.AMPS_BY_AMPS);
       case 'G' -> SourceParts.controlledSource(part, ControlledSource.Kind.AMPS_BY_VOLTS);
       case 'H' -> SourceParts.controlledSource(part, ControlledSource.Kind.VOLTS_BY_AMPS);
-      default -> unknownPart(card);
+      default -> unknownPart(card, letter);
     }
   }
 
-  private void unknownPart(Card card) {
+  private void unknownPart(Card card, char letter) {
     Word head = card.head();
     Problem problem =
-        switch (Character.toUpperCase(head.text().charAt(0))) {
+        switch (letter) {
           case 'Q', 'J', 'M', 'Z' -> Problem.TRANSISTOR;
           case 'P', 'S', 'N' -> Problem.KEYWORD_MISSING;
           default -> Problem.UNKNOWN_PART;
@@ -165,7 +166,7 @@ final class PartLines {
     Optional<TubeType> type = draft.catalogue().find(last.text());
     boolean modelOfType = subcircuit != null && ElectrodeOrder.looksLikeTube(subcircuit);
     if (type.isPresent() && (subcircuit == null || isExactly(type.get(), last) || modelOfType)) {
-      TubeLine.byPosition(part, type.get(), last);
+      TubeByPosition.read(part, type.get(), last);
       return;
     }
     if (subcircuit != null) {
@@ -200,7 +201,7 @@ final class PartLines {
     }
     Optional<TubeType> type = draft.catalogue().find(typeWord.text());
     if (type.isPresent()) {
-      TubeLine.byKeys(new PartCard(card, frame, draft, chartName), type.get());
+      TubeByKeys.read(new PartCard(card, frame, draft, chartName), type.get());
       return;
     }
     Subcircuit subcircuit = subcircuit(typeWord);
@@ -213,7 +214,7 @@ final class PartLines {
 
   private void unknownType(Word word) {
     Set<String> names = draft.deck().subcircuits().keySet();
-    List<String> near = new java.util.ArrayList<>(draft.catalogue().near(word.text()));
+    List<String> near = new ArrayList<>(draft.catalogue().near(word.text()));
     near.addAll(NearNames.near(word.text(), names));
     draft
         .report()

@@ -13,6 +13,7 @@ import railwalk.circuit.Resistor;
 import railwalk.circuit.Wire;
 import railwalk.units.Measure;
 import railwalk.units.ValueReader;
+import railwalk.units.ValueReading;
 
 /** Reads resistors, capacitors, coils, couplings and current sources. */
 final class PassiveParts {
@@ -53,6 +54,7 @@ final class PassiveParts {
       tolerance = positiveRating(part, toleranceWord, Measure.SHARE);
     }
     rating(part, Measure.VOLTAGE);
+    secondValue(part, value, Measure.RESISTANCE);
     part.done();
     Node a = nodes.get(0);
     Node b = nodes.get(1);
@@ -80,6 +82,7 @@ final class PassiveParts {
     rating(part, Measure.SHARE, "tol", "tolerance");
     boolean safe = part.words().removeIf(PassiveParts::isSafetyMark);
     part.words().removeIf(PassiveParts::isAcrossLineMark);
+    secondValue(part, value, Measure.CAPACITANCE);
     Word leak = part.option("leak");
     double leakOhms = Double.POSITIVE_INFINITY;
     if (leak != null) {
@@ -119,6 +122,9 @@ final class PassiveParts {
         value == null || value.isUnknown()
             ? Double.NaN
             : part.readPositive(value, Measure.INDUCTANCE);
+    if (value != null) {
+      secondValue(part, value, Measure.INDUCTANCE);
+    }
     double ohms = Double.NaN;
     if (ohmsWord == null) {
       part.report().add(Problem.COIL_WITHOUT_RESISTANCE, part.span(), part.name());
@@ -190,6 +196,20 @@ final class PassiveParts {
               }
             });
     return name;
+  }
+
+  /** Refuses a second value: most often a node too many stands before the first. */
+  private static void secondValue(PartCard part, Word value, Measure measure) {
+    Word word = part.peek();
+    if (word == null) {
+      return;
+    }
+    boolean second =
+        word.isExpression() || ValueReader.read(word.text(), measure) instanceof ValueReading.Value;
+    if (second) {
+      part.report().add(Problem.TWO_VALUES, word.span(), part.name(), value.text(), word.text());
+      part.words().remove(0);
+    }
   }
 
   /** Takes the rating of that measure: by key, or the first bare word with such a unit. */

@@ -20,10 +20,6 @@ enum Problem {
       ERROR,
       "%1$s is no netlist but %2$s",
       "wanted: a plain text file, a title on line 1 and then one part on each line"),
-  FILE_TOO_LARGE(
-      ERROR,
-      "%1$s is far too large for a netlist",
-      "wanted: a plain text file, a title on line 1 and then one part on each line"),
   EMPTY_FILE(
       ERROR, "%1$s is empty", "a netlist has a title on line 1 and then one part on each line"),
   NO_PARTS(
@@ -100,7 +96,11 @@ enum Problem {
   RATING_FOR_VALUE(ERROR, "%1$s: value missing, %2$s is a rating", "%3$s is wanted first: %4$s"),
   NOT_A_VALUE(ERROR, "%1$s cannot be read as %2$s", "%3$s"),
   LETTER_FOR_DIGIT(ERROR, "%1$s has a letter where a digit should be", "did you mean %2$s?"),
-  WRONG_UNIT(ERROR, "%1$s is %2$s; here stands %3$s", "write it like %4$s"),
+  WRONG_UNIT(ERROR, "%1$s is %2$s, but %3$s is wanted here", "write it like %4$s"),
+  TWO_VALUES(
+      ERROR,
+      "%1$s has two values, %2$s and %3$s",
+      "two nodes stand before the value, ratings after"),
   OUT_OF_RANGE(ERROR, "%1$s is beyond any number", ""),
   NEGATIVE_VALUE(
       ERROR, "%1$s: %2$s cannot be negative", "to turn a part round, exchange its nodes"),
@@ -132,12 +132,13 @@ enum Problem {
   EXPRESSION_SYNTAX(ERROR, "%1$s does not fit into this expression", ""),
   EXPRESSION_BREAKS_OFF(ERROR, "the expression %1$s breaks off", ""),
   EXPRESSION_TOO_LONG(ERROR, "this expression is too long or too deep", "split it with .param"),
-  EXPRESSION_NUMBER(ERROR, "%1$s cannot be read as a number", ""),
+  EXPRESSION_NUMBER(ERROR, "%1$s cannot be read as a number", "%2$s"),
   EXPRESSION_NOT_FINITE(
       ERROR, "%1$s comes to no number", "a division by zero, or the root or logarithm of nothing?"),
   FUNCTION_UNKNOWN(ERROR, "there is no function %1$s", "%2$s"),
   FUNCTION_ARGUMENTS(ERROR, "%1$s takes %2$d values; there are %3$d", ""),
   PARAMETER_UNKNOWN(ERROR, "there is no parameter %1$s", "%2$s"),
+  PARAMETER_SHAPE(ERROR, "%1$s is no parameter with its value", ".param leak=470k"),
   PARAMETER_CIRCLE(ERROR, "parameter %1$s hangs on itself", ""),
 
   // parts
@@ -219,7 +220,7 @@ enum Problem {
   // tubes
   UNKNOWN_TYPE(ERROR, "unknown tube type or sub-circuit %1$s", "%2$s"),
   ELECTRODE_UNKNOWN(ERROR, "%1$s is neither a pin nor an electrode", "%2$s"),
-  ELECTRODE_NOT_IN_TYPE(ERROR, "a %1$s has no %2$s", ""),
+  ELECTRODE_NOT_IN_TYPE(ERROR, "the %1$s has no %2$s", ""),
   PINS_AND_ELECTRODES(ERROR, "%1$s: pins and electrodes do not mix in one line (%2$s)", ""),
   PINS_AND_POSITIONS(
       ERROR,
@@ -227,37 +228,37 @@ enum Problem {
       "use one way for all sections of a tube"),
   PINS_NOT_KNOWN(
       ERROR,
-      "no source for the pins of a %1$s is known",
+      "no source for the pins of the %1$s is known",
       "name its electrodes instead: plate= grid= cathode="),
-  NO_SUCH_PIN(ERROR, "a %1$s has no %2$s", "its pins are %3$s"),
+  NO_SUCH_PIN(ERROR, "the %1$s has no %2$s", "its pins are %3$s"),
   PIN_TWICE(ERROR, "%1$s of %2$s is wired twice", ""),
   PINS_JOINED(
       WARNING,
-      "pins %2$d and %3$d of a %1$s are %4$s, joined inside, and stand on two nodes here",
+      "pins %2$d and %3$d of the %1$s are %4$s, joined inside, and stand on two nodes here",
       "the tube makes one node of the two while it is in"),
   PINS_BY_CUSTOM(
       NOTE, "named by position, so the socket pins on the chart are bench custom: %1$s", ""),
-  SECTION_ASSUMED(NOTE, "%1$s taken as section %2$s of a %3$s", ""),
+  SECTION_ASSUMED(NOTE, "no section letter, so taken as the first section of its type: %1$s", ""),
   SECTION_NEEDED(
       ERROR,
-      "a %1$s has unlike sections (%2$s): which one is %3$s?",
+      "the %1$s has unlike sections (%2$s): which one is %3$s?",
       "end its name with the letter, or name the pins"),
   TWIN_BY_POSITION(
-      NOTE, "%1$s: six nodes taken as plate grid cathode of both sections of a %2$s", ""),
-  TUBE_NODES_MISSING(ERROR, "%1$s: a %2$s needs %3$d nodes (%4$s); there are %5$d", ""),
+      NOTE, "%1$s: six nodes taken as plate grid cathode of both sections of the %2$s", ""),
+  TUBE_NODES_MISSING(ERROR, "%1$s: the %2$s needs %3$d nodes (%4$s); there are %5$d", ""),
   PENTODE_WITH_THREE_NODES(
       ERROR,
-      "%1$s: a %2$s needs %3$d nodes (%4$s); there are %5$d",
+      "%1$s: the %2$s needs %3$d nodes (%4$s); there are %5$d",
       "for a triode connection name the plate's node twice"),
-  TOO_MANY_NODES(ERROR, "%1$s has more nodes than a %2$s has electrodes", ""),
+  TOO_MANY_NODES(ERROR, "%1$s has more nodes than the %2$s has electrodes", ""),
   HEATER_NODES_IGNORED(NOTE, "further nodes taken as the heater's and passed over: %1$s", ""),
   TRIODE_CONNECTED(
       NOTE, "%1$s: the header names no screen, so it is taken as tied to the plate", ""),
   SUPPRESSOR_TIED(NOTE, "suppressor not listed, so taken as tied to the cathode: %1$s", ""),
   ELECTRODE_OPEN(WARNING, "%1$s: nothing is wired to the %2$s%3$s", ""),
-  TIE_POINT_IN_USE(WARNING, "pin %1$d of a %2$s is no free tie point: it leads to %3$s", ""),
+  TIE_POINT_IN_USE(WARNING, "pin %1$d of the %2$s is no free tie point: it leads to %3$s", ""),
   NO_SECTION(WARNING, "%1$s does nothing: no plate or grid of the %2$s is wired", ""),
-  BOTTLE_OF_TWO_TYPES(ERROR, "%1$s is a %2$s on line %3$d and a %4$s here", ""),
+  BOTTLE_OF_TWO_TYPES(ERROR, "%1$s is %2$s on line %3$d and %4$s here", ""),
   STAND_IN(
       NOTE,
       "%1$s stands in for a type that is not in the catalogue: its currents are as written",
@@ -279,7 +280,6 @@ enum Problem {
   SUBCKT_WITHOUT_ENDS(ERROR, ".subckt %1$s is never ended", ".ends closes it"),
   ENDS_WITHOUT_SUBCKT(ERROR, "this .ends closes nothing", ""),
   INCLUDE_MISSING(NOTE, "no file %1$s: passed over", ""),
-  INCLUDE_NOT_HERE(NOTE, "text that stands alone includes no file: %1$s passed over", ""),
   INCLUDE_REFUSED(
       ERROR,
       "%1$s lies where a netlist may not reach",
@@ -302,10 +302,8 @@ enum Problem {
   SETTING_TWICE(WARNING, "%1$s stands on line %2$d already", ""),
   SETTING_EMPTY(ERROR, "%1$s: something is missing", "%2$s"),
   LINE_NOT_STATED(
-      NOTE,
-      "no .line: windings hold as written, at 60 Hz unless a sine says 50",
-      ".line 120 60 design=117"),
-  LINE_RANGE(ERROR, "%1$s cannot be the line's: %2$s", ".line 120 60"),
+      NOTE, "no .line: windings hold as written, at %1$s Hz", ".line 120 60 design=117"),
+  LINE_RANGE(ERROR, "%1$s cannot be the line's %2$s", ".line 120 60"),
   TRANSFORMER_SHORT(
       ERROR, ".transformer %1$s needs primary volts and resistance", "primary=120 rdc=17.5"),
   TRANSFORMER_TWICE(ERROR, "there are two transformers %1$s", ""),
@@ -315,7 +313,7 @@ enum Problem {
   STATE_EMPTY(WARNING, "state %1$s changes nothing", "S1=open V3=out V5=GZ34 P1=0.2 line=108"),
   STATE_OF_PART(
       ERROR, "a state cannot set %1$s", "switches, tubes, controls and the line can be set"),
-  STATE_SOCKET(ERROR, "a %1$s (%2$s) does not go into the socket of %3$s (%4$s)", "");
+  STATE_SOCKET(ERROR, "%1$s (%2$s) does not go into the socket of %3$s (%4$s)", "");
 
   private final Severity severity;
   private final String message;

@@ -1,6 +1,7 @@
 package railwalk.netlist;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
@@ -84,6 +85,33 @@ final class Settings {
     }
   }
 
+  /** Reports what is wrong with the {@code .order} lines. */
+  void check(Collection<Card> orders) {
+    for (Card order : orders) {
+      List<Word> words = order.words().subList(1, order.words().size());
+      if (words.isEmpty()) {
+        draft
+            .report()
+            .add(
+                Problem.SETTING_EMPTY,
+                order.head().span(),
+                ".order",
+                ".order 6V6GT plate screen grid cathode");
+      }
+      for (Word word : words) {
+        if (ElectrodeWords.electrode(word.text()).isEmpty()) {
+          draft
+              .report()
+              .add(
+                  Problem.ELECTRODE_UNKNOWN,
+                  word.span(),
+                  word.text(),
+                  NearNames.hint(word.text(), ElectrodeWords.all()));
+        }
+      }
+    }
+  }
+
   private void once(String word, Card card) {
     Card first = seen.putIfAbsent(word, card);
     if (first != null) {
@@ -124,7 +152,13 @@ final class Settings {
   private double within(PartCard part, Word word, Measure measure, double least, double most) {
     double value = part.read(word, measure);
     if (value < least || value > most) {
-      draft.report().add(Problem.LINE_RANGE, word.span(), word.text(), measure.words());
+      draft
+          .report()
+          .add(
+              Problem.LINE_RANGE,
+              word.span(),
+              word.text(),
+              measure == Measure.VOLTAGE ? "volts" : "hertz");
     }
     return value;
   }

@@ -23,15 +23,15 @@ final class StandInReader {
     Map<Electrode, Double> draws = new LinkedHashMap<>();
     Map<Electrode, Word> drawWords = new LinkedHashMap<>();
     boolean afterDraws = false;
+    boolean allKnown = true;
     for (Field field : card.fields()) {
       if (field instanceof Field.Bare bare) {
         afterDraws |= bare.word().is("draws");
       } else if (field instanceof Field.Option option) {
         Optional<Electrode> electrode = electrode(part, option.key());
         if (electrode.isEmpty()) {
-          continue;
-        }
-        if (afterDraws) {
+          allKnown = false;
+        } else if (afterDraws) {
           drawWords.put(electrode.get(), option.key());
           draws.put(electrode.get(), part.read(option.value(), Measure.CURRENT));
         } else {
@@ -39,6 +39,9 @@ final class StandInReader {
           electrodes.put(electrode.get(), node);
         }
       }
+    }
+    if (!allKnown) {
+      return;
     }
     drawWords.forEach(
         (electrode, word) -> {

@@ -79,7 +79,7 @@ final class StateReader {
     if (key.is("line") || key.is("mains")) {
       double volts = new PartCard(card, frame, draft).readPositive(value, Measure.VOLTAGE);
       if (volts == 0) {
-        draft.report().add(Problem.LINE_RANGE, value.span(), value.text(), "a voltage");
+        draft.report().add(Problem.LINE_RANGE, value.span(), value.text(), "volts");
       }
       return new StateChange.LineVolts(volts);
     }

@@ -38,7 +38,9 @@ final class StructureCheck {
   void run(Node reference) {
     elements.forEach(this::acrossNothing);
     loops();
-    lonelyNodes(reference);
+    if (!report.hasErrors()) {
+      lonelyNodes(reference); // a line that could not be read leaves nodes alone that are not
+    }
   }
 
   private SourceSpan span(Element element) {

@@ -41,6 +41,7 @@ final class TubeRack {
     private final SourceSpan span;
     private final int place;
     private Bottle.Wiring wiring;
+    private boolean spoilt;
     private final SortedMap<Integer, Node> pins = new TreeMap<>();
     private final Map<Integer, SourceSpan> pinSpans = new HashMap<>();
     private final List<Lead> leads = new ArrayList<>();
@@ -65,8 +66,23 @@ final class TubeRack {
       return pins.putIfAbsent(pin, node) == null;
     }
 
-    void lead(Lead lead) {
-      leads.add(lead);
+    /** Remembers that something of it could not be read: what it lacks is then no news. */
+    void spoil() {
+      spoilt = true;
+    }
+
+    /** Wires an electrode; returns whether it was free. */
+    boolean wireLead(Lead lead) {
+      boolean taken =
+          leads.stream()
+              .anyMatch(
+                  other ->
+                      other.electrode() == lead.electrode()
+                          && other.section().equals(lead.section()));
+      if (!taken) {
+        leads.add(lead);
+      }
+      return !taken;
     }
 
     /** Remembers the line that names a section. */
@@ -143,7 +159,9 @@ final class TubeRack {
         int place = entry.sectionPlaces.getOrDefault(section, entry.place);
         draft.add(element, entry.spanOf(section), place);
       }
-      fitting.remarks().forEach(remark -> report(entry, remark));
+      if (!entry.spoilt) {
+        fitting.remarks().forEach(remark -> report(entry, remark));
+      }
     }
   }
 

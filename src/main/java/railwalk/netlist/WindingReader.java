@@ -51,7 +51,7 @@ final class WindingReader {
               Problem.VALUE_MISSING,
               part.end(),
               part.name(),
-              "the winding's volts",
+              Measure.VOLTAGE.words(),
               "RMS 325 or RMS 325-0-325");
       return;
     }
@@ -91,7 +91,8 @@ final class WindingReader {
   private double @Nullable [] volts(Word figures) {
     Matcher centreTapped = CENTRE_TAPPED.matcher(figures.text());
     if (nodes.size() == 3 && centreTapped.matches()) {
-      double half = Double.parseDouble(centreTapped.group(1)) / 2;
+      Word whole = new Word(centreTapped.group(1), figures.span(), Word.Form.PLAIN);
+      double half = part.readPositive(whole, Measure.VOLTAGE) / 2;
       return new double[] {half, 0, half};
     }
     String text = figures.text();

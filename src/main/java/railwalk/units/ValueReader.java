@@ -21,7 +21,8 @@ public final class ValueReader {
   private static final Pattern NUMBER =
       Pattern.compile("([+-]?)(\\d+\\.?\\d*|\\.\\d+)(?:[eE]([+-]?\\d{1,3}))?([^\\d.]*)");
   private static final Pattern FRACTION =
-      Pattern.compile("(\\d{1,3})/(\\d{1,3})(?:w|watt|watts)", Pattern.CASE_INSENSITIVE);
+      Pattern.compile(
+          "(?:(\\d{1,3})-)?(\\d{1,3})/(\\d{1,3})(w|watts?|a|amps?)", Pattern.CASE_INSENSITIVE);
   private static final Pattern TOLERANCE_SIGN = Pattern.compile("^(?:±|\\+/-|\\+-)");
   private static final double LARGEST_BARE_FARADS = 1e-3;
   private static final double LEAST_REMARKED_FARADS = 1e-9;
@@ -37,6 +38,7 @@ public final class ValueReader {
     String digits = text.replace('O', '0').replace('o', '0').replace('l', '1').replace('I', '1');
     boolean readsWithDigits =
         !digits.equals(text)
+            && text.chars().anyMatch(Character::isDigit)
             && readPlain(plain(digits), measure) instanceof Value value
             && !value.remarks().contains(Remark.LETTERS_IGNORED);
     return readsWithDigits ? new Refused(Refusal.LETTER_FOR_DIGIT, measure, digits) : reading;
@@ -45,8 +47,9 @@ public final class ValueReader {
   /** Returns what the unit written after a number measures; empty without a known unit. */
   public static Optional<Measure> statedMeasure(String text) {
     String plain = plain(text);
-    if (FRACTION.matcher(plain).matches()) {
-      return Optional.of(Measure.POWER);
+    Matcher fraction = FRACTION.matcher(plain);
+    if (fraction.matches()) {
+      return Suffix.statedBy(fraction.group(4));
     }
     Matcher number = NUMBER.matcher(plain);
     return number.matches() ? Suffix.statedBy(number.group(4)) : Optional.empty();
@@ -70,15 +73,19 @@ public final class ValueReader {
     return LetterCode.read(text, measure).orElseGet(() -> number(text, measure));
   }
 
+  /** Reads 1/2W, or 1-1/2A as fuses are marked. */
   private static ValueReading fraction(Matcher fraction, Measure measure) {
-    if (measure != Measure.POWER && measure != Measure.NUMBER) {
-      return new Refused(Refusal.WRONG_UNIT, Measure.POWER, "");
+    Measure stated = Suffix.statedBy(fraction.group(4)).orElse(measure);
+    if (measure != stated && measure != Measure.NUMBER) {
+      return new Refused(Refusal.WRONG_UNIT, stated, "");
     }
-    double parts = Double.parseDouble(fraction.group(2));
+    double whole = fraction.group(1) == null ? 0 : Double.parseDouble(fraction.group(1));
+    double parts = Double.parseDouble(fraction.group(3));
     if (parts == 0) {
       return new Refused(Refusal.NOT_A_NUMBER, measure, "");
     }
-    return new Value(Double.parseDouble(fraction.group(1)) / parts, Double.NaN, Set.of());
+    double amount = whole + Double.parseDouble(fraction.group(2)) / parts;
+    return new Value(amount, Double.NaN, Set.of());
   }
 
   private static ValueReading number(String text, Measure measure) {
