@@ -66,7 +66,6 @@ final class WalkLadder {
   /** Returns the sum that leads to a supply node, with what its current is for. */
   private String line(SupplyNode supply, Node parent, boolean withLoads) {
     Node node = supply.node();
-    List<WalkLoads.Share> shares = loads.of(node);
     List<DcStep> steps = steps(supply);
     List<WalkSum.Term> drops = terms.of(steps);
     if (drops.isEmpty()) {
@@ -76,7 +75,13 @@ final class WalkLadder {
     WalkSum.Printed sum =
         new WalkSum(parent.name(), point.volts(parent), drops, node.name(), point.volts(node))
             .printed();
-    return withLoads ? sum.text() + " (" + WalkLoads.text(sum.amps(), shares) + ")" : sum.text();
+    if (!withLoads) {
+      return sum.text();
+    }
+    boolean ohmic = drops.get(drops.size() - 1).ohmic();
+    return ohmic
+        ? sum.text() + " (" + WalkLoads.text(sum.amps(), loads.of(node)) + ")"
+        : sum.text() + drawn(supply);
   }
 
   /** Returns the steps from a supply node's parent to it. */

@@ -1,6 +1,7 @@
 package railwalk.chart;
 
 import java.util.List;
+import java.util.Optional;
 import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Circuit;
 import railwalk.device.Electrode;
@@ -17,11 +18,17 @@ final class WalkLaw {
   /** How much more current the cross-check tries, before it is rounded. */
   private static final double TRIAL = 1.05;
 
+  /** How much more it tries at least when rounded. */
+  private static final double LEAST_TRIAL = 1.02;
+
   /** Below this a cathode circuit does not follow the current: it is grounded, or measured. */
   private static final double FOLLOWING_VOLTS = 0.2;
 
   /** Below this share of the current tried there is none worth the name. */
   private static final double CUT_OFF_SHARE = 0.02;
+
+  /** Less than this is no current that anything could be told from. */
+  private static final double NO_AMPS = 1e-6;
 
   private final OperatingPoint point;
   private final Circuit circuit;
@@ -50,11 +57,19 @@ final class WalkLaw {
             + article(typeName())
             + typeName()
             + " passes "
-            + WalkAmps.said(at.plateAmps()).text()
-            + (pentode
-                ? " at its {plate} and " + WalkAmps.said(at.screenAmps()).text() + " at its screen"
-                : "")
+            + (cutOff() ? "no current to speak of" : currents(pentode))
             + ".");
+  }
+
+  private String currents(boolean pentode) {
+    String plate = WalkAmps.said(at.plateAmps()).text();
+    return pentode
+        ? plate + " at its {plate} and " + WalkAmps.said(at.screenAmps()).text() + " at its screen"
+        : plate;
+  }
+
+  private boolean cutOff() {
+    return at.plateAmps() < NO_AMPS;
   }
 
   /** Returns "an " before a name that is spoken with a vowel first, such as EL84 or 807. */
@@ -66,19 +81,30 @@ final class WalkLaw {
     return circuit.bottle(section.bottle()).map(b -> b.type().name()).orElse(section.name());
   }
 
-  /** Returns what would happen with a little more current, or with a volt more on the grid. */
-  String crossCheck() {
+  /**
+   * Returns what would happen with a little more current, or with a volt more on the grid; empty
+   * for a tube that is cut off.
+   */
+  Optional<String> crossCheck() {
+    if (cutOff()) {
+      return Optional.empty();
+    }
+    Optional<AmplifierSection> below = tubeBelow();
+    if (below.isPresent()) {
+      return Optional.of(
+          below.get().name() + " below it sets the current; this section passes it on.");
+    }
     double cathodeOhms = cathodeOhms();
     SectionCurrents here = new SectionCurrents();
     section.law().evaluate(at.plateVolts(), at.screenVolts(), at.gridVolts(), here);
     if (cathodeOhms * at.cathodeAmps() < FOLLOWING_VOLTS) {
-      return wording.say(
+      return said(
           "Nothing follows the current: the bias sets it, and a volt more on the grid moves it by"
               + " about "
               + Quantity.amps(here.plateByGridSiemens)
               + ".");
     }
-    double trial = twoDigits(at.plateAmps() * TRIAL);
+    double trial = trial(at.plateAmps());
     double more = trial - at.plateAmps();
     double share = trial / at.plateAmps();
     double cathodeVolts =
@@ -97,7 +123,7 @@ final class WalkLaw {
             at.screenVolts() - screenFall - rise,
             at.gridVolts() - rise + gridRise(at.cathodeAmps() * (share - 1)),
             there);
-    return wording.say(
+    return said(
         "Were it "
             + WalkAmps.said(trial).text()
             + ", the cathode would rise to "
@@ -105,6 +131,21 @@ final class WalkLaw {
             + " and the {plate} come to "
             + Quantity.volts(plateVolts)
             + outcome(there.plateAmps, trial));
+  }
+
+  /** Returns the section that this one's cathode current goes on through, if there is one. */
+  private Optional<AmplifierSection> tubeBelow() {
+    DcPath path = DcPaths.to(point.map(), circuit, section, Electrode.CATHODE);
+    return path.back().stream()
+        .takeWhile(step -> !step.from().equals(circuit.reference()))
+        .map(DcStep::element)
+        .filter(AmplifierSection.class::isInstance)
+        .map(AmplifierSection.class::cast)
+        .findFirst();
+  }
+
+  private Optional<String> said(String sentence) {
+    return Optional.of(wording.say(sentence));
   }
 
   private static String outcome(double amps, double trial) {
@@ -177,8 +218,10 @@ final class WalkLaw {
     return Double.isNaN(ohms) ? 0 : ohms;
   }
 
-  private static double twoDigits(double amps) {
+  /** Returns a current a little above {@code amps}, with two significant digits. */
+  private static double trial(double amps) {
     double step = Math.pow(10, Math.floor(Math.log10(amps)) - 1);
-    return Math.rint(amps / step) * step;
+    double rounded = Math.rint(amps * TRIAL / step) * step;
+    return rounded > amps * LEAST_TRIAL ? rounded : rounded + step;
   }
 }

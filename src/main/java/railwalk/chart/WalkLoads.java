@@ -20,6 +20,9 @@ final class WalkLoads {
   /** Currents below this share of the whole are not worth a word. */
   private static final double SMALLEST_SHARE = 1e-3;
 
+  /** A part that leads to electrodes is named after them up to this share of other current. */
+  private static final double OTHER_SHARE = 0.25;
+
   private final OperatingPoint point;
   private final Wording wording;
   private final WalkTerms terms;
@@ -72,8 +75,12 @@ final class WalkLoads {
     List<TubeElectrode> fed =
         load.electrodes().stream().filter(WalkLoads::isFed).distinct().toList();
     List<TubeElectrode> named = fed.isEmpty() ? load.electrodes() : fed;
-    if (!named.isEmpty()) {
-      return named.stream().map(this::name).distinct().collect(Collectors.joining("+"));
+    if (!named.isEmpty() && isFor(load, named)) {
+      return named.stream()
+          .map(end -> end.tube().name())
+          .distinct()
+          .map(tube -> tube + " " + electrodes(tube, named))
+          .collect(Collectors.joining("+"));
     }
     return load.parts().stream()
         .map(DcStep::element)
@@ -81,12 +88,26 @@ final class WalkLoads {
         .collect(Collectors.joining("+"));
   }
 
+  /** Returns whether most of what a part carries goes into those electrodes: no divider's chain. */
+  private boolean isFor(SupplyLoad load, List<TubeElectrode> ends) {
+    if (load.parts().isEmpty()) {
+      return true;
+    }
+    double whole = amps(load);
+    double inside = ends.stream().mapToDouble(this::amps).sum();
+    return Math.abs(whole - inside) <= OTHER_SHARE * Math.abs(whole);
+  }
+
   private static boolean isFed(TubeElectrode end) {
     return end.electrode() == Electrode.PLATE || end.electrode() == Electrode.SCREEN;
   }
 
-  private String name(TubeElectrode end) {
-    return end.tube().name() + " " + wording.electrode(end.electrode());
+  private String electrodes(String tube, List<TubeElectrode> ends) {
+    return ends.stream()
+        .filter(end -> end.tube().name().equals(tube))
+        .map(end -> wording.electrode(end.electrode()))
+        .distinct()
+        .collect(Collectors.joining("+"));
   }
 
   /**
@@ -101,7 +122,7 @@ final class WalkLoads {
             .filter(share -> Math.abs(share.amps()) >= whole.place() / 2)
             .toList();
     if (notable.isEmpty()) {
-      return whole.text();
+      return whole.printed() == 0 ? "no current" : whole.text();
     }
     double direction = notable.stream().mapToDouble(Share::amps).sum() < 0 ? -1 : 1;
     List<Double> units = apportioned(whole, notable, direction);

@@ -40,10 +40,7 @@ final class WalkRectifier {
     List<DcStep> steps = DcPaths.to(point.map(), point.circuit(), supply.node()).there();
     double rms = windingRms(steps);
     if (rms == 0) {
-      return "Return to the winding: "
-          + supply.node().name()
-          + " "
-          + Quantity.volts(point.volts(supply.node()));
+      return returnLead(supply.node());
     }
     String behind = supply.droppers().stream().map(Element::name).collect(Collectors.joining(", "));
     return windings(steps)
@@ -59,6 +56,23 @@ final class WalkRectifier {
         + supply.node().name()
         + " "
         + Quantity.volts(point.volts(supply.node()));
+  }
+
+  /** Returns the sum that lifts the winding's return off the reference. */
+  private String returnLead(Node node) {
+    List<DcStep> lead =
+        DcPaths.at(point.circuit(), node).stream()
+            .filter(step -> step.to().equals(point.circuit().reference()))
+            .map(step -> new DcStep(step.to(), step.element(), step.from()))
+            .limit(1)
+            .toList();
+    double volts = point.volts(node);
+    return "Return to the winding: "
+        + (lead.isEmpty()
+            ? node.name() + " " + Quantity.volts(volts)
+            : new WalkSum("", 0, new WalkTerms(point).of(lead), node.name(), volts)
+                .printed()
+                .text());
   }
 
   private static String arrangement(RippleGroup group) {

@@ -40,7 +40,7 @@ record WalkSum(String from, double fromVolts, List<Term> terms, String to, doubl
   Printed printed() {
     for (int to = 0; to <= MOST_DECIMALS; to++) {
       for (int from = to; from <= to + 2; from++) {
-        for (int amps = 0; amps <= 2; amps++) {
+        for (int amps = 0; amps <= 3; amps++) {
           if (addsUp(from, to, amps)) {
             return print(from, to, amps);
           }

@@ -24,7 +24,7 @@ final class WalkTube {
   private static final double NOTABLE_SHARE = 0.01;
 
   /** Current that drops nothing anyone would see. */
-  private static final double NO_AMPS = 1e-10;
+  private static final double NO_AMPS = 5e-9;
 
   private final OperatingPoint point;
   private final Circuit circuit;
@@ -96,7 +96,7 @@ final class WalkTube {
     addScreenLine(lines);
     WalkLaw law = new WalkLaw(point, wording, section);
     lines.add(law.sentence());
-    lines.add(law.crossCheck());
+    law.crossCheck().ifPresent(lines::add);
   }
 
   private void addCathode(WalkLines lines) {
@@ -114,7 +114,7 @@ final class WalkTube {
         new WalkSum(
                 fromReference ? "" : from.name(), point.volts(from), terms, cathode.name(), volts)
             .printed();
-    String shares = cathodeShares(sum.amps());
+    String shares = terms.get(terms.size() - 1).ohmic() ? cathodeShares(sum.amps()) : "";
     lines.add(
         "Cathode: "
             + sum.text()

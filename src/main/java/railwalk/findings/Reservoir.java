@@ -13,6 +13,8 @@ import railwalk.circuit.Fuse;
 import railwalk.circuit.Node;
 import railwalk.circuit.Switch;
 import railwalk.circuit.Wire;
+import railwalk.walk.DcPaths;
+import railwalk.walk.DcStep;
 
 /**
  * What a rectifier's output charges directly: the capacitors that nothing but metal parts from it.
@@ -41,7 +43,41 @@ record Reservoir(Set<Node> nodes, List<Capacitor> capacitors) {
         capacitors.add(capacitor);
       }
     }
-    return new Reservoir(nodes, capacitors);
+    return new Reservoir(nodes, atFoot(scene, output, nodes, capacitors));
+  }
+
+  /**
+   * Returns those of the capacitors that go straight to where the current comes home, if there are
+   * any: the others charge through what lifts that off the reference, a field coil or a resistor.
+   */
+  private static List<Capacitor> atFoot(
+      Scene scene, Node output, Set<Node> nodes, List<Capacitor> capacitors) {
+    List<DcStep> there = DcPaths.to(scene.map(), scene.circuit(), output).there();
+    if (there.isEmpty()) {
+      return capacitors;
+    }
+    Set<Node> home = joined(scene, there.get(0).from());
+    List<Capacitor> straight =
+        capacitors.stream()
+            .filter(c -> home.contains(nodes.contains(c.a()) ? c.b() : c.a()))
+            .toList();
+    return straight.isEmpty() ? capacitors : straight;
+  }
+
+  /** Returns {@code node} and what plain metal joins to it; the reference ends the search. */
+  private static Set<Node> joined(Scene scene, Node start) {
+    Set<Node> nodes = new LinkedHashSet<>();
+    Deque<Node> open = new ArrayDeque<>(Set.of(start));
+    while (!open.isEmpty()) {
+      Node node = open.remove();
+      if (nodes.add(node) && !node.equals(scene.circuit().reference())) {
+        scene.at(node).stream()
+            .filter(Reservoir::isMetal)
+            .map(Element::nodes)
+            .forEach(open::addAll);
+      }
+    }
+    return nodes;
   }
 
   private static boolean isMetal(Element element) {

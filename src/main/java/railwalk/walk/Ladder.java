@@ -6,6 +6,7 @@ import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import org.jgrapht.Graph;
 import org.jgrapht.GraphPath;
@@ -56,14 +57,21 @@ final class Ladder {
     roots.forEach(root -> ladder.roots.put(root.node(), root));
     Set<Element> inside = new HashSet<>();
     groups.forEach(group -> inside.addAll(group.elements()));
-    for (DcBranch branch : branches) {
-      if (carries(branch, inside, grounds)) {
-        ladder.conductors.computeIfAbsent(branch.a(), n -> new ArrayList<>()).add(branch);
-        ladder.conductors.computeIfAbsent(branch.b(), n -> new ArrayList<>()).add(branch);
-      }
-    }
+    branches.stream().filter(branch -> carries(branch, inside, grounds)).forEach(ladder::add);
     ladder.grow(circuit, branches, grounds);
+    PassTubes passTubes = new PassTubes(circuit, branches, grounds);
+    Optional<DcBranch> pass = passTubes.next(ladder);
+    while (pass.isPresent()) {
+      ladder.add(pass.get());
+      ladder.grow(circuit, branches, grounds);
+      pass = passTubes.next(ladder);
+    }
     return ladder;
+  }
+
+  private void add(DcBranch branch) {
+    conductors.computeIfAbsent(branch.a(), n -> new ArrayList<>()).add(branch);
+    conductors.computeIfAbsent(branch.b(), n -> new ArrayList<>()).add(branch);
   }
 
   /** Returns whether a supply goes on through the branch. */
@@ -78,6 +86,8 @@ final class Ladder {
   }
 
   private void grow(Circuit circuit, List<DcBranch> branches, Grounds grounds) {
+    feeds.clear();
+    children.clear();
     Graph<Node, DefaultWeightedEdge> graph = new WeightedMultigraph<>(DefaultWeightedEdge.class);
     Map<DefaultWeightedEdge, DcBranch> carried = new HashMap<>();
     graph.addVertex(SOURCE);
@@ -124,6 +134,11 @@ final class Ladder {
   /** Returns whether {@code node} is a root. */
   boolean isRoot(Node node) {
     return roots.containsKey(node);
+  }
+
+  /** Returns whether supply current comes to {@code node}. */
+  boolean reaches(Node node) {
+    return isRoot(node) || feeds.containsKey(node);
   }
 
   /** Returns the branch by which {@code node} is fed; null for a root and for what is not fed. */

@@ -36,11 +36,14 @@ public final class SupplyLoads {
 
   private List<SupplyLoad> at(Node node) {
     List<SupplyLoad> loads = new ArrayList<>();
+    List<DcBranch> feeds = ladder.feedsSideBySide(node);
+    List<Element> feeding = feeds.stream().map(DcBranch::element).toList();
     for (TubeElectrode electrode : electrodes.at(node)) {
-      loads.add(new SupplyLoad(List.of(), List.of(electrode), List.of()));
+      if (!feeding.contains(electrode.tube())) {
+        loads.add(new SupplyLoad(List.of(), List.of(electrode), List.of()));
+      }
     }
     Map<Node, List<DcStep>> byFarEnd = new LinkedHashMap<>();
-    List<DcBranch> feeds = ladder.feedsSideBySide(node);
     for (DcBranch branch : ladder.conductorsAt(node)) {
       if (!feeds.contains(branch) && !feeders.contains(branch.element())) {
         Node far = branch.other(node);

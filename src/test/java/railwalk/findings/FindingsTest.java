@@ -237,6 +237,18 @@ class FindingsTest {
   }
 
   @Test
+  void aSecondCapacitorBeyondTheFieldCoilIsNoFirstCapacitor() {
+    CircuitBuilder builder =
+        new CircuitBuilder()
+            .winding("VHT", new double[] {275, 275}, 150, "h1", "ct", "h2")
+            .rectifier(type("5Y3GT"), "V3", "h1", "h2", "b1")
+            .c("C1", "b1", "ct", 16e-6, 475)
+            .l("LF", "ct", "0", 10, 300)
+            .c("C1B", "b1", "0", 16e-6, 475);
+    assertThat(codes(wiring(output(preamp(dropper(builder)))))).isEmpty();
+  }
+
+  @Test
   void capacitorsInSeriesCountByHalf() {
     CircuitBuilder builder =
         new CircuitBuilder()

@@ -371,6 +371,32 @@ class SupplyTreeTest {
   }
 
   @Test
+  void aSeriesTubeCarriesTheSupplyOn() {
+    CircuitBuilder builder =
+        fullWave()
+            .triode("V7", "A", "b1", "g7", "br")
+            .r("R1", "b1", "g7", 220e3)
+            .triode("V7", "B", "g7", "ge", "vr")
+            .regulator("V8", "vr", "0")
+            .r("R2", "br", "vr", 22e3)
+            .r("R3", "br", "ge", 150e3)
+            .r("R4", "ge", "0", 100e3)
+            .c("C2", "br", "0", 20e-6);
+    Circuit circuit = preamp(builder, "V1", "br").build();
+    SupplyMap map = Walk.of(circuit);
+    assertThat(tree(map)).containsExactly("b1", " br < b1 by V7A");
+    assertThat(feed(map, circuit, "pV1")).isEqualTo("br");
+    assertThat(feed(map, circuit, "g7")).isEqualTo("b1");
+  }
+
+  @Test
+  void aBypassedCathodeThatABleedLiftsIsNoSeriesTube() {
+    CircuitBuilder builder = preamp(fullWave(), "V1", "b1").r("RB", "b1", "kV1", 470e3);
+    Circuit circuit = preamp(builder, "V2", "b1").build();
+    assertThat(tree(Walk.of(circuit))).containsExactly("b1");
+  }
+
+  @Test
   void aSideBranchComesAfterTheMainChain() {
     CircuitBuilder builder =
         fullWave()
