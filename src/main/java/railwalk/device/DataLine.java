@@ -9,6 +9,9 @@ import railwalk.source.Diagnostic;
 import railwalk.source.Severity;
 import railwalk.source.SourceSpan;
 import railwalk.source.SourceText;
+import railwalk.units.Measure;
+import railwalk.units.ValueReader;
+import railwalk.units.ValueReading;
 
 /**
  * One line of a data file, {@code key word… name=value…}, with the place of each word for error
@@ -16,6 +19,36 @@ import railwalk.source.SourceText;
  */
 final class DataLine {
   private record Word(String text, int column) {}
+
+  /** What the options measure that are no plain numbers. */
+  private static final Map<String, Measure> MEASURES =
+      Map.ofEntries(
+          Map.entry("plate", Measure.VOLTAGE),
+          Map.entry("screen", Measure.VOLTAGE),
+          Map.entry("grid", Measure.VOLTAGE),
+          Map.entry("heatercathode", Measure.VOLTAGE),
+          Map.entry("tap", Measure.VOLTAGE),
+          Map.entry("rms", Measure.VOLTAGE),
+          Map.entry("inverse", Measure.VOLTAGE),
+          Map.entry("strike", Measure.VOLTAGE),
+          Map.entry("operating", Measure.VOLTAGE),
+          Map.entry("regulation", Measure.VOLTAGE),
+          Map.entry("current", Measure.CURRENT),
+          Map.entry("screencurrent", Measure.CURRENT),
+          Map.entry("cathodecurrent", Measure.CURRENT),
+          Map.entry("peak", Measure.CURRENT),
+          Map.entry("dc", Measure.CURRENT),
+          Map.entry("minimum", Measure.CURRENT),
+          Map.entry("maximum", Measure.CURRENT),
+          Map.entry("platewatts", Measure.POWER),
+          Map.entry("screenwatts", Measure.POWER),
+          Map.entry("cathode", Measure.RESISTANCE),
+          Map.entry("load", Measure.RESISTANCE),
+          Map.entry("screenload", Measure.RESISTANCE),
+          Map.entry("rp", Measure.RESISTANCE),
+          Map.entry("gridleak", Measure.RESISTANCE),
+          Map.entry("gridleakfixed", Measure.RESISTANCE),
+          Map.entry("capacitor", Measure.CAPACITANCE));
 
   private final SourceText text;
   private final int number;
@@ -102,7 +135,7 @@ final class DataLine {
   /** Returns bare word {@code index} as a number in SI units. */
   double figure(int index) {
     word(index);
-    return figure(words.get(index));
+    return figure(words.get(index), Measure.NUMBER);
   }
 
   /** Returns the rest of the line from bare word {@code index} on, as it was written. */
@@ -124,7 +157,7 @@ final class DataLine {
   /** Returns the option as a number in SI units, or {@code otherwise} when it is not given. */
   double figure(String name, double otherwise) {
     Word word = options.get(name);
-    return word == null ? otherwise : figure(word);
+    return word == null ? otherwise : figure(word, MEASURES.getOrDefault(name, Measure.NUMBER));
   }
 
   /** Returns the option as a number in SI units, or NaN when it is not given. */
@@ -152,12 +185,11 @@ final class DataLine {
     }
   }
 
-  private double figure(Word word) {
-    double value = Figure.parse(word.text);
-    if (Double.isNaN(value)) {
-      throw error(word, word.text + " is no number", "such as 250V, 1.2mA, 62.5k or 20uF");
+  private double figure(Word word, Measure measure) {
+    if (ValueReader.read(word.text, measure) instanceof ValueReading.Value value) {
+      return value.amount();
     }
-    return value;
+    throw error(word, word.text + " is not " + measure.words(), "such as " + measure.example());
   }
 
   /** Returns an error that points at bare word {@code index}. */

@@ -46,24 +46,24 @@ final class Comparer {
   private void compare(AmplifierLaw law, PublishedPoint point, List<Comparison> all) {
     if (point.published().plateAmps() < cutOffAmps) {
       double bias = CutOff.gridVolts(law, point);
-      add(all, point, Measure.BIAS, point.setup().gridVolts(), bias, BIAS);
+      add(all, point, FigureKind.BIAS, point.setup().gridVolts(), bias, BIAS);
       return;
     }
     Standing at = Standing.of(law, point);
     SectionCurrents is = at.currents();
     double plate = is.plateAmps + (point.setup().triodeConnected() ? is.screenAmps : 0);
-    add(all, point, Measure.PLATE_CURRENT, point.published().plateAmps(), plate, CURRENT);
+    add(all, point, FigureKind.PLATE_CURRENT, point.published().plateAmps(), plate, CURRENT);
     add(
         all,
         point,
-        Measure.CATHODE_CURRENT,
+        FigureKind.CATHODE_CURRENT,
         point.published().cathodeAmps(),
         is.plateAmps + is.screenAmps,
         CATHODE_CURRENT);
     add(
         all,
         point,
-        Measure.SCREEN_CURRENT,
+        FigureKind.SCREEN_CURRENT,
         point.published().screenAmps(),
         is.screenAmps,
         SCREEN_CURRENT);
@@ -73,7 +73,7 @@ final class Comparer {
       add(
           all,
           point,
-          Measure.PLATE_VOLTS,
+          FigureKind.PLATE_VOLTS,
           published,
           at.plateVoltsToFoot(),
           Double.POSITIVE_INFINITY);
@@ -90,19 +90,19 @@ final class Comparer {
                 ? is.plateByScreenSiemens + is.screenByPlateSiemens + is.screenByScreenSiemens
                 : 0);
     boolean triode = joined || Double.isNaN(point.setup().screenVolts());
-    add(all, point, Measure.MUTUAL_CONDUCTANCE, point.published().gmSiemens(), byGrid, SLOPE);
-    add(all, point, Measure.AMPLIFICATION, point.published().mu(), byGrid / byPlate, SLOPE);
+    add(all, point, FigureKind.MUTUAL_CONDUCTANCE, point.published().gmSiemens(), byGrid, SLOPE);
+    add(all, point, FigureKind.AMPLIFICATION, point.published().mu(), byGrid / byPlate, SLOPE);
     add(
         all,
         point,
-        Measure.SCREEN_AMPLIFICATION,
+        FigureKind.SCREEN_AMPLIFICATION,
         point.published().screenMu(),
         byGrid / is.plateByScreenSiemens,
         SCREEN_MU);
     add(
         all,
         point,
-        Measure.PLATE_RESISTANCE,
+        FigureKind.PLATE_RESISTANCE,
         point.published().plateOhms(),
         1 / byPlate,
         triode ? SLOPE : PENTODE_RESISTANCE);
@@ -111,7 +111,7 @@ final class Comparer {
   private static void add(
       List<Comparison> all,
       PublishedPoint point,
-      Measure measure,
+      FigureKind measure,
       double published,
       double law,
       double share) {

@@ -11,7 +11,7 @@ import railwalk.device.PublishedPoint;
  *     infinite for a figure that is shown but not fitted
  */
 public record Comparison(
-    PublishedPoint point, Measure measure, double published, double law, double toleranceShare) {
+    PublishedPoint point, FigureKind measure, double published, double law, double toleranceShare) {
 
   /** Returns how far the law is off, as a share of the published figure: 0.02 is 2 % too much. */
   public double errorShare() {

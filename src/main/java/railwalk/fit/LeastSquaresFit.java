@@ -59,7 +59,8 @@ final class LeastSquaresFit {
     // kg divides all currents: one step brings the first current to its place.
     List<Comparison> first = comparer.compare(curve.law(natural(start)));
     first.stream()
-        .filter(c -> c.measure() == Measure.PLATE_CURRENT && c.point().setup().cathodeOhms() == 0)
+        .filter(
+            c -> c.measure() == FigureKind.PLATE_CURRENT && c.point().setup().cathodeOhms() == 0)
         .findFirst()
         .ifPresent(c -> start.addToEntry(2, Math.log(c.law() / c.published())));
     return start;

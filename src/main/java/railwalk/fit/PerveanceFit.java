@@ -25,7 +25,7 @@ final class PerveanceFit {
   static Comparison compare(RectifierLaw law, PublishedPoint point) {
     double drop = Math.pow(point.published().plateAmps() / law.perveance(), 2.0 / 3);
     double tolerance = DROP / Comparer.weight(point);
-    return new Comparison(point, Measure.DROP, point.setup().plateVolts(), drop, tolerance);
+    return new Comparison(point, FigureKind.DROP, point.setup().plateVolts(), drop, tolerance);
   }
 
   /** Returns K, ampere per volt^1.5. */

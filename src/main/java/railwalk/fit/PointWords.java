@@ -36,7 +36,7 @@ final class PointWords {
     return String.join(", ", words);
   }
 
-  static String figure(double value, Measure measure) {
+  static String figure(double value, FigureKind measure) {
     return measure.unit().isEmpty()
         ? Quantity.of(value, "").strip()
         : Quantity.of(value, measure.unit());

@@ -48,7 +48,8 @@ class DataFileTest {
       value = {
         "pin      3 cathode|pin      2 cathode|demo.tube:8:10|pin 2 stands twice",
         "plate=300V platewatts|plate=-300V platewatts|demo.tube:9:31|makes no sense",
-        "plate=300V platewatts|plate=lots platewatts|demo.tube:9:31|lots is no number",
+        "plate=300V platewatts|plate=lots platewatts|demo.tube:9:31|lots is not a voltage",
+        "plate=300V platewatts|plate=300W platewatts|demo.tube:9:31|300W is not a voltage",
         "plate=300V platewatts|plates=300V platewatts|demo.tube:9:31|unknown word plates=",
         "system=design-centre||demo.tube:9:1|rating system is missing",
         "spread   0.70|width    0.70|demo.tube:10:1|unknown key word width",

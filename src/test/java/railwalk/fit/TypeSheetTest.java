@@ -16,7 +16,7 @@ import railwalk.device.TubeType;
 class TypeSheetTest {
   private static final Catalogue CATALOGUE = Catalogue.standard();
 
-  private static List<Comparison> rows(Measure measure) {
+  private static List<Comparison> rows(FigureKind measure) {
     List<Comparison> rows = new ArrayList<>();
     for (TubeType type : CATALOGUE.types()) {
       if (CATALOGUE.file(type.name()).orElseThrow().borrowsLaw()) {
@@ -42,7 +42,7 @@ class TypeSheetTest {
   @Test
   void plateCurrentsOfPublishedPoints() {
     List<Comparison> rows =
-        rows(Measure.PLATE_CURRENT).stream()
+        rows(FigureKind.PLATE_CURRENT).stream()
             .filter(r -> r.point().setup().loadOhms() == 0)
             .toList();
     long near = rows.stream().filter(r -> Math.abs(r.errorShare()) <= 0.05).count();
@@ -55,7 +55,7 @@ class TypeSheetTest {
 
   @Test
   void biasNearCutOff() {
-    List<Comparison> rows = rows(Measure.BIAS);
+    List<Comparison> rows = rows(FigureKind.BIAS);
     assertThat(rows).hasSizeGreaterThanOrEqualTo(2);
     assertThat(rows).allMatch(r -> Math.abs(r.errorShare()) <= 0.10);
   }
@@ -64,7 +64,9 @@ class TypeSheetTest {
   @Test
   void plateVoltsOfResistanceCoupledStages() {
     List<Comparison> rows =
-        rows(Measure.PLATE_VOLTS).stream().filter(r -> r.point().setup().loadOhms() > 0).toList();
+        rows(FigureKind.PLATE_VOLTS).stream()
+            .filter(r -> r.point().setup().loadOhms() > 0)
+            .toList();
     assertThat(rows).hasSizeGreaterThanOrEqualTo(7);
     assertThat(rows).allMatch(r -> Math.abs(r.errorShare()) <= 0.04);
   }
@@ -72,14 +74,14 @@ class TypeSheetTest {
   /** Philips EF86 sheet 1-1970, page 2: the cathode current is printed. */
   @Test
   void cathodeCurrentsOfPentodeStages() {
-    List<Comparison> rows = rows(Measure.CATHODE_CURRENT);
+    List<Comparison> rows = rows(FigureKind.CATHODE_CURRENT);
     assertThat(rows).hasSizeGreaterThanOrEqualTo(6);
     assertThat(rows).allMatch(r -> Math.abs(r.errorShare()) <= 0.10);
   }
 
   @Test
   void rectifierDrops() {
-    List<Comparison> rows = rows(Measure.DROP);
+    List<Comparison> rows = rows(FigureKind.DROP);
     assertThat(rows).hasSizeGreaterThanOrEqualTo(4);
     assertThat(rows).allMatch(r -> Math.abs(r.errorShare()) <= 0.05);
   }
@@ -91,7 +93,7 @@ class TypeSheetTest {
   @Test
   void mutualConductance() {
     assertThat(
-            rows(Measure.MUTUAL_CONDUCTANCE).stream()
+            rows(FigureKind.MUTUAL_CONDUCTANCE).stream()
                 .filter(r -> r.point().credit().weight() == 1)
                 .toList())
         .hasSizeGreaterThan(20)

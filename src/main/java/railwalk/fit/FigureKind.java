@@ -1,7 +1,7 @@
 package railwalk.fit;
 
 /** What of a published point is compared with the law. */
-public enum Measure {
+public enum FigureKind {
   PLATE_CURRENT("plate current", "current", "A"),
   SCREEN_CURRENT("screen current", "screencurrent", "A"),
   CATHODE_CURRENT("cathode current", "cathodecurrent", "A"),
@@ -20,7 +20,7 @@ public enum Measure {
   private final String key;
   private final String unit;
 
-  Measure(String words, String key, String unit) {
+  FigureKind(String words, String key, String unit) {
     this.words = words;
     this.key = key;
     this.unit = unit;
