@@ -50,7 +50,7 @@ final class WalkRectifier {
         + Quantity.volts(rms * Math.sqrt(2))
         + ", through "
         + rectifiers(steps)
-        + arrangement(group)
+        + arrangement(group, supply.node())
         + (behind.isEmpty() ? "" : ", then " + behind)
         + ": "
         + supply.node().name()
@@ -75,8 +75,9 @@ final class WalkRectifier {
                 .text());
   }
 
-  private static String arrangement(RippleGroup group) {
-    return group.outputs().size() == 1 ? ", " + group.arrangement() : "";
+  private static String arrangement(RippleGroup group, Node output) {
+    int index = group.outputs().indexOf(output);
+    return index < 0 ? "" : ", " + group.arrangements().get(index);
   }
 
   private String source(Node node) {
