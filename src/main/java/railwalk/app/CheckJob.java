@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import railwalk.chart.Column;
 import railwalk.circuit.Circuit;
@@ -41,10 +42,30 @@ public record CheckJob(String report, long errors) {
     if (!result.origins().unknowns().isEmpty()) {
       return SolvedColumns.placed(Findings.of(circuit, Walk.of(circuit), null), result.origins());
     }
-    return SolvedColumns.of(TracedAmplifier.of(netlist, result, circuit)).stream()
-        .map(Column::findings)
-        .flatMap(List::stream)
-        .toList();
+    List<Column> columns = SolvedColumns.of(TracedAmplifier.of(netlist, result, circuit));
+    List<Diagnostic> found = new ArrayList<>(columns.get(0).findings());
+    for (Column state : columns.subList(1, columns.size())) {
+      for (Diagnostic finding : state.findings()) {
+        if (found.stream().noneMatch(f -> isSame(f, finding))) {
+          found.add(inState(state.state(), finding));
+        }
+      }
+    }
+    return found;
+  }
+
+  /** Returns whether two findings say the same of one part, whatever their figures. */
+  private static boolean isSame(Diagnostic one, Diagnostic other) {
+    return one.code().equals(other.code()) && Objects.equals(one.span(), other.span());
+  }
+
+  private static Diagnostic inState(String state, Diagnostic finding) {
+    return new Diagnostic(
+        finding.severity(),
+        finding.code(),
+        "in state " + state + ": " + finding.message(),
+        finding.hint(),
+        finding.span());
   }
 
   private static String summary(Path netlist, List<Diagnostic> all) {

@@ -14,6 +14,7 @@ final class CommandTree {
       List.of(
           new ChartCommand(),
           new CheckCommand(),
+          new WalkCommand(),
           new TubesCommand(),
           new FitCommand(),
           new CompletionCommand());

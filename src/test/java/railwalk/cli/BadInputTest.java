@@ -19,7 +19,7 @@ class BadInputTest {
   private static final String STAGE =
       """
       one stage on a battery
-      V1 b 0 250
+      VB b 0 250
       R1 b p 100k
       XV1 12AX7 1=p 2=g 3=k
       R2 k 0 1k5
@@ -29,19 +29,19 @@ class BadInputTest {
   @TempDir private Path folder;
 
   @ParameterizedTest
-  @ValueSource(strings = {"chart", "check"})
+  @ValueSource(strings = {"chart", "check", "walk"})
   void saysThatAFileIsMissing(String command) {
     refused(Run.of(command, "nowhere.cir"), "cannot read nowhere.cir: no such file");
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"chart", "check"})
+  @ValueSource(strings = {"chart", "check", "walk"})
   void saysThatAFolderIsNoNetlist(String command) {
     refused(Run.of(command, folder.toString()), folder + " is a folder, not a netlist");
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"chart", "check"})
+  @ValueSource(strings = {"chart", "check", "walk"})
   void needsANetlist(String command) {
     refused(Run.of(command), "Missing required parameter: 'NETLIST'");
   }
@@ -53,6 +53,7 @@ class BadInputTest {
     refused(chart, "stage.cir:4:5: error[unknown-type]");
     assertThat(chart.err()).contains("    XV1 12AX8 1=p", "12AX7");
     assertThat(Run.of("check", netlist.toString()).code()).isEqualTo(1);
+    assertThat(Run.of("walk", netlist.toString()).code()).isEqualTo(2);
     assertThat(files()).containsExactly("stage.cir");
   }
 
@@ -85,7 +86,7 @@ class BadInputTest {
   @Test
   void takesAGoodLineAndMeter() throws IOException {
     Path netlist =
-        netlist(STAGE.replace("V1 b 0 250", ".line 120 60 design=117\n.meter 10M\nV1 b 0 250"));
+        netlist(STAGE.replace("VB b 0 250", ".line 120 60 design=117\n.meter 10M\nVB b 0 250"));
     Run plain = Run.in(folder, "chart", netlist.toString(), "--as", "text");
     Run other =
         Run.in(
@@ -102,6 +103,17 @@ class BadInputTest {
     assertThat(plain.out()).contains("120 V").doesNotContain("108 V");
     assertThat(other.code()).isZero();
     assertThat(other.out()).contains("108 V").doesNotContain("120 V");
+  }
+
+  @Test
+  void walkNamesWhatAPointCanBe() throws IOException {
+    Path netlist = netlist(STAGE);
+    refused(Run.of("walk", netlist.toString(), "V9"), "no node, pin or electrode called V9");
+    for (String point : List.of("p", "V1.1", "V1A.plate", "v1.plate")) {
+      Run run = Run.of("walk", netlist.toString(), point);
+      assertThat(run.code()).as(point).isZero();
+      assertThat(run.out()).contains("there a 12AX7 passes");
+    }
   }
 
   @Test

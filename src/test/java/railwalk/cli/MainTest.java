@@ -10,7 +10,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 
 class MainTest {
   @ParameterizedTest
-  @ValueSource(strings = {"", "chart", "check", "tubes", "fit", "completion"})
+  @ValueSource(strings = {"", "chart", "check", "walk", "tubes", "fit", "completion"})
   void everyCommandHasHelpAndVersion(String command) {
     Run help = Run.of((command + " --help").trim().split(" "));
     assertThat(help.code()).isZero();
