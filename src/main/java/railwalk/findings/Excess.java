@@ -22,7 +22,7 @@ record Excess(double figure, double limit, String unit, String system) {
     return figure > limit * NOTHING;
   }
 
-  /** Returns the words: "13.1 W, 9 % over its 12 W (design-centre), …". */
+  /** Returns the words: "13.1 W, 9 % over its 12 W (design-centre)". */
   String words() {
     long percent = Math.round((figure / limit - 1) * 100);
     return Quantity.of(figure, unit)
@@ -30,7 +30,11 @@ record Excess(double figure, double limit, String unit, String system) {
         + percent
         + " % over its "
         + Quantity.of(limit, unit)
-        + (system.isEmpty() ? "" : " (" + system + ")")
-        + (figure <= limit * COMMON ? ", a common excess in factory amplifiers" : "");
+        + (system.isEmpty() ? "" : " (" + system + ")");
+  }
+
+  /** Returns the words, with a remark where factory amplifiers often run as far over. */
+  String wordsWithCustom() {
+    return words() + (figure <= limit * COMMON ? ", a common excess in factory amplifiers" : "");
   }
 }

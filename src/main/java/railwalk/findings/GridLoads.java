@@ -105,13 +105,14 @@ final class GridLoads {
     double ohms = 0;
     for (DcStep step : there.subList(from, there.size())) {
       Element element = step.element();
+      if (element instanceof AmplifierSection || passesPlate(solved, step)) {
+        return OptionalDouble.empty();
+      }
       if (element instanceof Resistor resistor) {
         ohms += resistor.ohms();
       } else if (element instanceof Potentiometer pot) {
         boolean upper = step.from().equals(pot.a()) || step.to().equals(pot.a());
         ohms += pot.ohms() * (upper ? 1 - pot.share() : pot.share());
-      } else if (element instanceof AmplifierSection || passesPlate(solved, step)) {
-        return OptionalDouble.empty();
       }
     }
     return OptionalDouble.of(ohms);

@@ -19,7 +19,7 @@ final class LineCapacitors {
   private LineCapacitors() {}
 
   static Stream<Finding> check(Scene scene) {
-    Set<Node> line = wires(scene);
+    Set<Node> line = wallWires(scene);
     Node chassis = scene.circuit().node("chassis").orElse(scene.circuit().reference());
     if (line.isEmpty() || line.contains(chassis)) {
       return Stream.empty();
@@ -40,7 +40,7 @@ final class LineCapacitors {
   }
 
   /** Returns the nodes that metal, fuses and switches in any position join to the wall. */
-  private static Set<Node> wires(Scene scene) {
+  static Set<Node> wallWires(Scene scene) {
     Set<Node> wires = new HashSet<>();
     Deque<Node> open = new ArrayDeque<>();
     scene.circuit().elements(Winding.class).stream()

@@ -79,8 +79,9 @@ final class TubeLoads {
       return Optional.empty();
     }
     String name = solved.scene().named(section.name(), section.bottle());
-    return Optional.of(
-        code.of(solved.scene().words(), section.name(), name + verb + excess.words()));
+    String words =
+        code == FindingCode.CATHODE_CURRENT ? excess.words() : excess.wordsWithCustom();
+    return Optional.of(code.of(solved.scene().words(), section.name(), name + verb + words));
   }
 
   /**

@@ -8,7 +8,6 @@ import java.util.stream.Stream;
 import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Element;
 import railwalk.circuit.Node;
-import railwalk.circuit.Winding;
 
 /** Nodes without a DC path that no other finding tells of, the wall's own wires left out. */
 final class Unpredictable {
@@ -19,9 +18,7 @@ final class Unpredictable {
     for (AmplifierSection section : scene.circuit().elements(AmplifierSection.class)) {
       told.addAll(section.nodes());
     }
-    scene.circuit().elements(Winding.class).stream()
-        .filter(Winding::wall)
-        .forEach(wall -> told.addAll(wall.nodes()));
+    told.addAll(LineCapacitors.wallWires(scene));
     List<Node> nodes =
         scene.circuit().nodes().stream()
             .filter(node -> !scene.predictable(node) && !told.contains(node))
