@@ -79,8 +79,7 @@ final class TubeLoads {
       return Optional.empty();
     }
     String name = solved.scene().named(section.name(), section.bottle());
-    String words =
-        code == FindingCode.CATHODE_CURRENT ? excess.words() : excess.wordsWithCustom();
+    String words = code == FindingCode.CATHODE_CURRENT ? excess.words() : excess.wordsWithCustom();
     return Optional.of(code.of(solved.scene().words(), section.name(), name + verb + words));
   }
 
