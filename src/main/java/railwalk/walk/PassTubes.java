@@ -35,6 +35,7 @@ final class PassTubes {
     return branches.stream()
         .filter(branch -> branch.way() == DcBranch.Way.PLATE)
         .filter(branch -> ladder.reaches(branch.a()) && !ladder.reaches(branch.b()))
+        .filter(branch -> !grounds.common(branch.a()) && !grounds.common(branch.b()))
         .filter(branch -> filtered(branch.b()) && feedsOthers(branch.b(), ladder))
         .findFirst();
   }
