@@ -78,6 +78,13 @@ final class WalkBranch {
     return there.subList(from, there.size());
   }
 
+  /** Returns whether no meter shows a drop along some steps. */
+  boolean drawsNothing(List<DcStep> steps) {
+    double first = point.volts(steps.get(0).from());
+    double last = point.volts(steps.get(steps.size() - 1).to());
+    return Math.abs(first - last) < NO_DROP_VOLTS;
+  }
+
   /** Returns the sum along some steps, or a word on why nothing drops. */
   String sum(List<DcStep> steps) {
     Node from = steps.get(0).from();
@@ -85,7 +92,7 @@ final class WalkBranch {
     double fromVolts = point.volts(from);
     double toVolts = point.volts(to);
     List<WalkSum.Term> all = terms.of(steps);
-    if (Math.abs(fromVolts - toVolts) < NO_DROP_VOLTS) {
+    if (drawsNothing(steps)) {
       String parts = String.join(", ", steps.stream().map(s -> s.element().name()).toList());
       boolean contacts = all.isEmpty();
       return from.name()

@@ -68,9 +68,9 @@ final class WalkLadder {
     Node node = supply.node();
     List<DcStep> steps = steps(supply);
     List<WalkSum.Term> drops = terms.of(steps);
-    if (drops.isEmpty()) {
-      String contacts = new WalkBranch(point).sum(steps);
-      return withLoads ? contacts + drawn(supply) : contacts;
+    WalkBranch branch = new WalkBranch(point);
+    if (drops.isEmpty() || branch.drawsNothing(steps)) {
+      return branch.sum(steps) + (withLoads && drops.isEmpty() ? drawn(supply) : "");
     }
     WalkSum.Printed sum =
         new WalkSum(parent.name(), point.volts(parent), drops, node.name(), point.volts(node))

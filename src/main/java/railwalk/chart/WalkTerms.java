@@ -6,11 +6,14 @@ import java.util.ArrayList;
 import java.util.List;
 import railwalk.circuit.Element;
 import railwalk.circuit.Filament;
+import railwalk.circuit.Fuse;
 import railwalk.circuit.Inductor;
 import railwalk.circuit.Lamp;
 import railwalk.circuit.Node;
 import railwalk.circuit.Potentiometer;
 import railwalk.circuit.Resistor;
+import railwalk.circuit.Switch;
+import railwalk.circuit.Wire;
 import railwalk.solve.OperatingPoint;
 import railwalk.units.Quantity;
 import railwalk.walk.DcStep;
@@ -18,6 +21,9 @@ import railwalk.walk.DcStep;
 /** Turns the parts of a path into the terms of a sum. */
 final class WalkTerms {
   private static final List<String> UNITS = List.of("Ω", "kΩ", "MΩ");
+
+  /** A drop that no sum shows. */
+  private static final double NO_DROP_VOLTS = 1e-6;
 
   private final OperatingPoint point;
 
@@ -33,11 +39,15 @@ final class WalkTerms {
       double ohms = ohms(step);
       if (ohms > 0) {
         terms.add(new WalkSum.Term(value(ohms), ohms, amps(step), drop));
-      } else if (Math.abs(drop) > 1e-6) {
+      } else if (!isMetal(step.element()) && Math.abs(drop) > NO_DROP_VOLTS) {
         terms.add(new WalkSum.Term(step.element().name(), Double.NaN, amps(step), drop));
       }
     }
     return terms;
+  }
+
+  private static boolean isMetal(Element element) {
+    return element instanceof Switch || element instanceof Fuse || element instanceof Wire;
   }
 
   /** Returns the current through a step in the direction of the path. */
