@@ -99,8 +99,8 @@ final class WalkLaw {
     section.law().evaluate(at.plateVolts(), at.screenVolts(), at.gridVolts(), here);
     if (cathodeOhms * at.cathodeAmps() < FOLLOWING_VOLTS) {
       return said(
-          "Nothing follows the current: the bias sets it, and a volt more on the grid moves it by"
-              + " about "
+          "The cathode does not follow the current: the grid alone sets it, and a volt more there"
+              + " moves it by about "
               + Quantity.amps(here.plateByGridSiemens)
               + ".");
     }
