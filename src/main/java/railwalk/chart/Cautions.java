@@ -25,14 +25,17 @@ final class Cautions {
   /** Ways of the line to the chassis that the large box names. */
   private static final int MOST_SHOWN = 3;
 
-  private final ChartInput input;
+  private final List<Diagnostic> findings;
   private final Column first;
   private final Circuit circuit;
   private final Wording wording;
 
-  Cautions(ChartInput input, Wording wording) {
-    this.input = input;
-    this.first = input.first();
+  /**
+   * @param findings on the netlist as it stands, most urgent first
+   */
+  Cautions(Column first, List<Diagnostic> findings, Wording wording) {
+    this.first = first;
+    this.findings = findings;
     this.circuit = first.circuit();
     this.wording = wording;
   }
@@ -45,11 +48,9 @@ final class Cautions {
   /** Returns the large box, where a finding says that the line reaches the chassis. */
   Optional<Caution> hotChassis() {
     List<String> points =
-        Stream.concat(
-                input.diagnostics().stream(),
-                input.columns().stream().flatMap(c -> c.findings().stream()))
+        findings.stream()
             .filter(d -> d.code().equals(HOT_CHASSIS))
-            .map(Diagnostic::message)
+            .map(d -> sentence(d.message()))
             .distinct()
             .toList();
     if (points.isEmpty()) {
@@ -64,6 +65,12 @@ final class Cautions {
             "Touch nothing metal while the plug is in. Work behind an isolating transformer only, and"
                 + " measure chassis to a true {ground} before every session."));
     return Optional.of(new Caution(Caution.Weight.LARGE, "Hot chassis", all));
+  }
+
+  /** Returns a finding's message as a sentence; the title says "hot chassis" already. */
+  private static String sentence(String message) {
+    String plain = message.replaceFirst("^hot chassis: ", "");
+    return plain.substring(0, 1).toUpperCase(Locale.ROOT) + plain.substring(1) + ".";
   }
 
   /** Returns the box of cautions. */

@@ -32,7 +32,7 @@ final class ChartComposition {
         sorted(Stream.concat(input.diagnostics().stream(), first.findings().stream()));
     List<Figures> figures = figures(findings);
     PointCells cells = new PointCells(first, figures.get(0));
-    ConditionsPage conditions = new ConditionsPage(input, wording);
+    ConditionsPage conditions = new ConditionsPage(input, findings, wording);
     List<Page> pages = new ArrayList<>();
     pages.add(conditions.page());
     pages.add(new SupplyPage(first, cells, wording).page());

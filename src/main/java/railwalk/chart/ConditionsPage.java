@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
-import java.util.stream.Stream;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Line;
 import railwalk.circuit.Meter;
@@ -12,23 +11,29 @@ import railwalk.circuit.Potentiometer;
 import railwalk.circuit.Spread;
 import railwalk.circuit.State;
 import railwalk.circuit.Switch;
+import railwalk.source.Diagnostic;
 import railwalk.source.Severity;
 import railwalk.units.Quantity;
 
 /** The first page: what the figures hold for, and the cautions. */
 final class ConditionsPage {
   private final ChartInput input;
+  private final List<Diagnostic> findings;
   private final Circuit circuit;
   private final Wording wording;
 
-  ConditionsPage(ChartInput input, Wording wording) {
+  /**
+   * @param findings on the netlist as it stands, most urgent first
+   */
+  ConditionsPage(ChartInput input, List<Diagnostic> findings, Wording wording) {
     this.input = input;
+    this.findings = findings;
     this.circuit = input.first().circuit();
     this.wording = wording;
   }
 
   Page page() {
-    Cautions cautions = new Cautions(input, wording);
+    Cautions cautions = new Cautions(input.first(), findings, wording);
     List<Block> blocks = new ArrayList<>();
     cautions.hotChassis().ifPresent(blocks::add);
     blocks.add(new Heading("Conditions"));
@@ -68,7 +73,7 @@ final class ConditionsPage {
     }
     entries.add(plain(wording.say("{Tubes} in"), tubesIn()));
     entries.add(plain("Low–high", bandText(circuit.spread())));
-    entries.add(findings());
+    entries.add(findingsEntry());
     for (State state : statesShown()) {
       entries.add(
           plain("State", state.name() + ": " + new StateWords(circuit, wording).changes(state)));
@@ -76,12 +81,8 @@ final class ConditionsPage {
     return entries;
   }
 
-  private KeyFigures.Entry findings() {
-    long warnings =
-        Stream.concat(input.diagnostics().stream(), input.first().findings().stream())
-            .filter(d -> d.severity() != Severity.NOTE)
-            .distinct()
-            .count();
+  private KeyFigures.Entry findingsEntry() {
+    long warnings = findings.stream().filter(d -> d.severity() != Severity.NOTE).count();
     return new KeyFigures.Entry(
         "Findings",
         warnings == 0

@@ -6,7 +6,8 @@ import java.util.List;
  * The results of one state at full precision, in SI units; NaN where a figure is not known.
  *
  * @param conditions under which they hold
- * @param points one for each node in netlist order, except the reference
+ * @param points one for each node in netlist order, except the reference and what lies inside a
+ *     tube
  * @param tubes one for each section, tubes in V order
  * @param supplies one for each rectifier output
  * @param findings most urgent first

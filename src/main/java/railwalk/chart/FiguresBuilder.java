@@ -72,6 +72,7 @@ final class FiguresBuilder {
     }
     return circuit.nodes().stream()
         .filter(node -> !node.equals(circuit.reference()))
+        .filter(node -> !InsideBottle.holds(node, circuit))
         .map(node -> figures(node, pinsByNode.getOrDefault(node, List.of())))
         .toList();
   }

@@ -33,7 +33,7 @@ final class OtherPoints {
       double volts = column.point().volts(node);
       if (Double.isNaN(volts)) {
         undefined.add(node.name());
-      } else if (Math.abs(volts) < ZERO_VOLTS) {
+      } else if (Math.abs(volts) < ZERO_VOLTS && !cells.carriesAc(node)) {
         atZero.add(node.name());
       } else {
         live.add(node);
@@ -44,7 +44,13 @@ final class OtherPoints {
       blocks.add(table(live));
     }
     if (!atZero.isEmpty()) {
-      blocks.add(new Paragraph("At 0 V: " + String.join(", ", atZero) + "."));
+      blocks.add(
+          new Paragraph(
+              "At 0 V against "
+                  + column.circuit().reference().name()
+                  + ": "
+                  + String.join(", ", atZero)
+                  + "."));
     }
     if (!undefined.isEmpty()) {
       blocks.add(new Paragraph("Not predictable at DC: " + String.join(", ", undefined) + "."));
@@ -58,7 +64,9 @@ final class OtherPoints {
     shown.add(circuit.reference());
     column.map().supplyNodes().forEach(s -> shown.add(s.node()));
     Socket.in(circuit).forEach(s -> s.pins().forEach(p -> shown.add(p.node())));
-    return circuit.nodes().stream().filter(node -> !shown.contains(node)).toList();
+    return circuit.nodes().stream()
+        .filter(node -> !shown.contains(node) && !InsideBottle.holds(node, circuit))
+        .toList();
   }
 
   private Table table(List<Node> nodes) {

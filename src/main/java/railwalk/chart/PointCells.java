@@ -17,9 +17,11 @@ final class PointCells {
 
   private final Column column;
   private final Map<String, Figures.Point> byNode = new HashMap<>();
+  private final WindingVolts windingVolts;
 
   PointCells(Column column, Figures figures) {
     this.column = column;
+    this.windingVolts = new WindingVolts(column.circuit(), column.map());
     figures.points().forEach(point -> byNode.put(point.node(), point));
   }
 
@@ -70,7 +72,7 @@ final class PointCells {
   List<String> remarks(Node node) {
     List<String> remarks = new ArrayList<>();
     double volts = column.point().volts(node);
-    WindingVolts.at(node, column.circuit()).ifPresent(remarks::add);
+    windingVolts.at(node).ifPresent(remarks::add);
     if (Double.isNaN(volts)) {
       remarks.add("not predictable at DC");
       return remarks;
@@ -83,6 +85,11 @@ final class PointCells {
       remarks.add("resistance not given");
     }
     return remarks;
+  }
+
+  /** Returns whether the node carries AC that its DC volts don't tell of. */
+  boolean carriesAc(Node node) {
+    return windingVolts.at(node).isPresent();
   }
 
   private double meterVolts(Node node) {

@@ -124,10 +124,7 @@ record RectifierFeed(
     }
     int first = used.get(0);
     int last = used.get(used.size() - 1);
-    int tap = ends.indexOf(circuit.reference());
-    if (tap < 0 && last - first == 2) {
-      tap = first + 1;
-    }
+    int tap = WindingVolts.returnTap(winding, circuit);
     if (tap < 0) {
       int far = first != last ? last : first == 0 ? ends.size() - 1 : 0;
       return Stream.of(rms(winding, first, far) + " V rms");

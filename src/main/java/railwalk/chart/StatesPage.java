@@ -8,6 +8,7 @@ import java.util.Set;
 import java.util.stream.Stream;
 import railwalk.chart.Table.Use;
 import railwalk.circuit.Circuit;
+import railwalk.circuit.Node;
 import railwalk.circuit.State;
 import railwalk.units.Quantity;
 import railwalk.walk.SupplyNode;
@@ -17,17 +18,26 @@ final class StatesPage {
   /** States that fit beside each other on a sheet. */
   private static final int STATES_ABREAST = 2;
 
+  /** Below this a tube is cut off for all that a meter can tell. */
+  private static final double NO_AMPS = 1e-9;
+
   private static final String FIRST = "As it stands";
 
   private final ChartInput input;
   private final List<Figures> figures;
   private final Circuit whole;
+  private final List<PointCells> cellsByColumn = new ArrayList<>();
+  private final List<List<Socket>> socketsByColumn = new ArrayList<>();
   private final Wording wording;
 
   StatesPage(ChartInput input, List<Figures> figures, Wording wording) {
     this.input = input;
     this.figures = figures;
     this.whole = input.first().circuit();
+    for (int i = 0; i < input.columns().size(); i++) {
+      cellsByColumn.add(new PointCells(input.columns().get(i), figures.get(i)));
+      socketsByColumn.add(Socket.in(input.columns().get(i).circuit(), whole));
+    }
     this.wording = wording;
   }
 
@@ -137,7 +147,7 @@ final class StatesPage {
   }
 
   private List<Socket> sockets(int column) {
-    return Socket.in(input.columns().get(column).circuit(), whole);
+    return socketsByColumn.get(column);
   }
 
   private Optional<Socket> socket(int column, String tube) {
@@ -147,8 +157,8 @@ final class StatesPage {
   /** Adds the cells of one column; its first column has volts only. */
   private void addVolts(List<String> row, int index, String nodeName) {
     Column column = input.columns().get(index);
-    PointCells cells = new PointCells(column, figures.get(index));
-    var node = column.circuit().node(nodeName);
+    PointCells cells = cellsByColumn.get(index);
+    Optional<Node> node = column.circuit().node(nodeName);
     row.add(node.map(cells::volts).orElse(""));
     if (index > 0) {
       row.add(node.map(cells::band).orElse(""));
@@ -193,7 +203,7 @@ final class StatesPage {
       Optional<Figures.Tube> tube = tube(i, section);
       double amps = tube.map(t -> screen ? t.screenAmps() : t.plateAmps()).orElse(Double.NaN);
       double watts = tube.map(t -> screen ? t.screenWatts() : t.plateWatts()).orElse(Double.NaN);
-      row.add(tube.isEmpty() ? "out" : Quantity.amps(amps));
+      row.add(tube.isEmpty() ? "out" : Quantity.amps(Math.abs(amps) < NO_AMPS ? 0 : amps));
       row.add(Double.isNaN(watts) ? "" : Quantity.watts(watts));
     }
     return row;

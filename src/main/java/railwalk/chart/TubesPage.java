@@ -77,7 +77,8 @@ final class TubesPage {
     } else if (bottle.pins().isEmpty()) {
       notes.add("The pins of this type are not on file.");
     }
-    String subtitle = bottle == null ? "" : bottle.type().name() + " · " + bottle.type().summary();
+    String subtitle =
+        bottle == null ? "" : bottle.type().name() + " · " + wording.summary(bottle.type());
     return new Table.Group(socket.name(), bottle == null ? "unknown type" : subtitle, rows, notes);
   }
 

@@ -2,6 +2,7 @@ package railwalk.chart;
 
 import railwalk.circuit.Words;
 import railwalk.device.Electrode;
+import railwalk.device.TubeType;
 
 /** The chart's wording in one of the trade's two vocabularies. */
 record Wording(Words words) {
@@ -9,6 +10,11 @@ record Wording(Words words) {
   /** Returns {@code sentence} with the words in braces said in this vocabulary. */
   String say(String sentence) {
     return words.say(sentence);
+  }
+
+  /** Returns a type's summary, which data files give in American words. */
+  String summary(TubeType type) {
+    return say(type.summary().replaceAll("\\b(tubes?|plates?)\\b", "{$1}"));
   }
 
   /** Returns the name of an electrode. */

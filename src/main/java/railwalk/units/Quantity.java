@@ -72,7 +72,7 @@ public final class Quantity {
 
   /** Returns a power in watts without prefix, to be held against a rating: {@code 0.123 W}. */
   public static String wattsUnscaled(double watts) {
-    return Double.isNaN(watts) ? UNKNOWN : signed(digits(watts, 3, 3)) + " W";
+    return Double.isNaN(watts) ? UNKNOWN : signed(trim(new BigDecimal(digits(watts, 3, 3)))) + " W";
   }
 
   /** Returns a share in whole per cent: {@code 62 %}. */
