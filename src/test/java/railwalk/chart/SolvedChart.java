@@ -109,7 +109,7 @@ final class SolvedChart {
       texts.add(table.title());
       table.columns().forEach(column -> texts.add(column.head()));
       for (Table.Group group : table.groups()) {
-        texts.add(group.title());
+        texts.add(group.title() + " " + group.subtitle());
         for (Table.Row row : group.rows()) {
           texts.add(String.join(" | ", row.cells()) + " | " + row.remark());
         }
