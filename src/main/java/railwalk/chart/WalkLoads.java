@@ -18,7 +18,7 @@ import railwalk.walk.TubeElectrode;
 /** Where the current of a node goes, in words: "5.1 mA: V3 screen 3.0, b3 2.1". */
 final class WalkLoads {
   /** Currents below this share of the whole are not worth a word. */
-  private static final double SMALLEST_SHARE = 1e-3;
+  private static final double SMALLEST_SHARE = 2e-3;
 
   /** A part that leads to electrodes is named after them up to this share of other current. */
   private static final double OTHER_SHARE = 0.25;
@@ -26,6 +26,9 @@ final class WalkLoads {
   private final OperatingPoint point;
   private final Wording wording;
   private final WalkTerms terms;
+
+  /** The smallest share prints as this many units of the last place at least. */
+  private static final double LEAST_PLACES = 0.95;
 
   /** One receiver and its current. */
   record Share(String name, double amps) {}
@@ -119,18 +122,28 @@ final class WalkLoads {
     List<Share> notable =
         shares.stream()
             .filter(share -> Math.abs(share.amps()) > Math.abs(whole.amps()) * SMALLEST_SHARE)
-            .filter(share -> Math.abs(share.amps()) >= whole.place() / 2)
             .toList();
     if (notable.isEmpty()) {
       return whole.printed() == 0 ? "no current" : whole.text();
     }
+    WalkAmps total = fineEnough(whole, notable);
     double direction = notable.stream().mapToDouble(Share::amps).sum() < 0 ? -1 : 1;
-    List<Double> units = apportioned(whole, notable, direction);
+    List<Double> units = apportioned(total, notable, direction);
     List<String> words = new ArrayList<>();
     for (int k = 0; k < notable.size(); k++) {
-      words.add(notable.get(k).name() + " " + whole.like(units.get(k) * whole.place()).number());
+      words.add(notable.get(k).name() + " " + total.like(units.get(k) * total.place()).number());
     }
-    return whole.text() + ": " + String.join(", ", words);
+    return total.text() + ": " + String.join(", ", words);
+  }
+
+  /** Returns the whole with so many places that no share prints as nothing. */
+  private static WalkAmps fineEnough(WalkAmps whole, List<Share> shares) {
+    double least = shares.stream().mapToDouble(s -> Math.abs(s.amps())).min().orElse(0);
+    WalkAmps total = whole;
+    while (least < total.place() * LEAST_PLACES && total.finer(1).place() < total.place()) {
+      total = total.finer(1);
+    }
+    return total;
   }
 
   /** Returns the shares in printed places, whole numbers. */

@@ -12,6 +12,9 @@ final class WalkMeter {
   /** Below this an old meter's loading is not worth telling. */
   private static final double NOTABLE = 0.03;
 
+  /** Below this there is nothing but wire and contacts. */
+  private static final double METAL_OHMS = 1e-3;
+
   private static final Meter GOOD_NEEDLE = new Meter(Double.NaN, 20e3, Meter.USUAL_RANGES_VOLTS);
   private static final Meter OLD_NEEDLE = new Meter(Double.NaN, 1e3, Meter.USUAL_RANGES_VOLTS);
 
@@ -24,6 +27,9 @@ final class WalkMeter {
   /** Returns the sentence for one node. */
   String line(Node node) {
     double volts = point.volts(node);
+    if (point.sourceOhms(node) < METAL_OHMS) {
+      return "Meter: plain metal to the reference, any meter reads " + Quantity.volts(volts) + ".";
+    }
     String source =
         "Meter: the source is about " + Quantity.ohms(twoDigits(point.sourceOhms(node)));
     if (Quantity.plainVolts(volts).equals("0")) {

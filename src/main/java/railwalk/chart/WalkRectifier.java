@@ -40,7 +40,12 @@ final class WalkRectifier {
     List<DcStep> steps = DcPaths.to(point.map(), point.circuit(), supply.node()).there();
     double rms = windingRms(steps);
     if (rms == 0) {
-      return returnLead(supply.node());
+      return group.outputs().contains(supply.node())
+          ? rectifiersAt(group, supply.node())
+              + arrangement(group, supply.node())
+              + ": "
+              + standing(supply.node())
+          : returnLead(supply.node());
     }
     String behind = supply.droppers().stream().map(Element::name).collect(Collectors.joining(", "));
     return windings(steps)
@@ -53,9 +58,11 @@ final class WalkRectifier {
         + arrangement(group, supply.node())
         + (behind.isEmpty() ? "" : ", then " + behind)
         + ": "
-        + supply.node().name()
-        + " "
-        + Quantity.volts(point.volts(supply.node()));
+        + standing(supply.node());
+  }
+
+  private String standing(Node node) {
+    return node.name() + " " + Quantity.volts(point.volts(node));
   }
 
   /** Returns the sum that lifts the winding's return off the reference. */
@@ -67,9 +74,9 @@ final class WalkRectifier {
             .limit(1)
             .toList();
     double volts = point.volts(node);
-    return "Return to the winding: "
+    return (volts > 0 ? "Tap of the winding: " : "Return to the winding: ")
         + (lead.isEmpty()
-            ? node.name() + " " + Quantity.volts(volts)
+            ? standing(node)
             : new WalkSum("", 0, new WalkTerms(point).of(lead), node.name(), volts)
                 .printed()
                 .text());
@@ -86,9 +93,7 @@ final class WalkRectifier {
             .filter(v -> v.nodes().contains(node))
             .findFirst();
     return source.map(v -> v.name() + ", a fixed source: ").orElse("fixed source: ")
-        + node.name()
-        + " "
-        + Quantity.volts(point.volts(node));
+        + standing(node);
   }
 
   /** Returns the volts rms of the turns that charge a reservoir, at no load on this line. */
@@ -125,6 +130,14 @@ final class WalkRectifier {
     return steps.stream()
         .map(DcStep::element)
         .filter(e -> e instanceof RectifierSection || e instanceof Diode)
+        .map(this::named)
+        .collect(Collectors.joining(", "));
+  }
+
+  private String rectifiersAt(RippleGroup group, Node output) {
+    return group.elements().stream()
+        .filter(e -> e instanceof RectifierSection || e instanceof Diode)
+        .filter(e -> e.nodes().contains(output))
         .map(this::named)
         .collect(Collectors.joining(", "));
   }

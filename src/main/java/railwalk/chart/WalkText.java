@@ -84,7 +84,7 @@ public final class WalkText {
           .supplyOf(node)
           .flatMap(point.map()::supplyNode)
           .ifPresent(s -> ladder.addDownTo(s, lines));
-      if (isAlternating(node)) {
+      if (isAlternating(node, path(target))) {
         addAlternating(node);
         return;
       }
@@ -94,11 +94,10 @@ public final class WalkText {
     lines.add(new WalkMeter(point).line(node));
   }
 
-  /** Returns whether {@code node} is on a winding, or between one and its rectifier. */
-  private boolean isAlternating(Node node) {
+  /** Returns whether a winding swings {@code node}, or what a winding drives before a rectifier. */
+  private boolean isAlternating(Node node, DcPath path) {
     return point.map().supplyOf(node).isEmpty()
-        && (point.map().groups().stream().anyMatch(group -> group.nodes().contains(node))
-            || circuit.elements(Winding.class).stream().anyMatch(w -> w.nodes().contains(node)));
+        && path.there().stream().anyMatch(step -> step.element() instanceof Winding);
   }
 
   /** Adds the alternating volts of windings that end at {@code node}. */

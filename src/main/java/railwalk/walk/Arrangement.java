@@ -8,6 +8,7 @@ import railwalk.circuit.Capacitor;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Diode;
 import railwalk.circuit.Element;
+import railwalk.circuit.Filament;
 import railwalk.circuit.Inductor;
 import railwalk.circuit.Node;
 import railwalk.circuit.RectifierSection;
@@ -38,6 +39,9 @@ final class Arrangement {
                             ? s.plates().stream().map(p -> new Path(p, s.cathode()))
                             : List.<Path>of().stream())
             .toList();
+    Set<Node> rectified = new HashSet<>();
+    paths.forEach(path -> rectified.addAll(List.of(path.anode, path.cathode)));
+    addFilaments(alternating, rectified);
     Set<Node> here = new HashSet<>(Set.of(output));
     boolean choke = false;
     for (Element e : alternating) {
@@ -46,14 +50,14 @@ final class Arrangement {
         boolean meetsRectifier =
             e.nodes().stream()
                 .filter(n -> !n.equals(output) && !n.equals(circuit.reference()))
-                .anyMatch(
-                    n -> paths.stream().anyMatch(p -> p.cathode.equals(n) || p.anode.equals(n)));
+                .anyMatch(rectified::contains);
         if (meetsRectifier) {
           here.addAll(e.nodes());
           choke |= e instanceof Inductor;
         }
       }
     }
+    addFilaments(alternating, here);
     here.remove(circuit.reference());
     List<Path> in = paths.stream().filter(p -> here.contains(p.cathode)).toList();
     List<Path> out = paths.stream().filter(p -> here.contains(p.anode)).toList();
@@ -75,5 +79,26 @@ final class Arrangement {
       kind = returned >= 1 ? "voltage doubler" : "half-wave";
     }
     return kind + (choke ? ", choke input" : "") + (negative ? ", negative" : "");
+  }
+
+  /** Adds the other ends of rectifiers' filaments to the nodes that hold one end. */
+  private static void addFilaments(List<Element> alternating, Set<Node> nodes) {
+    Set<String> rectifiers = new HashSet<>();
+    for (Element element : alternating) {
+      if (element instanceof RectifierSection section) {
+        rectifiers.add(section.bottle());
+      }
+    }
+    boolean grown = true;
+    while (grown) {
+      grown = false;
+      for (Element element : alternating) {
+        if (element instanceof Filament filament
+            && rectifiers.contains(filament.bottle())
+            && filament.nodes().stream().anyMatch(nodes::contains)) {
+          grown |= nodes.addAll(filament.nodes());
+        }
+      }
+    }
   }
 }
