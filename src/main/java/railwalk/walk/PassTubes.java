@@ -34,6 +34,7 @@ final class PassTubes {
   Optional<DcBranch> next(Ladder ladder) {
     return branches.stream()
         .filter(branch -> branch.way() == DcBranch.Way.PLATE)
+        .filter(branch -> !ladder.conductorsAt(branch.a()).contains(branch))
         .filter(branch -> ladder.reaches(branch.a()) && !ladder.reaches(branch.b()))
         .filter(branch -> !grounds.common(branch.a()) && !grounds.common(branch.b()))
         .filter(branch -> filtered(branch.b()) && feedsOthers(branch.b(), ladder))
