@@ -20,16 +20,17 @@ final class CoupledSolver {
   private static final int PATIENT_ROUNDS = 10;
 
   /**
-   * The corrections shrink quadratically: after one of this size (share of the greatest volts) what
-   * is left is far below a microvolt in a volt.
+   * Greatest error that may be left, as a share of the greatest volts. A correction leaves about
+   * its square where the sweep carried its derivatives, and itself times the last gain where
+   * derivatives of an earlier sweep served.
    */
-  private static final double SETTLED_SHARE = 2e-5;
+  private static final double SETTLED_SHARE = 2e-10;
 
   /** From corrections of this size on, periods are run at full accuracy. */
   private static final double NEAR_SHARE = 1e-2;
 
   /** After a correction this small the derivatives of the last sweep serve for the next. */
-  private static final double CHORD_SHARE = 2e-3;
+  private static final double CHORD_SHARE = 1e-4;
 
   /** … as long as each round gains this much on the one before. */
   private static final double CHORD_GAIN = 0.2;
@@ -146,7 +147,8 @@ final class CoupledSolver {
         change = Math.max(change, supplies.get(g).correct(portAmps(g), portVolts(g), share));
       }
       trace.add("supply round %d, %s: change %.3g", round + 1, near ? "fine" : "coarse", change);
-      if (near && change < SETTLED_SHARE) {
+      double left = change * (chord ? Math.min(1, change / before) : change);
+      if (near && left < SETTLED_SHARE) {
         return true;
       }
       chord = near && change < CHORD_SHARE && change < CHORD_GAIN * before;

@@ -18,8 +18,8 @@ import railwalk.device.TwoPoleCurrent;
 final class CycleSweep {
   private static final double GAMMA = 1 - 1 / Math.sqrt(2);
 
-  /** Newton's method is quadratic: a last change this small leaves an error far smaller. */
-  private static final double SETTLED_VOLTS = 1e-4;
+  /** A stage is settled when no path's current is further than this from its straight line. */
+  private static final double SETTLED_AMPS = 2e-10;
 
   private static final int MOST_ITERATIONS = 80;
 
@@ -190,29 +190,30 @@ final class CycleSweep {
         return false;
       }
       net.matrix.lu().solve(rightHandSide, unknowns);
-      if (linearise() < SETTLED_VOLTS) {
+      if (linearise() < SETTLED_AMPS) {
         return true;
       }
     }
     return false;
   }
 
-  /** Evaluates every path where it stands; returns the greatest move of one that conducts. */
+  /**
+   * Evaluates every path where it stands; returns the greatest difference between the current of
+   * its law and that of the straight line that the stage was solved with.
+   */
   private double linearise() {
-    double change = 0;
+    double difference = 0;
     for (int p = 0; p < slopes.length; p++) {
       CycleNetwork.Path path = net.paths.get(p);
       double volts = volts(unknowns, path.anode(), path.cathode());
       path.law().evaluate(volts, current);
-      boolean idle = slopes[p] <= SAME_SIEMENS && current.siemens <= SAME_SIEMENS;
-      if (!idle) {
-        change = Math.max(change, Math.abs(volts - pathVolts[p]));
-      }
+      double straight = pathAmps[p] + slopes[p] * (volts - pathVolts[p]);
+      difference = Math.max(difference, Math.abs(current.amps - straight));
       pathVolts[p] = volts;
       pathAmps[p] = current.amps;
       slopes[p] = current.siemens;
     }
-    return change;
+    return difference;
   }
 
   private boolean factorWithSlopes() {

@@ -29,7 +29,7 @@ import railwalk.circuit.Wire;
  */
 abstract class LinearStamper implements ElementVisitor<Void> {
   /** Below this a part gets a current of its own for an unknown, which zero ohms do not upset. */
-  private static final double BRANCH_OHMS = 0.5;
+  static final double BRANCH_OHMS = 0.5;
 
   /** What a closed contact or plain wire is taken to have, so that two in parallel share. */
   private static final double CONTACT_OHMS = 1e-6;

@@ -111,8 +111,11 @@ public final class Sensitivities {
           add(new SpreadPart.Ohms(r), through(r.a(), r.b(), -point.amps(r)));
         }
       } else if (element instanceof Potentiometer p) {
-        double upper = -volts(p.a(), p.wiper()) / Math.max((1 - p.share()) * p.ohms(), 0.5);
-        double lower = -volts(p.wiper(), p.b()) / Math.max(p.share() * p.ohms(), 0.5);
+        double upper =
+            -volts(p.a(), p.wiper())
+                / Math.max((1 - p.share()) * p.ohms(), LinearStamper.BRANCH_OHMS);
+        double lower =
+            -volts(p.wiper(), p.b()) / Math.max(p.share() * p.ohms(), LinearStamper.BRANCH_OHMS);
         add(
             new SpreadPart.Ohms(p),
             new Source(

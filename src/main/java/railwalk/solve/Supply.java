@@ -23,7 +23,7 @@ final class Supply {
   /** Steps a period while the states are still far off. */
   private static final int COARSE_STEPS = 24;
 
-  private static final int CHARGE_STEPS = 48;
+  private static final int CHARGE_STEPS = 24;
   private static final double CHARGE_SCALE = 1.0 / 20;
 
   final CycleNetwork net;

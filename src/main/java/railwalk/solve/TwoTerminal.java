@@ -43,7 +43,7 @@ final class TwoTerminal {
       return r.ohms();
     }
     if (part instanceof Potentiometer p) {
-      return (1 - p.share()) * p.ohms();
+      return Math.max((1 - p.share()) * p.ohms(), LinearStamper.BRANCH_OHMS);
     }
     if (part instanceof Inductor l) {
       return l.dcOhms();
