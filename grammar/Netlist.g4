@@ -75,13 +75,10 @@ COMMA
     : ','
     ;
 
+// braces in braces once, so that a long row of open ones is no work
 EXPRESSION
-    : BRACED
+    : '{' (~[{}\r\n] | '{' ~[{}\r\n]* '}')* '}'
     | '\'' ~['\r\n]* '\''
-    ;
-
-fragment BRACED
-    : '{' (~[{}\r\n] | BRACED)* '}'
     ;
 
 STRING

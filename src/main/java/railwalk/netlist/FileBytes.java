@@ -21,7 +21,7 @@ final class FileBytes {
 
   private record Mark(String start, String kind) {}
 
-  /** First bytes (as Latin-1) of files that end up on the command line by mistake. */
+  /** First bytes, read as Latin-1, of files that end up on the command line by mistake. */
   private static final List<Mark> MARKS =
       List.of(
           new Mark("%PDF", "a PDF document"),
@@ -60,20 +60,13 @@ final class FileBytes {
         .orElseGet(() -> new String(bytes, StandardCharsets.ISO_8859_1));
   }
 
-  /** Returns what kind of file this is when it is certainly no netlist. */
-  static Optional<String> foreignKind(byte[] bytes) {
-    String start =
-        new String(bytes, 0, Math.min(bytes.length, LOOKED_AT), StandardCharsets.ISO_8859_1);
+  /** Returns what kind of file this is text of when it is certainly no netlist. */
+  static Optional<String> foreignKind(String text) {
     for (Mark mark : MARKS) {
-      if (start.startsWith(mark.start())) {
+      if (text.startsWith(mark.start())) {
         return Optional.of(mark.kind());
       }
     }
-    return foreignKind(decode(bytes));
-  }
-
-  /** Returns what kind of text this is when it is certainly no netlist. */
-  static Optional<String> foreignKind(String text) {
     String start = text.substring(0, Math.min(text.length(), LOOKED_AT)).strip();
     String lower = start.toLowerCase(Locale.ROOT);
     if (MARKUP.matcher(start).lookingAt()) {

@@ -87,11 +87,12 @@ final class Includes {
       return new Outcome.Unreadable("it is far too large for a netlist");
     }
     byte[] bytes = Files.readAllBytes(real);
-    Optional<String> kind = FileBytes.foreignKind(bytes);
+    String text = FileBytes.decode(bytes);
+    Optional<String> kind = FileBytes.foreignKind(text);
     if (kind.isPresent()) {
       return new Outcome.Unreadable("it is " + kind.get());
     }
     String name = written.replace('\\', '/');
-    return new Outcome.Found(new SourceFile(SourceText.of(name, FileBytes.decode(bytes)), real));
+    return new Outcome.Found(new SourceFile(SourceText.of(name, text), real));
   }
 }

@@ -29,12 +29,7 @@ public final class NetlistReader {
     if (Files.size(file) > FileBytes.LARGEST_BYTES) {
       return refused(Problem.NOT_A_NETLIST, name, FAR_TOO_LARGE);
     }
-    byte[] bytes = Files.readAllBytes(file);
-    Optional<String> foreign = FileBytes.foreignKind(bytes);
-    if (foreign.isPresent()) {
-      return refused(Problem.NOT_A_NETLIST, name, foreign.get());
-    }
-    SourceText text = SourceText.of(name, FileBytes.decode(bytes));
+    SourceText text = SourceText.of(name, FileBytes.decode(Files.readAllBytes(file)));
     return read(new SourceFile(text, file.toRealPath()), Includes.of(file), catalogue);
   }
 
@@ -44,20 +39,21 @@ public final class NetlistReader {
       return refused(Problem.NOT_A_NETLIST, fileName, FAR_TOO_LARGE);
     }
     String plain = text.startsWith("\ufeff") ? text.substring(1) : text;
-    Optional<String> foreign = FileBytes.foreignKind(plain);
-    if (foreign.isPresent()) {
-      return refused(Problem.NOT_A_NETLIST, fileName, foreign.get());
-    }
     SourceText source = SourceText.of(fileName, plain);
     return read(new SourceFile(source, null), Includes.none(), catalogue);
   }
 
   private static NetlistResult read(SourceFile file, Includes includes, Catalogue catalogue) {
+    String name = file.text().fileName();
+    Optional<String> foreign = FileBytes.foreignKind(String.join("\n", file.text().lines()));
+    if (foreign.isPresent()) {
+      return refused(Problem.NOT_A_NETLIST, name, foreign.get());
+    }
     if (file.text().lines().stream().allMatch(String::isBlank)) {
-      return refused(Problem.EMPTY_FILE, file.text().fileName(), "");
+      return refused(Problem.EMPTY_FILE, name, "");
     }
     if (file.text().lines().stream().anyMatch(line -> line.length() > LONGEST_LINE)) {
-      return refused(Problem.NOT_A_NETLIST, file.text().fileName(), "one endless line");
+      return refused(Problem.NOT_A_NETLIST, name, "one endless line");
     }
     Report report = new Report();
     Deck deck = DeckReader.read(file, includes, report);
