@@ -32,6 +32,15 @@ record Card(Word head, List<Field> fields, @Nullable Diagnostic flaw) {
         .toList();
   }
 
+  /** Returns the line without the bare word {@code keyword}. */
+  Card without(String keyword) {
+    List<Field> kept =
+        fields.stream()
+            .filter(field -> !(field instanceof Field.Bare bare && bare.word().is(keyword)))
+            .toList();
+    return new Card(head, kept, flaw);
+  }
+
   /** Returns whether it is a dot line. */
   boolean isDot() {
     return head.text().startsWith(".");

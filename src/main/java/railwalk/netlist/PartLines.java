@@ -16,6 +16,9 @@ final class PartLines {
   private static final String UNKNOWN_TYPE = "UNKNOWN";
   private static final String DRAWS = "draws";
 
+  /** Stands before the parameters of a sub-circuit in some netlists. */
+  private static final String PARAMS = "params:";
+
   private final Draft draft;
 
   PartLines(Draft draft) {
@@ -52,14 +55,11 @@ final class PartLines {
     if (card.isDot()) {
       return;
     }
-    for (Field field : card.fields()) {
-      if (field instanceof Field.Bare bare && bare.afterComma()) {
-        draft.report().add(Problem.COMMA_BETWEEN_WORDS, bare.word().span(), bare.word().text());
-        return;
-      }
-    }
     String name = card.head().text();
     char letter = name.isEmpty() ? ' ' : Character.toUpperCase(name.charAt(0));
+    if (misshapen(card, letter)) {
+      return;
+    }
     if (letter == 'X') {
       xLine(card, frame);
       return;
@@ -88,6 +88,24 @@ final class PartLines {
       case 'H' -> SourceParts.controlledSource(part, ControlledSource.Kind.VOLTS_BY_AMPS);
       default -> unknownPart(card, letter);
     }
+  }
+
+  /** Reports a comma between words, or parentheses in a node's name. */
+  private boolean misshapen(Card card, char letter) {
+    boolean lists = "EFGH".indexOf(letter) >= 0;
+    int nodes = letter == 'X' ? card.fields().size() : 2;
+    for (int i = 0; i < card.fields().size(); i++) {
+      Field field = card.fields().get(i);
+      if (field instanceof Field.Bare bare && bare.afterComma()) {
+        draft.report().add(Problem.COMMA_BETWEEN_WORDS, bare.word().span(), bare.word().text());
+        return true;
+      }
+      if (field instanceof Field.Call call && i < nodes && !lists) {
+        draft.report().add(Problem.BAD_NODE_NAME, call.name().span(), call.name().text() + "()");
+        return true;
+      }
+    }
+    return false;
   }
 
   private void unknownPart(Card card, char letter) {
@@ -136,7 +154,8 @@ final class PartLines {
     return -1;
   }
 
-  private void xLine(Card card, Frame frame) {
+  private void xLine(Card written, Frame frame) {
+    Card card = written.without(PARAMS);
     if (wordsBeforeDraws(card).size() == 1) {
       keyed(card, frame);
       return;

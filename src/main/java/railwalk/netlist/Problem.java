@@ -311,6 +311,7 @@ enum Problem {
   SPREAD_LIMIT(ERROR, "%1$s is no limit", "per cent are wanted: 10%%"),
   WORDS_UNKNOWN(ERROR, "there are no %1$s words", "british or american"),
   STATE_EMPTY(WARNING, "state %1$s changes nothing", "S1=open V3=out V5=GZ34 P1=0.2 line=108"),
+  STATE_LINE(ERROR, "a state sets other line volts, but the netlist states none", ".line 120 60"),
   STATE_OF_PART(
       ERROR, "a state cannot set %1$s", "switches, tubes, controls and the line can be set"),
   STATE_SOCKET(ERROR, "%1$s (%2$s) does not go into the socket of %3$s (%4$s)", "");

@@ -78,7 +78,9 @@ final class StateReader {
     Word value = option.value();
     if (key.is("line") || key.is("mains")) {
       double volts = new PartCard(card, frame, draft).readPositive(value, Measure.VOLTAGE);
-      if (volts == 0) {
+      if (!draft.line().stated()) {
+        draft.report().add(Problem.STATE_LINE, key.span());
+      } else if (volts == 0) {
         draft.report().add(Problem.LINE_RANGE, value.span(), value.text(), "volts");
       }
       return new StateChange.LineVolts(volts);

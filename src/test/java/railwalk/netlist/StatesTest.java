@@ -107,6 +107,7 @@ class StatesTest {
   void aStateNamesWhatThereIs() {
     NetlistResult result =
         read(
+            ".line 120 60",
             "XS1 a 0 SWITCH closed",
             "R1 a 0 1k",
             "XV1 5Y3GT 4=a 6=a 8=0",

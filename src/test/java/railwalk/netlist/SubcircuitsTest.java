@@ -22,7 +22,7 @@ class SubcircuitsTest {
             "R2 mid out {2*r}",
             "C1 mid 0 10u",
             ".ends filter",
-            "XA b c filter r=10k",
+            "XA b c filter PARAMS: r=10k",
             "XB c d filter",
             "R1 d gnd 1k");
     assertThat(part(circuit, "XA.R1", Resistor.class).ohms()).isEqualTo(10e3);
@@ -98,5 +98,38 @@ class SubcircuitsTest {
     NetlistResult result =
         read(".subckt odd a b", "R1 a b 1OOk", ".ends", "X1 a 0 odd", "X2 a 0 odd");
     assertThat(codes(result)).containsOnlyOnce("letter-for-digit");
+  }
+
+  /** A deck as simulators write them: models by behaviour, analysis lines, a library not here. */
+  @Test
+  void aDeckSomeoneAlreadyHasJustLoads() {
+    NetlistResult result =
+        read(
+            "XU1 N002 N003 N004 12AX7",
+            "XU2 N006 N002 N007 12AX7",
+            "R1 N001 N002 100K",
+            "R2 N004 0 1.5K",
+            "R3 N003 0 1Meg",
+            "R4 N001 N006 100K",
+            "R5 N007 0 1.5K",
+            "C1 N003 N005 .022µ",
+            "V1 N001 0 300",
+            "V2 N005 0 SINE(0 1 1k) AC 1",
+            ".SUBCKT 12AX7 1 2 3 ; plate grid cathode",
+            "+ PARAMS: MU=100 EX=1.4 KG1=1060 KP=600 KVB=300 RGI=2000",
+            "E1 7 0 VALUE={V(1,3)/KP*LOG(1+EXP(KP*(1/MU+V(2,3)/SQRT(KVB+V(1,3)*V(1,3)))))}",
+            "G1 1 3 VALUE={(PWR(V(7),EX)+PWRS(V(7),EX))/KG1}",
+            "D3 5 3 DX",
+            ".MODEL DX D(IS=1N RS=1 CJO=10PF TT=1N)",
+            ".ENDS 12AX7",
+            ".tran 0 100m 0 1u",
+            ".lib C:\\models\\tubes.lib",
+            ".options plotwinsize=0",
+            ".end");
+    Circuit circuit = result.circuit().orElseThrow();
+    assertThat(circuit.bottles()).hasSize(2);
+    assertThat(names(circuit.element("U2A").orElseThrow().nodes()))
+        .containsExactly("N006", "N002", "N007");
+    assertThat(result.diagnostics()).noneMatch(d -> d.isError());
   }
 }
