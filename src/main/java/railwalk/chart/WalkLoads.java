@@ -136,14 +136,19 @@ final class WalkLoads {
     return total.text() + ": " + String.join(", ", words);
   }
 
-  /** Returns the whole with so many places that no share prints as nothing. */
+  /**
+   * Returns the whole with so many places that no share prints as nothing, and with one more where
+   * the shares, each rounded by itself, do not add up.
+   */
   private static WalkAmps fineEnough(WalkAmps whole, List<Share> shares) {
     double least = shares.stream().mapToDouble(s -> Math.abs(s.amps())).min().orElse(0);
     WalkAmps total = whole;
     while (least < total.place() * LEAST_PLACES && total.finer(1).place() < total.place()) {
       total = total.finer(1);
     }
-    return total;
+    double place = total.place();
+    double sum = Math.abs(shares.stream().mapToDouble(s -> Math.rint(s.amps() / place)).sum());
+    return sum == Math.rint(Math.abs(whole.amps()) / place) ? total : total.finer(1);
   }
 
   /** Returns the shares in printed places, whole numbers. */
