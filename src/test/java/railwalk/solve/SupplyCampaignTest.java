@@ -1,0 +1,160 @@
+package railwalk.solve;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.Map;
+import java.util.Random;
+import java.util.TreeMap;
+import org.junit.jupiter.api.Tag;
+import org.junit.jupiter.api.Test;
+import railwalk.circuit.Circuit;
+import railwalk.circuit.CircuitBuilder;
+import railwalk.walk.Walk;
+
+/**
+ * Seeded random supplies of twelve arrangements, values over decades and loads from none to
+ * overload: all must settle, whatever they look like. A short run goes with every build, the long
+ * one with the {@code slow} profile.
+ */
+class SupplyCampaignTest {
+  private static final String[] ARRANGEMENTS = {
+    "half-wave",
+    "centre tap",
+    "bridge",
+    "full-wave doubler",
+    "half-wave doubler",
+    "choke input",
+    "back bias",
+    "two polarities",
+    "bias off a tap",
+    "bias through a capacitor",
+    "tube centre tap",
+    "hybrid bridge"
+  };
+
+  @Test
+  void shortRunSettles() {
+    run(120);
+  }
+
+  @Test
+  @Tag("slow")
+  void longRunSettles() {
+    run(1800);
+  }
+
+  private static void run(int count) {
+    Map<String, int[]> settledAndAll = new TreeMap<>();
+    for (int seed = 0; seed < count; seed++) {
+      String arrangement = ARRANGEMENTS[seed % ARRANGEMENTS.length];
+      Circuit circuit = supply(arrangement, new Random(seed));
+      CoupledSolver solver = new CoupledSolver(circuit, Walk.of(circuit), false);
+      int[] tally = settledAndAll.computeIfAbsent(arrangement, key -> new int[2]);
+      tally[0] += solver.startCold() && solver.settle() ? 1 : 0;
+      tally[1]++;
+    }
+    settledAndAll.forEach(
+        (name, tally) -> System.out.printf("%-26s %d of %d settle%n", name, tally[0], tally[1]));
+    assertThat(settledAndAll.values()).allSatisfy(t -> assertThat(t[0]).isEqualTo(t[1]));
+  }
+
+  private static double between(Random random, double low, double high) {
+    return low * Math.pow(high / low, random.nextDouble());
+  }
+
+  private static Circuit supply(String arrangement, Random random) {
+    double rms = between(random, 5, 500);
+    double ohms = rms * (0.01 + 0.5 * random.nextDouble());
+    double farads = between(random, 1e-6, 300e-6);
+    double load = rms * rms / between(random, 1e-3, 100);
+    CircuitBuilder b = new CircuitBuilder().line(120, 60);
+    double[] halves = {rms, rms};
+    switch (arrangement) {
+      case "half-wave" -> b.winding("VH", "h1", "0", rms, ohms).diode("D1", "h1", "b1");
+      case "centre tap" ->
+          b.winding("VH", halves, ohms, "h1", "0", "h2")
+              .diode("D1", "h1", "b1")
+              .diode("D2", "h2", "b1");
+      case "bridge" ->
+          b.winding("VH", "h1", "h2", rms, ohms)
+              .diode("D1", "h1", "b1")
+              .diode("D2", "h2", "b1")
+              .diode("D3", "0", "h1")
+              .diode("D4", "0", "h2");
+      case "full-wave doubler" ->
+          b.winding("VH", "h1", "m", rms, ohms)
+              .diode("D1", "h1", "b1")
+              .diode("D2", "0", "h1")
+              .c("CU", "b1", "m", farads)
+              .c("CL", "m", "0", farads);
+      case "half-wave doubler" ->
+          b.winding("VH", "h1", "0", rms, ohms)
+              .c("CX", "h1", "x", farads)
+              .diode("D1", "0", "x")
+              .diode("D2", "x", "b1");
+      case "choke input" ->
+          b.winding("VH", halves, ohms, "h1", "0", "h2")
+              .diode("D1", "h1", "x")
+              .diode("D2", "h2", "x")
+              .l("L1", "x", "b1", 0.5 + 10 * random.nextDouble(), ohms / 2);
+      case "back bias" ->
+          b.winding("VH", halves, ohms, "h1", "ct", "h2")
+              .rectifier(SampleAmps.type("GZ34"), "V1", "h1", "h2", "b1")
+              .c("CT", "b1", "ct", farads)
+              .r("RB", "ct", "0", 0.05 * load);
+      case "two polarities" ->
+          b.winding("VH", halves, ohms, "h1", "0", "h2")
+              .diode("D1", "h1", "b1")
+              .diode("D2", "h2", "b1")
+              .diode("D3", "n1", "h1")
+              .diode("D4", "n1", "h2")
+              .c("CN", "n1", "0", farads)
+              .r("RN", "n1", "0", load);
+      case "bias off a tap" ->
+          b.winding("VH", new double[] {0.8 * rms, 0.2 * rms, rms}, ohms, "h1", "t", "0", "h2")
+              .rectifier(SampleAmps.type("5Y3GT"), "V1", "h1", "h2", "b1")
+              .r("RT", "t", "tx", 0.3 * load)
+              .diode("D1", "n1", "tx")
+              .c("CN", "n1", "0", farads)
+              .r("RN", "n1", "0", load);
+      case "bias through a capacitor" ->
+          b.winding("VH", halves, ohms, "h1", "0", "h2")
+              .diode("D1", "h1", "b1")
+              .diode("D2", "h2", "b1")
+              .c("CB", "h1", "x", 0.1e-6)
+              .diode("D3", "x", "0")
+              .r("RX", "x", "n1", load)
+              .c("CN", "n1", "0", farads)
+              .r("RN", "n1", "0", 2 * load);
+      case "tube centre tap" ->
+          b.winding("VH", halves, ohms, "h1", "0", "h2")
+              .rectifier(SampleAmps.type("5Y3GT"), "V1", "h1", "h2", "b1");
+      default ->
+          b.winding("VH", "h1", "h2", rms, ohms)
+              .rectifier(SampleAmps.type("GZ34"), "V1", "h1", "h2", "b1")
+              .diode("D3", "0", "h1")
+              .diode("D4", "0", "h2");
+    }
+    b.c("C1", "b1", "0", farads);
+    addFilter(b, random, farads, load);
+    return b.build();
+  }
+
+  private static void addFilter(CircuitBuilder b, Random random, double farads, double load) {
+    String from = "b1";
+    int stages = random.nextInt(4);
+    for (int s = 0; s < stages; s++) {
+      String to = "b" + (s + 2);
+      if (random.nextInt(4) == 0) {
+        b.l("LF" + s, from, to, 1 + 10 * random.nextDouble(), 50);
+      } else {
+        b.r("RF" + s, from, to, load * between(random, 1e-3, 1));
+      }
+      b.c("CF" + s, to, "0", farads * random.nextDouble() + 1e-6);
+      from = to;
+    }
+    if (random.nextInt(10) > 0) {
+      b.r("RL", from, "0", load);
+    }
+  }
+}
