@@ -6,6 +6,7 @@ import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
@@ -64,6 +65,7 @@ final class FiguresBuilder {
   }
 
   private List<Figures.Point> points() {
+    Set<Node> unreachable = InsideBottle.nodes(circuit);
     Map<Node, List<String>> pinsByNode = new HashMap<>();
     for (Socket socket : Socket.in(circuit, whole)) {
       for (Socket.Pin pin : socket.pins()) {
@@ -72,7 +74,7 @@ final class FiguresBuilder {
     }
     return circuit.nodes().stream()
         .filter(node -> !node.equals(circuit.reference()))
-        .filter(node -> !InsideBottle.holds(node, circuit))
+        .filter(node -> !unreachable.contains(node))
         .map(node -> figures(node, pinsByNode.getOrDefault(node, List.of())))
         .toList();
   }

@@ -1,7 +1,10 @@
 package railwalk.chart;
 
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
 import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Element;
@@ -15,9 +18,15 @@ import railwalk.circuit.Wire;
 final class InsideBottle {
   private InsideBottle() {}
 
-  /** Returns whether {@code node} joins parts of one tube only, and none of its pins. */
-  static boolean holds(Node node, Circuit circuit) {
-    List<Element> parts = circuit.elementsByNode().getOrDefault(node, List.of());
+  /** Returns the nodes that join parts of one tube only, and none of its pins. */
+  static Set<Node> nodes(Circuit circuit) {
+    return circuit.elementsByNode().entrySet().stream()
+        .filter(entry -> isInside(entry.getKey(), entry.getValue(), circuit))
+        .map(Map.Entry::getKey)
+        .collect(Collectors.toSet());
+  }
+
+  private static boolean isInside(Node node, List<Element> parts, Circuit circuit) {
     List<String> bottles = parts.stream().flatMap(p -> bottle(p).stream()).distinct().toList();
     return bottles.size() == 1
         && parts.stream().allMatch(part -> bottle(part).isPresent())

@@ -64,9 +64,8 @@ final class OtherPoints {
     shown.add(circuit.reference());
     column.map().supplyNodes().forEach(s -> shown.add(s.node()));
     Socket.in(circuit).forEach(s -> s.pins().forEach(p -> shown.add(p.node())));
-    return circuit.nodes().stream()
-        .filter(node -> !shown.contains(node) && !InsideBottle.holds(node, circuit))
-        .toList();
+    shown.addAll(InsideBottle.nodes(circuit));
+    return circuit.nodes().stream().filter(node -> !shown.contains(node)).toList();
   }
 
   private Table table(List<Node> nodes) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import railwalk.circuit.Element;
 import railwalk.circuit.Inductor;
 import railwalk.circuit.Meter;
 import railwalk.circuit.Node;
@@ -17,10 +18,12 @@ final class PointCells {
 
   private final Column column;
   private final Map<String, Figures.Point> byNode = new HashMap<>();
+  private final Map<Node, List<Element>> partsByNode;
   private final WindingVolts windingVolts;
 
   PointCells(Column column, Figures figures) {
     this.column = column;
+    this.partsByNode = column.circuit().elementsByNode();
     this.windingVolts = new WindingVolts(column.circuit(), column.map());
     figures.points().forEach(point -> byNode.put(point.node(), point));
   }
@@ -117,7 +120,7 @@ final class PointCells {
         .map()
         .supplyNode(node)
         .map(SupplyNode::droppers)
-        .orElseGet(() -> column.circuit().elementsByNode().getOrDefault(node, List.of()))
+        .orElseGet(() -> partsByNode.getOrDefault(node, List.of()))
         .stream()
         .anyMatch(e -> e instanceof Inductor winding && Double.isNaN(winding.dcOhms()));
   }

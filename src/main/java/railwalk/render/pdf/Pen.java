@@ -31,6 +31,10 @@ final class Pen {
   /** Writes text from {@code left}; a sign that the typeface lacks becomes a box. */
   void text(String text, Ink.Face face, double size, double left, double baseline, double grey) {
     Typeface typeface = faces.of(face);
+    if (text.chars().allMatch(sign -> sign != 0xA0 && typeface.has(sign))) {
+      words(new StringBuilder(text), face, size, left, baseline, grey);
+      return;
+    }
     StringBuilder run = new StringBuilder();
     double runLeft = left;
     double x = left;

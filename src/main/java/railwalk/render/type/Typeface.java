@@ -5,6 +5,7 @@ import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.ByteBuffer;
 import java.nio.charset.StandardCharsets;
+import java.util.BitSet;
 import java.util.HashMap;
 import java.util.Map;
 
@@ -19,22 +20,26 @@ public final class Typeface {
   /** Width of the box drawn for a sign the typeface lacks, in ems. */
   public static final double MISSING_EMS = 0.6;
 
+  private static final int BASIC_PLANE = 0x10000;
+
   private final byte[] file;
-  private final double unitsPerEm;
-  private final Map<Integer, Integer> glyphs = new HashMap<>();
-  private final int[] advances;
+
+  /** Width in ems by sign; 0 for one that the typeface lacks or that has no width. */
+  private final float[] ems = new float[BASIC_PLANE];
+
+  private final BitSet signs = new BitSet(BASIC_PLANE);
 
   private Typeface(byte[] file) {
     this.file = file;
     ByteBuffer font = ByteBuffer.wrap(file);
     Map<String, Integer> tables = tables(font);
-    unitsPerEm = unsigned(font, at(tables, "head") + 18);
+    float unitsPerEm = unsigned(font, at(tables, "head") + 18);
     int count = unsigned(font, at(tables, "hhea") + 34);
-    advances = new int[count];
+    float[] advances = new float[count];
     for (int glyph = 0; glyph < count; glyph++) {
-      advances[glyph] = unsigned(font, at(tables, "hmtx") + 4 * glyph);
+      advances[glyph] = unsigned(font, at(tables, "hmtx") + 4 * glyph) / unitsPerEm;
     }
-    readGlyphs(font, at(tables, "cmap"));
+    readGlyphs(font, at(tables, "cmap"), advances);
   }
 
   /** Returns the weight for running text. */
@@ -65,19 +70,18 @@ public final class Typeface {
 
   /** Returns whether there is a sign for {@code codePoint}. */
   public boolean has(int codePoint) {
-    return glyphs.containsKey(codePoint);
+    return signs.get(codePoint);
   }
 
   /** Returns the width of {@code text} at {@code size}, a box counted for each missing sign. */
   public double width(String text, double size) {
-    return size * text.codePoints().mapToDouble(this::ems).sum();
-  }
-
-  private double ems(int codePoint) {
-    Integer glyph = glyphs.get(codePoint);
-    return glyph == null
-        ? MISSING_EMS
-        : advances[Math.min(glyph, advances.length - 1)] / unitsPerEm;
+    double sum = 0;
+    for (int i = 0; i < text.length(); ) {
+      int codePoint = text.codePointAt(i);
+      sum += has(codePoint) ? ems[codePoint] : MISSING_EMS;
+      i += Character.charCount(codePoint);
+    }
+    return size * sum;
   }
 
   private static Map<String, Integer> tables(ByteBuffer font) {
@@ -101,19 +105,19 @@ public final class Typeface {
   }
 
   /** Reads the segments of the first format 4 subtable: the signs of the basic plane. */
-  private void readGlyphs(ByteBuffer font, int cmap) {
+  private void readGlyphs(ByteBuffer font, int cmap, float[] advances) {
     int count = unsigned(font, cmap + 2);
     for (int i = 0; i < count; i++) {
       int table = cmap + font.getInt(cmap + 4 + 8 * i + 4);
       if (unsigned(font, table) == 4) {
-        readSegments(font, table);
+        readSegments(font, table, advances);
         return;
       }
     }
     throw new IllegalStateException("the font has no format 4 character map");
   }
 
-  private void readSegments(ByteBuffer font, int table) {
+  private void readSegments(ByteBuffer font, int table, float[] advances) {
     int twice = unsigned(font, table + 6);
     int ends = table + 14;
     int starts = ends + twice + 2;
@@ -131,7 +135,8 @@ public final class Typeface {
         if (range == 0 || glyph != 0) {
           int index = glyph + delta & 0xFFFF;
           if (index != 0) {
-            glyphs.put(code, index);
+            signs.set(code);
+            ems[code] = advances[Math.min(index, advances.length - 1)];
           }
         }
       }
