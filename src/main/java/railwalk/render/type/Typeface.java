@@ -25,7 +25,7 @@ public final class Typeface {
   private final byte[] file;
 
   /** Width in ems by sign; 0 for one that the typeface lacks or that has no width. */
-  private final float[] ems = new float[BASIC_PLANE];
+  private final double[] ems = new double[BASIC_PLANE];
 
   private final BitSet signs = new BitSet(BASIC_PLANE);
 
@@ -33,9 +33,9 @@ public final class Typeface {
     this.file = file;
     ByteBuffer font = ByteBuffer.wrap(file);
     Map<String, Integer> tables = tables(font);
-    float unitsPerEm = unsigned(font, at(tables, "head") + 18);
+    double unitsPerEm = unsigned(font, at(tables, "head") + 18);
     int count = unsigned(font, at(tables, "hhea") + 34);
-    float[] advances = new float[count];
+    double[] advances = new double[count];
     for (int glyph = 0; glyph < count; glyph++) {
       advances[glyph] = unsigned(font, at(tables, "hmtx") + 4 * glyph) / unitsPerEm;
     }
@@ -105,7 +105,7 @@ public final class Typeface {
   }
 
   /** Reads the segments of the first format 4 subtable: the signs of the basic plane. */
-  private void readGlyphs(ByteBuffer font, int cmap, float[] advances) {
+  private void readGlyphs(ByteBuffer font, int cmap, double[] advances) {
     int count = unsigned(font, cmap + 2);
     for (int i = 0; i < count; i++) {
       int table = cmap + font.getInt(cmap + 4 + 8 * i + 4);
@@ -117,7 +117,7 @@ public final class Typeface {
     throw new IllegalStateException("the font has no format 4 character map");
   }
 
-  private void readSegments(ByteBuffer font, int table, float[] advances) {
+  private void readSegments(ByteBuffer font, int table, double[] advances) {
     int twice = unsigned(font, table + 6);
     int ends = table + 14;
     int starts = ends + twice + 2;
