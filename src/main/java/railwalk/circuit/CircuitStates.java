@@ -30,11 +30,15 @@ final class CircuitStates {
     }
     if (change instanceof StateChange.TubeOut out) {
       return circuit.withElements(
-          circuit.elements().stream()
-              .filter(e -> !e.bottle().equalsIgnoreCase(out.bottle()))
-              .toList());
+          circuit.elements().stream().filter(e -> !isOf(e, out.bottle())).toList());
     }
     return refitted(circuit, (StateChange.TubeFitted) change);
+  }
+
+  /** Returns whether {@code element} is a piece of that tube, or the stand-in for it. */
+  private static boolean isOf(Element element, String tube) {
+    String owner = element instanceof StandIn ? element.name() : element.bottle();
+    return owner.equalsIgnoreCase(tube);
   }
 
   private static <E extends Element> Circuit replaced(

@@ -90,7 +90,7 @@ final class PartLines {
     }
   }
 
-  /** Reports a comma between words, or parentheses in a node's name. */
+  /** Reports a comma between words, or parentheses where only words may stand. */
   private boolean misshapen(Card card, char letter) {
     boolean lists = "EFGH".indexOf(letter) >= 0;
     int nodes = letter == 'X' ? card.fields().size() : 2;
@@ -100,8 +100,15 @@ final class PartLines {
         draft.report().add(Problem.COMMA_BETWEEN_WORDS, bare.word().span(), bare.word().text());
         return true;
       }
-      if (field instanceof Field.Call call && i < nodes && !lists) {
+      if (!(field instanceof Field.Call call) || lists) {
+        continue;
+      }
+      if (i < nodes) {
         draft.report().add(Problem.BAD_NODE_NAME, call.name().span(), call.name().text() + "()");
+        return true;
+      }
+      if (!Signals.isWave(call.name())) {
+        draft.report().add(Problem.STRAY_PARENTHESES, call.name().span(), call.name().text());
         return true;
       }
     }

@@ -44,6 +44,8 @@ enum Problem {
       ERROR, "this quote is never closed", "an expression stands between two ' on one line"),
   UNCLOSED_PARENTHESIS(ERROR, "this parenthesis is never closed", ""),
   STRAY_SIGN(ERROR, "%1$s has no business here", ""),
+  STRAY_PARENTHESES(
+      ERROR, "parentheses after %1$s mean nothing here", "a remark stands behind a ;"),
   UNPRINTABLE_SIGN(
       ERROR,
       "a sign that cannot be printed (%1$s)",
@@ -299,7 +301,7 @@ enum Problem {
       ERROR,
       "%1$s: types come from the catalogue alone",
       "use a type that it has, or a stand-in: UNKNOWN plate=… cathode=… draws plate=…"),
-  SETTING_TWICE(WARNING, "%1$s stands on line %2$d already", ""),
+  SETTING_TWICE(WARNING, "%1$s stands on line %2$d already", "the last one counts"),
   SETTING_EMPTY(ERROR, "%1$s: something is missing", "%2$s"),
   LINE_NOT_STATED(
       NOTE, "no .line: windings hold as written, at %1$s Hz", ".line 120 60 design=117"),

@@ -20,6 +20,12 @@ record Signals(double dc, boolean given, @Nullable Word signal, @Nullable List<W
   private static final Set<String> WAVES = Set.of("pulse", "pwl", "exp", "sffm", "am", "table");
   private static final Set<String> SINES = Set.of("sin", "sine");
 
+  /** Returns whether {@code name} is a signal's shape. */
+  static boolean isWave(Word name) {
+    String lower = name.text().toLowerCase(Locale.ROOT);
+    return WAVES.contains(lower) || SINES.contains(lower);
+  }
+
   /** Takes DC part and signals off the line. */
   static Signals take(PartCard part, Measure measure) {
     Word dcWord = part.option("dc");

@@ -13,6 +13,7 @@ import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Bottle;
 import railwalk.circuit.Element;
 import railwalk.circuit.Potentiometer;
+import railwalk.circuit.StandIn;
 import railwalk.circuit.State;
 import railwalk.circuit.StateChange;
 import railwalk.circuit.Switch;
@@ -112,6 +113,9 @@ final class StateReader {
         draft.report().add(Problem.POT_SET_RANGE, value.span(), value.text());
       }
       return new StateChange.ControlSet(pot.name(), share);
+    }
+    if (element instanceof StandIn && value.is("out")) {
+      return new StateChange.TubeOut(element.name());
     }
     if (element != null) {
       draft.report().add(Problem.STATE_OF_PART, key.span(), element.name());

@@ -7,7 +7,6 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 import railwalk.circuit.Bottle;
-import railwalk.circuit.Capacitor;
 import railwalk.circuit.ControlledSource;
 import railwalk.circuit.Coupling;
 import railwalk.circuit.Diode;
@@ -53,8 +52,8 @@ final class StructureCheck {
 
   private void acrossNothing(Element element) {
     if (element instanceof Winding winding) {
-      boolean shorted = winding.sections().stream().anyMatch(s -> s.a().equals(s.b()));
-      if (shorted) {
+      List<Node> taps = winding.nodes();
+      if (new HashSet<>(taps).size() < taps.size()) {
         report.add(Problem.WINDING_SHORTED, span(element), element.name());
       }
       return;
@@ -62,10 +61,7 @@ final class StructureCheck {
     List<Node> nodes = element.nodes();
     boolean twoPoles = element.bottle().isEmpty() && nodes.size() == 2;
     boolean checked =
-        element instanceof Resistor
-            || element instanceof Capacitor
-            || element instanceof Diode
-            || element instanceof Inductor;
+        element instanceof Resistor || element instanceof Diode || element instanceof Inductor;
     if (twoPoles && checked && nodes.get(0).equals(nodes.get(1))) {
       report.add(Problem.ACROSS_NOTHING, span(element), element.name(), nodes.get(0).name());
     }

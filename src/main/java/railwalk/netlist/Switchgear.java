@@ -4,6 +4,8 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.OptionalInt;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Fuse;
 import railwalk.circuit.GlowLamp;
@@ -30,6 +32,8 @@ final class Switchgear {
           "NE2H", new GasLaw(135, 70, 1.0e-3, 4e3, 0.3e-3, 1.9e-3),
           "NE51", new GasLaw(90, 60, 0.2e-3, 8e3, 0.1e-3, 0.3e-3),
           "NEON", new GasLaw(90, 60, 0.3e-3, 8e3, 0.1e-3, 0.6e-3));
+
+  private static final Pattern TAPERED = Pattern.compile("[ABC]?(\\d+(?:\\.\\d+)?[kKM])[ABC]?");
 
   private Switchgear() {}
 
@@ -60,7 +64,7 @@ final class Switchgear {
     if (nodes == null || value == null) {
       return;
     }
-    double ohms = part.ohms(value, "resistance");
+    double ohms = part.ohms(withoutTaper(value), "resistance");
     if (ohms == 0) {
       part.report().add(Problem.ZERO_VALUE, value.span(), part.name(), Measure.RESISTANCE.words());
     }
@@ -77,6 +81,12 @@ final class Switchgear {
         .add(
             new Potentiometer(part.name(), nodes.get(0), nodes.get(1), nodes.get(2), ohms, share),
             part.span());
+  }
+
+  /** Returns the value without the taper letter that controls are marked with: A500k, 1MA. */
+  private static Word withoutTaper(Word value) {
+    Matcher marked = TAPERED.matcher(value.text());
+    return marked.matches() ? new Word(marked.group(1), value.span(), value.form()) : value;
   }
 
   /** Returns a control's setting, 0 to 1. */

@@ -154,6 +154,9 @@ class PartsTest {
     assertThat(part(circuit, "P1", Potentiometer.class).share()).isEqualTo(0.4);
     assertThat(part(circuit, "P2", Potentiometer.class).share()).isCloseTo(0.3, within(1e-12));
     assertThat(part(circuit, "P2", Potentiometer.class).ohms()).isEqualTo(1e6);
+    Circuit marked = circuit("XP1 a w b POT 500KA set=0.5", "XP2 a w b POT B25k set=0.5");
+    assertThat(part(marked, "P1", Potentiometer.class).ohms()).isEqualTo(500e3);
+    assertThat(part(marked, "P2", Potentiometer.class).ohms()).isEqualTo(25e3);
   }
 
   private static TwoPoleLaw law(String... lines) {

@@ -52,6 +52,13 @@ class StatesTest {
     assertThat(circuit.bottle("V1")).isPresent();
   }
 
+  @Test
+  void aStandInCanBeOutToo() {
+    Circuit circuit =
+        inState("XV6 UNKNOWN plate=p cathode=k draws plate=2mA", "R1 p k 1k", ".state out V6=out");
+    assertThat(circuit.elements()).extracting(e -> e.name()).containsExactly("R1");
+  }
+
   /** 5Y3GT out, GZ34 in: its cathode is pin 8, its heater runs from 2 to 8. */
   @Test
   void anotherTypeIsFittedPinByPin() {

@@ -195,6 +195,15 @@ class TubesTest {
         .hasSize(2);
   }
 
+  /** 35W4, base 5BQ: 35 V on pins 3 and 4, of which 7.5 V between 4 and the lamp tap 6 (RCA). */
+  @Test
+  void aLampTapDividesTheHeaterUnequally() {
+    Circuit circuit = circuit("XV1 35W4 3=a 4=b 6=t 5=p 7=k", "R1 p k 1k");
+    assertThat(circuit.elements(Filament.class).stream().map(Filament::ratedVolts))
+        .containsExactly(27.5, 7.5);
+    assertThat(names(circuit.elements(Filament.class).get(1).nodes())).containsExactly("t", "b");
+  }
+
   @Test
   void aHeaterWiredAtOneEndIsNoPart() {
     assertThat(circuit("XV1 12AX7 1=p 2=g 3=k 4=x").elements(Filament.class)).isEmpty();
