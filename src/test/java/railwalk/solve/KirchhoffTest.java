@@ -90,7 +90,9 @@ class KirchhoffTest {
     }
     if (element instanceof Potentiometer pot) {
       double upper = point.amps(pot);
-      double lower = (point.volts(pot.wiper()) - point.volts(pot.b())) / (pot.share() * pot.ohms());
+      double lower =
+          (point.volts(pot.wiper()) - point.volts(pot.b()))
+              / Math.max(pot.share() * pot.ohms(), LinearStamper.BRANCH_OHMS);
       return (node.equals(pot.a()) ? upper : 0)
           + (node.equals(pot.wiper()) ? lower - upper : 0)
           - (node.equals(pot.b()) ? lower : 0);
