@@ -12,7 +12,6 @@ import railwalk.circuit.Spread;
 import railwalk.circuit.State;
 import railwalk.circuit.Switch;
 import railwalk.source.Diagnostic;
-import railwalk.source.Severity;
 import railwalk.units.Quantity;
 
 /** The first page: what the figures hold for, and the cautions. */
@@ -82,13 +81,18 @@ final class ConditionsPage {
   }
 
   private KeyFigures.Entry findingsEntry() {
-    long warnings = findings.stream().filter(d -> d.severity() != Severity.NOTE).count();
-    return new KeyFigures.Entry(
-        "Findings",
-        warnings == 0
-            ? "none"
-            : warnings + (warnings == 1 ? " warning" : " warnings") + ", listed at the end",
-        warnings > 0);
+    long here = findings.stream().filter(NotesPage::isFinding).count();
+    long inStates = new NotesPage(input, findings).findings().size() - here;
+    String counted =
+        (here == 0 ? "none as it stands" : warnings(here))
+            + (inStates == 0 ? "" : ", " + inStates + " more in its states");
+    return here + inStates == 0
+        ? plain("Findings", "none")
+        : new KeyFigures.Entry("Findings", counted + ": listed at the end", true);
+  }
+
+  private static String warnings(long count) {
+    return count + (count == 1 ? " warning" : " warnings");
   }
 
   private List<State> statesShown() {

@@ -35,19 +35,24 @@ final class NotesPage {
     return new Page("Findings and notes", blocks);
   }
 
-  private List<Remarks.Remark> findings() {
+  /** Returns whether {@code diagnostic} is a finding rather than a note of an assumption. */
+  static boolean isFinding(Diagnostic diagnostic) {
+    return diagnostic.severity() != Severity.NOTE;
+  }
+
+  /** Returns the findings of all columns, each that is said of several once. */
+  List<Remarks.Remark> findings() {
     List<Remarks.Remark> findings = new ArrayList<>();
     Set<String> said = new HashSet<>();
     for (Diagnostic diagnostic : all) {
-      if (diagnostic.severity() != Severity.NOTE) {
+      if (isFinding(diagnostic)) {
         said.add(diagnostic.code() + diagnostic.message());
         findings.add(remark(diagnostic.severity().word(), diagnostic));
       }
     }
     for (Column state : input.states()) {
       for (Diagnostic diagnostic : state.findings()) {
-        if (diagnostic.severity() != Severity.NOTE
-            && said.add(diagnostic.code() + diagnostic.message())) {
+        if (isFinding(diagnostic) && said.add(diagnostic.code() + diagnostic.message())) {
           findings.add(
               remark(diagnostic.severity().word() + " in state " + state.state(), diagnostic));
         }

@@ -3,8 +3,8 @@ package railwalk.chart;
 import java.util.List;
 
 /**
- * A part of the chart with a title of its own. On paper it starts a fresh sheet, unless it fits as
- * a whole below the one before.
+ * A part of the chart with a title of its own. On paper it starts a fresh sheet, unless the one
+ * before leaves room for it.
  */
 public record Page(String title, List<Block> blocks) {
   public Page {

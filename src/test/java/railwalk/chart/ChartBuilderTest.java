@@ -9,6 +9,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import railwalk.chart.SampleAmp.Order;
+import railwalk.source.Diagnostic;
+import railwalk.source.Severity;
 
 /** What a chart says and in which order, on amplifiers solved for real and made up by number. */
 class ChartBuilderTest {
@@ -177,6 +179,35 @@ class ChartBuilderTest {
             });
     assertThat(chart.figures().get(0).findings().get(0).code()).isEqualTo("hot-chassis");
     assertThat(SolvedChart.textOf(chart)).contains("isolating transformer", "carries AC");
+  }
+
+  /** A chart whose first page says "none" while a state has a finding would mislead. */
+  @Test
+  void theFirstPageCountsTheFindingsOfStatesToo() {
+    ChartInput sample = SampleAmp.input(Order.of(1, 1, 1));
+    Diagnostic hot = new Diagnostic(Severity.WARNING, "over-rating", "V1 runs hot", "", null);
+    Column first = sample.first();
+    Column state = sample.states().get(0);
+    Column findingState = new Column(state.state(), state.point(), state.bands(), List.of(hot));
+    Column findingFirst = new Column("", first.point(), first.bands(), List.of(hot));
+    assertThat(findingsEntry(List.of(first, state))).isEqualTo("none");
+    assertThat(findingsEntry(List.of(first, findingState)))
+        .isEqualTo("none as it stands, 1 more in its states: listed at the end");
+    assertThat(findingsEntry(List.of(findingFirst, state)))
+        .isEqualTo("1 warning: listed at the end");
+    assertThat(findingsEntry(List.of(findingFirst, findingState)))
+        .isEqualTo("1 warning: listed at the end");
+  }
+
+  private static String findingsEntry(List<Column> columns) {
+    Chart chart = new ChartBuilder().build(new ChartInput("t.cir", columns, List.of()));
+    return chart.pages().get(0).blocks().stream()
+        .filter(KeyFigures.class::isInstance)
+        .flatMap(block -> ((KeyFigures) block).entries().stream())
+        .filter(entry -> entry.label().equals("Findings"))
+        .map(KeyFigures.Entry::text)
+        .findFirst()
+        .orElseThrow();
   }
 
   @Test

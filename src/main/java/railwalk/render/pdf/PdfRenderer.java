@@ -9,6 +9,9 @@ import railwalk.chart.Page;
 
 /** A chart as a PDF for paper. The same chart gives the same bytes. Stateless. */
 public final class PdfRenderer {
+  /** From this share of a sheet on, a page starts below the one before. */
+  private static final double SHARE_OF_A_SHEET_WORTH_FILLING = 0.5;
+
   private static final String PRODUCT = "Railwalk";
 
   /** Returns the document. */
@@ -65,7 +68,7 @@ public final class PdfRenderer {
     return blocks;
   }
 
-  /** Makes room for a page: below the one before where all of it fits there. */
+  /** Makes room for a page: below the one before where all of it fits, or much of it. */
   private static void startPage(List<List<Slab>> blocks, Sheets sheets) {
     double height = Style.PAGE_GAP;
     for (List<Slab> slabs : blocks) {
@@ -75,7 +78,8 @@ public final class PdfRenderer {
         height += Slab.height(slab.lead()) + Slab.height(slab.slices());
       }
     }
-    if (height > sheets.room()) {
+    boolean muchRoom = sheets.room() > SHARE_OF_A_SHEET_WORTH_FILLING * sheets.bodyHeight();
+    if (height > sheets.room() && !muchRoom) {
       sheets.startFreshSheet();
     } else {
       sheets.space(Style.PAGE_GAP - Style.BLOCK_GAP);
