@@ -86,7 +86,7 @@ final class WalkLadder {
 
   /** Returns the steps from a supply node's parent to it. */
   private List<DcStep> steps(SupplyNode supply) {
-    DcPath path = DcPaths.to(point.map(), point.circuit(), supply.node());
+    DcPath path = new DcPaths(point.map(), point.circuit()).to(supply.node());
     List<DcStep> there = path.there();
     int from = 0;
     for (int k = 0; k < there.size(); k++) {

@@ -135,7 +135,7 @@ final class WalkLaw {
 
   /** Returns the section that this one's cathode current goes on through, if there is one. */
   private Optional<AmplifierSection> tubeBelow() {
-    DcPath path = DcPaths.to(point.map(), circuit, section, Electrode.CATHODE);
+    DcPath path = new DcPaths(point.map(), circuit).to(section, Electrode.CATHODE);
     return path.back().stream()
         .takeWhile(step -> !step.from().equals(circuit.reference()))
         .map(DcStep::element)
@@ -162,7 +162,7 @@ final class WalkLaw {
    * where its leak hangs on the cathode circuit, by what the resistors below that tap gain.
    */
   private double gridRise(double moreAmps) {
-    List<DcStep> leak = DcPaths.to(point.map(), circuit, section, Electrode.GRID).there();
+    List<DcStep> leak = new DcPaths(point.map(), circuit).to(section, Electrode.GRID).there();
     double ohmsBelow = 0;
     for (DcStep step : cathodeSteps()) {
       if (leak.stream().anyMatch(other -> other.from().equals(step.from()))) {
@@ -178,7 +178,7 @@ final class WalkLaw {
 
   /** Returns the steps from the cathode to the reference, or to a supply or tube below it. */
   private List<DcStep> cathodeSteps() {
-    DcPath path = DcPaths.to(point.map(), circuit, section, Electrode.CATHODE);
+    DcPath path = new DcPaths(point.map(), circuit).to(section, Electrode.CATHODE);
     return path.back().stream()
         .takeWhile(
             step ->
@@ -190,7 +190,7 @@ final class WalkLaw {
 
   /** Returns the resistance that a plate's or screen's current passes from its supply. */
   private double loadOhms(Electrode electrode) {
-    DcPath path = DcPaths.to(point.map(), circuit, section, electrode);
+    DcPath path = new DcPaths(point.map(), circuit).to(section, electrode);
     return WalkBranch.afterSupply(path).stream()
         .mapToDouble(step -> known(WalkTerms.ohms(step)))
         .sum();

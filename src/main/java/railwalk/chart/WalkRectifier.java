@@ -37,7 +37,7 @@ final class WalkRectifier {
       return source(supply.node());
     }
     RippleGroup group = point.map().groups().get(supply.group());
-    List<DcStep> steps = DcPaths.to(point.map(), point.circuit(), supply.node()).there();
+    List<DcStep> steps = new DcPaths(point.map(), point.circuit()).to(supply.node()).there();
     double rms = windingRms(steps);
     if (rms == 0) {
       return group.outputs().contains(supply.node())
@@ -153,7 +153,7 @@ final class WalkRectifier {
   /** Adds what an output's volts and its load have to do with each other. */
   void explain(SupplyNode supply, WalkLines lines) {
     Optional<SupplyPoint> output = WalkLadder.output(point, supply.node());
-    List<DcStep> steps = DcPaths.to(point.map(), point.circuit(), supply.node()).there();
+    List<DcStep> steps = new DcPaths(point.map(), point.circuit()).to(supply.node()).there();
     double volts = point.volts(supply.node());
     double sign = Math.signum(volts);
     double peak = windingRms(steps) * Math.sqrt(2) * sign;

@@ -66,7 +66,7 @@ public final class WalkText {
     Optional<SupplyNode> supply = point.map().supplyNode(node);
     boolean byName = target.name().equalsIgnoreCase(node.name());
     if (supply.isPresent() && byName) {
-      lines.add("Way: " + way(DcPaths.to(point.map(), circuit, node)));
+      lines.add("Way: " + way(new DcPaths(point.map(), circuit).to(node)));
       lines.gap();
       ladder.addDownTo(supply.get(), lines);
       addSupply(supply.get());
@@ -127,8 +127,8 @@ public final class WalkText {
 
   private DcPath path(WalkTarget target) {
     return target.section() != null && target.electrode() != null
-        ? DcPaths.to(point.map(), circuit, target.section(), target.electrode())
-        : DcPaths.to(point.map(), circuit, target.node());
+        ? new DcPaths(point.map(), circuit).to(target.section(), target.electrode())
+        : new DcPaths(point.map(), circuit).to(target.node());
   }
 
   private String heading(WalkTarget target) {

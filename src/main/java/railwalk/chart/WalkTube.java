@@ -50,7 +50,7 @@ final class WalkTube {
               section.name() + " passes no current: its {plate} or cathode leads nowhere."));
       return;
     }
-    DcPath path = DcPaths.to(point.map(), circuit, section, electrode);
+    DcPath path = new DcPaths(point.map(), circuit).to(section, electrode);
     supplyOf(path).ifPresent(supply -> ladder.addDownTo(supply, lines));
     switch (electrode) {
       case PLATE -> {
@@ -124,7 +124,7 @@ final class WalkTube {
 
   /** Returns the steps up to the cathode from the reference, or from a supply below it. */
   private List<DcStep> cathodeSteps() {
-    DcPath path = DcPaths.to(point.map(), circuit, section, Electrode.CATHODE);
+    DcPath path = new DcPaths(point.map(), circuit).to(section, Electrode.CATHODE);
     return branch.upFrom(path.back());
   }
 
@@ -164,7 +164,7 @@ final class WalkTube {
   }
 
   private void addGrid(WalkLines lines) {
-    DcPath path = DcPaths.to(point.map(), circuit, section, Electrode.GRID);
+    DcPath path = new DcPaths(point.map(), circuit).to(section, Electrode.GRID);
     List<DcStep> steps = WalkBranch.afterSupply(path);
     if (!steps.isEmpty()
         && steps.stream().noneMatch(step -> step.element() instanceof AmplifierSection)) {
@@ -204,7 +204,7 @@ final class WalkTube {
     if (screen == null || screen.equals(section.plate())) {
       return;
     }
-    DcPath path = DcPaths.to(point.map(), circuit, section, Electrode.SCREEN);
+    DcPath path = new DcPaths(point.map(), circuit).to(section, Electrode.SCREEN);
     List<DcStep> steps = WalkBranch.afterSupply(path);
     lines.add(
         steps.isEmpty()

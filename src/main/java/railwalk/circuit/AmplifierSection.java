@@ -37,6 +37,11 @@ public record AmplifierSection(
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** Returns the section's law. */
   public AmplifierLaw law() {
     return (AmplifierLaw) type.law();

@@ -27,4 +27,9 @@ public record Capacitor(
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

@@ -31,6 +31,11 @@ public record ControlledSource(
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** What controls what. */
   public enum Kind {
     /** E: volts by volts. */

@@ -13,4 +13,9 @@ public record Coupling(String name, String first, String second, double factor) 
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

@@ -13,4 +13,9 @@ public record CurrentSource(String name, Node a, Node b, double amps) implements
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

@@ -19,4 +19,9 @@ public record Diode(String name, Node anode, Node cathode, String typeName, TwoP
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

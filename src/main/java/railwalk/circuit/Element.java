@@ -5,6 +5,9 @@ import java.util.List;
 /**
  * A part of the amplifier. Volts of a two-terminal part are those of {@code a} against {@code b},
  * its current flows from a through the part to b.
+ *
+ * <p>Parts are keys wherever figures are kept, and no two parts of a circuit share a name: the hash
+ * of a part is the hash of its name.
  */
 public sealed interface Element
     permits Resistor,

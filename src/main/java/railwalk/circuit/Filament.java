@@ -23,6 +23,11 @@ public record Filament(
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** Returns the hot resistance. */
   public double hotOhms() {
     return ratedVolts / ratedAmps;

@@ -17,4 +17,9 @@ public record Fuse(String name, Node a, Node b, double ratedAmps) implements Ele
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

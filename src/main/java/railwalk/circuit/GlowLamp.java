@@ -15,4 +15,9 @@ public record GlowLamp(String name, Node a, Node b, String typeName, GasLaw law)
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

@@ -19,4 +19,9 @@ public record Inductor(String name, Node a, Node b, double henries, double dcOhm
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

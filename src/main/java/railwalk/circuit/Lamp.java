@@ -14,4 +14,9 @@ public record Lamp(String name, Node a, Node b, double ratedVolts, double ratedA
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

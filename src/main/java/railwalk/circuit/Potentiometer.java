@@ -20,6 +20,11 @@ public record Potentiometer(String name, Node a, Node wiper, Node b, double ohms
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** Returns the control set elsewhere. */
   public Potentiometer setTo(double changedShare) {
     return new Potentiometer(name, a, wiper, b, ohms, changedShare);

@@ -24,6 +24,11 @@ public record RectifierSection(
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** Keeps a copy of the plates. */
   public RectifierSection {
     plates = List.copyOf(plates);

@@ -18,6 +18,11 @@ public record RegulatorSection(
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** Returns the section's law. */
   public GasLaw law() {
     return (GasLaw) type.law();

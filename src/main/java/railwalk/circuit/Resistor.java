@@ -22,6 +22,11 @@ public record Resistor(
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** Returns whether the value is to be solved from readings. */
   public boolean unknown() {
     return Double.isNaN(ohms);

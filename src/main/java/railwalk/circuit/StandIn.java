@@ -24,6 +24,11 @@ public record StandIn(String name, Map<Electrode, Node> electrodes, Map<Electrod
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** Keeps copies in the given order. */
   public StandIn {
     electrodes = Collections.unmodifiableMap(new LinkedHashMap<>(electrodes));

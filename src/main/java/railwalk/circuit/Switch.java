@@ -20,6 +20,11 @@ public record Switch(String name, Node common, List<Node> poles, int position) i
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /** Keeps a copy of the poles. */
   public Switch {
     poles = List.copyOf(poles);

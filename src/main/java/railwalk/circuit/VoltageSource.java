@@ -14,4 +14,9 @@ public record VoltageSource(String name, Node a, Node b, double volts, double se
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

@@ -29,6 +29,11 @@ public record Winding(
     return visitor.visit(this);
   }
 
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
+
   /**
    * The turns between two neighbouring ends or taps.
    *

@@ -18,4 +18,9 @@ public record Wire(String name, Node a, Node b, String bottle) implements Elemen
   public <R> R accept(ElementVisitor<R> visitor) {
     return visitor.visit(this);
   }
+
+  @Override
+  public int hashCode() {
+    return name.hashCode();
+  }
 }

@@ -7,6 +7,7 @@ import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Circuit;
 import railwalk.solve.OperatingPoint;
+import railwalk.walk.DcPaths;
 import railwalk.walk.SupplyMap;
 
 /** The door: circuit, walk and operating point in, findings out. */
@@ -37,7 +38,8 @@ public final class Findings {
    * @param point null when there is none: then only what the wiring shows is told
    */
   public static List<Finding> of(Circuit circuit, SupplyMap map, @Nullable OperatingPoint point) {
-    Scene scene = new Scene(circuit, map, point, circuit.elementsByNode());
+    Scene scene =
+        new Scene(circuit, map, point, circuit.elementsByNode(), new DcPaths(map, circuit));
     Stream<Finding> wiring = WIRING.stream().flatMap(check -> check.apply(scene));
     Stream<Finding> loads =
         point == null

@@ -14,7 +14,6 @@ import railwalk.device.Ratings;
 import railwalk.solve.SectionPoint;
 import railwalk.units.Quantity;
 import railwalk.walk.DcPath;
-import railwalk.walk.DcPaths;
 import railwalk.walk.DcStep;
 
 /** Grids that stand positive, and grid circuits of more ohms than the sheet allows. */
@@ -78,8 +77,7 @@ final class GridLoads {
 
   /** Returns whether nothing but a sense resistor lets the cathode follow its own current. */
   private static boolean fixedBias(Solved solved, AmplifierSection section) {
-    DcPath path =
-        DcPaths.to(solved.scene().map(), solved.scene().circuit(), section, Electrode.CATHODE);
+    DcPath path = solved.scene().paths().to(section, Electrode.CATHODE);
     Node reference = solved.scene().circuit().reference();
     double ohms = 0;
     for (DcStep step : path.back()) {
@@ -93,8 +91,7 @@ final class GridLoads {
 
   /** Returns the ohms from the grid to what sets its volts; none when a tube does. */
   private static OptionalDouble leakOhms(Solved solved, AmplifierSection section) {
-    DcPath path =
-        DcPaths.to(solved.scene().map(), solved.scene().circuit(), section, Electrode.GRID);
+    DcPath path = solved.scene().paths().to(section, Electrode.GRID);
     List<DcStep> there = path.there();
     int from = 0;
     for (int k = 0; k < there.size(); k++) {

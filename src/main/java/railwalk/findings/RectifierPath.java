@@ -9,7 +9,6 @@ import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.circuit.RectifierSection;
 import railwalk.walk.DcPath;
-import railwalk.walk.DcPaths;
 import railwalk.walk.RippleGroup;
 
 /**
@@ -43,7 +42,7 @@ record RectifierPath(Element rectifier, Node plate, Node output) {
   /** Returns the swing seen from where the current of a group's first output comes home. */
   static Swing swing(Scene scene, RippleGroup group) {
     for (Node output : group.outputs()) {
-      DcPath path = DcPaths.to(scene.map(), scene.circuit(), output);
+      DcPath path = scene.paths().to(output);
       if (!path.there().isEmpty()) {
         Node home = path.there().get(0).from();
         return Swing.from(scene.circuit(), scene.elementsByNode(), home);

@@ -13,7 +13,6 @@ import railwalk.circuit.Fuse;
 import railwalk.circuit.Node;
 import railwalk.circuit.Switch;
 import railwalk.circuit.Wire;
-import railwalk.walk.DcPaths;
 import railwalk.walk.DcStep;
 
 /**
@@ -52,7 +51,7 @@ record Reservoir(Set<Node> nodes, List<Capacitor> capacitors) {
    */
   private static List<Capacitor> atFoot(
       Scene scene, Node output, Set<Node> nodes, List<Capacitor> capacitors) {
-    List<DcStep> there = DcPaths.to(scene.map(), scene.circuit(), output).there();
+    List<DcStep> there = scene.paths().to(output).there();
     if (there.isEmpty()) {
       return capacitors;
     }

@@ -10,6 +10,7 @@ import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.circuit.Words;
 import railwalk.solve.OperatingPoint;
+import railwalk.walk.DcPaths;
 import railwalk.walk.SupplyMap;
 
 /**
@@ -21,7 +22,8 @@ record Scene(
     Circuit circuit,
     SupplyMap map,
     @Nullable OperatingPoint point,
-    Map<Node, List<Element>> elementsByNode) {
+    Map<Node, List<Element>> elementsByNode,
+    DcPaths paths) {
 
   Words words() {
     return circuit.words();

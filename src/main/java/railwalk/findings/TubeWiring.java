@@ -7,13 +7,11 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
 import railwalk.circuit.AmplifierSection;
-import railwalk.circuit.Circuit;
 import railwalk.circuit.Inductor;
 import railwalk.circuit.Node;
 import railwalk.device.Electrode;
 import railwalk.units.Quantity;
 import railwalk.walk.DcPath;
-import railwalk.walk.DcPaths;
 import railwalk.walk.DcStep;
 
 /** Amplifying tubes with an electrode that leads nowhere, or on a node meant for another. */
@@ -143,8 +141,7 @@ final class TubeWiring {
   /** Returns whether a coil stands between the electrode and its supply node. */
   private static boolean throughWinding(
       Scene scene, AmplifierSection section, Electrode electrode) {
-    Circuit circuit = scene.circuit();
-    DcPath path = DcPaths.to(scene.map(), circuit, section, electrode);
+    DcPath path = scene.paths().to(section, electrode);
     List<DcStep> there = path.there();
     int from = 0;
     for (int k = 0; k < there.size(); k++) {

@@ -144,9 +144,10 @@ final class PartCard {
   @Nullable Word option(String... keys) {
     asked.addAll(List.of(keys));
     for (String key : keys) {
-      for (Field.Option option : options) {
+      for (int i = 0; i < options.size(); i++) {
+        Field.Option option = options.get(i);
         if (option.key().is(key)) {
-          options.remove(option);
+          options.remove(i);
           extraValues(option);
           return option.value();
         }
@@ -159,9 +160,10 @@ final class PartCard {
   List<Word> optionList(String... keys) {
     asked.addAll(List.of(keys));
     for (String key : keys) {
-      for (Field.Option option : options) {
+      for (int i = 0; i < options.size(); i++) {
+        Field.Option option = options.get(i);
         if (option.key().is(key)) {
-          options.remove(option);
+          options.remove(i);
           return option.values();
         }
       }

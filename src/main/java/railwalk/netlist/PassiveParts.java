@@ -218,13 +218,13 @@ final class PassiveParts {
     if (keyed != null) {
       return keyed;
     }
-    for (Word word : part.words()) {
+    for (int i = 0; i < part.words().size(); i++) {
+      Word word = part.words().get(i);
       boolean stated =
           !word.isExpression()
               && ValueReader.statedMeasure(word.text()).filter(m -> m == measure).isPresent();
       if (stated) {
-        part.words().remove(word);
-        return word;
+        return part.words().remove(i);
       }
     }
     return null;

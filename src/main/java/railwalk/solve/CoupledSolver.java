@@ -147,7 +147,8 @@ final class CoupledSolver {
         change = Math.max(change, supplies.get(g).correct(portAmps(g), portVolts(g), share));
       }
       trace.add("supply round %d, %s: change %.3g", round + 1, near ? "fine" : "coarse", change);
-      double left = change * (chord ? Math.min(1, change / before) : change);
+      double gain = round == 0 ? 1 : Math.min(1, change / before);
+      double left = change * (chord ? gain : change);
       if (near && left < SETTLED_SHARE) {
         return true;
       }

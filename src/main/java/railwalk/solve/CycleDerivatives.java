@@ -103,7 +103,7 @@ final class CycleDerivatives {
       add(drawn.node(), c, -1);
     } else if (by instanceof CycleColumn.WindingVolts winding) {
       for (CycleNetwork.Emf emf : net.emfs) {
-        if (emf.winding().equals(winding.winding())) {
+        if (emf.winding().name().equals(winding.winding().name())) {
           add(emf.branch(), c, emf.peakVolts() * sine);
         }
       }

@@ -10,11 +10,8 @@ import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.circuit.RectifierSection;
 import railwalk.circuit.RegulatorSection;
-import railwalk.circuit.Resistor;
 import railwalk.circuit.Winding;
 import railwalk.device.SectionCurrents;
-import railwalk.walk.RippleGroup;
-import railwalk.walk.RippleGroups;
 import railwalk.walk.SupplyMap;
 
 /** The operating point that a settled {@link CoupledSolver} holds. */
@@ -23,7 +20,10 @@ final class SolvedPoint implements OperatingPoint {
   private static final double STRAIGHT_LOADING = 1e-3;
 
   /** The same at a node that swings with the line, where the meter draws alternating current. */
-  private static final double STRAIGHT_RIPPLING_LOADING = 3e-5;
+  private static final double STRAIGHT_SWINGING_LOADING = 3e-5;
+
+  /** A node swings when its ripple is more than this part of its volts; no reservoir does. */
+  private static final double SWINGING = 0.2;
 
   private final CoupledSolver solver;
   private final List<CycleReport> reports = new ArrayList<>();
@@ -247,8 +247,9 @@ final class SolvedPoint implements OperatingPoint {
 
   /** Returns the DC network's ports of a group. */
   List<DcNetwork.Port> portsOf(CycleReport report) {
-    int group = reports.indexOf(report);
-    return solver.dc.ports.stream().filter(p -> p.group() == group).toList();
+    return solver.dc.ports.stream()
+        .filter(p -> solver.supplies.get(p.group()).net == report.net())
+        .toList();
   }
 
   /** Returns a port's node as an unknown of its group. */
@@ -264,7 +265,7 @@ final class SolvedPoint implements OperatingPoint {
       return volts;
     }
     Integer unknown = solver.dc.unknowns.get(node);
-    double straight = unknown == null ? STRAIGHT_RIPPLING_LOADING : STRAIGHT_LOADING;
+    double straight = swings(node, volts) ? STRAIGHT_SWINGING_LOADING : STRAIGHT_LOADING;
     if (source / meterOhms < straight) {
       return volts / (1 + source / meterOhms);
     }
@@ -276,18 +277,20 @@ final class SolvedPoint implements OperatingPoint {
     }
   }
 
-  /** Solves again with the meter as a part: needed where it draws alternating current too. */
+  private boolean swings(Node node, double volts) {
+    return rippleVoltsRms(node).filter(rms -> rms > SWINGING * Math.abs(volts)).isPresent();
+  }
+
+  /** Settles the supply again with the meter in: needed where it draws alternating current too. */
   private double withMeter(Node node, double meterOhms) {
-    List<Element> parts = new ArrayList<>(circuit().elements());
-    parts.add(
-        new Resistor("meter", node, circuit().reference(), meterOhms, Double.NaN, Double.NaN));
-    Circuit loaded = circuit().withElements(parts);
-    List<RippleGroup> groups = RippleGroups.of(loaded);
-    SupplyMap map =
-        new SupplyMap(
-            groups, map().supplyNodes(), map().undefined(), map().idleSections(), map().feeds());
-    CoupledSolver again = new CoupledSolver(loaded, map, false);
-    return again.startCold() && again.settle() ? new SolvedPoint(again).volts(node) : Double.NaN;
+    CoupledSolver again = new CoupledSolver(circuit(), map(), false);
+    again.startFrom(solver);
+    Supply supply = again.supplyOf(node);
+    if (supply == null) {
+      return Double.NaN;
+    }
+    supply.connectMeter(node, 1 / meterOhms);
+    return again.settle() ? supply.meanVolts(node) : Double.NaN;
   }
 
   @Override

@@ -34,6 +34,7 @@ final class Supply {
   private final double[] states;
   private final double[] drawnAmps;
   private final double[] drawnSiemens;
+  private final double[] meterSiemens;
   private final List<CycleColumn> columns = new ArrayList<>();
   private @Nullable PeriodMap map;
   private @Nullable Start start;
@@ -54,6 +55,7 @@ final class Supply {
     states = new double[net.stores.size()];
     drawnAmps = new double[net.nodeCount];
     drawnSiemens = new double[net.nodeCount];
+    meterSiemens = new double[net.nodeCount];
     for (int s = 0; s < states.length; s++) {
       columns.add(new CycleColumn.StartState(s));
     }
@@ -94,6 +96,16 @@ final class Supply {
     start = other.start;
   }
 
+  /** Puts a meter from {@code node} to the reference. */
+  void connectMeter(Node node, double siemens) {
+    meterSiemens[net.at(node)] = siemens;
+  }
+
+  /** Returns the mean volts of a node over the last sweep. */
+  double meanVolts(Node node) {
+    return sweep.means[net.at(node)];
+  }
+
   /** Returns the mean volts of a port over the last sweep. */
   double portVolts(int port) {
     return sweep.means[portUnknowns[port]];
@@ -123,13 +135,21 @@ final class Supply {
     sweep = near ? fine : coarse;
     boolean derive = !chord || map == null;
     List<CycleColumn> wanted = derive ? columns : List.of();
-    if (!sweep.run(states, drawnAmps, drawnSiemens, 1, wanted, null)) {
+    if (!sweep.run(states, drawnAmps, siemensAtNodes(), 1, wanted, null)) {
       return null;
     }
     if (derive) {
       map = derivatives();
     }
     return map == null ? null : tangentBy(map);
+  }
+
+  private double[] siemensAtNodes() {
+    double[] sum = new double[drawnSiemens.length];
+    for (int n = 0; n < sum.length; n++) {
+      sum[n] = drawnSiemens[n] + meterSiemens[n];
+    }
+    return sum;
   }
 
   /** Returns the tangent at the present states without running the period: for a first guess. */

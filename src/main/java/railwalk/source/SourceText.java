@@ -16,6 +16,12 @@ public record SourceText(String fileName, List<String> lines) {
     return new SourceText(fileName, List.of(text.split("\r\n|\n|\r", -1)));
   }
 
+  /** The hash is the name's: a text goes with every place in it, and is long. */
+  @Override
+  public int hashCode() {
+    return fileName.hashCode();
+  }
+
   /** Returns line {@code number} (from 1), or an empty string past the end. */
   public String line(int number) {
     return number >= 1 && number <= lines.size() ? lines.get(number - 1) : "";

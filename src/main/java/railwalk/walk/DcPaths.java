@@ -41,7 +41,8 @@ public final class DcPaths {
 
   private final Map<DefaultWeightedEdge, DcStep> steps = new HashMap<>();
 
-  private DcPaths(SupplyMap map, Circuit circuit) {
+  /** Lays out the ways of {@code circuit}, whose walk found {@code map}. */
+  public DcPaths(SupplyMap map, Circuit circuit) {
     this.map = map;
     this.circuit = circuit;
     List<DcBranch> branches = DcBranches.of(circuit);
@@ -81,20 +82,19 @@ public final class DcPaths {
    * Returns the path to a node. Of a node that several electrodes share, the first plate, screen or
    * cathode in netlist order counts.
    */
-  public static DcPath to(SupplyMap map, Circuit circuit, Node target) {
-    DcPaths paths = new DcPaths(map, circuit);
+  public DcPath to(Node target) {
     for (AmplifierSection section : circuit.elements(AmplifierSection.class)) {
       for (Electrode electrode : List.of(Electrode.PLATE, Electrode.SCREEN, Electrode.CATHODE)) {
         if (target.equals(nodeOf(section, electrode)) && map.supplyNode(target).isEmpty()) {
-          return paths.toElectrode(section, electrode, target);
+          return toElectrode(section, electrode, target);
         }
       }
     }
-    List<DcStep> there = paths.there(target);
+    List<DcStep> there = there(target);
     boolean throughTube =
         there.stream().anyMatch(step -> step.element() instanceof AmplifierSection);
-    List<DcStep> back = throughTube ? paths.home(target, there) : List.of();
-    return new DcPath(target, paths.supplyOf(target), there, back);
+    List<DcStep> back = throughTube ? home(target, there) : List.of();
+    return new DcPath(target, supplyOf(target), there, back);
   }
 
   /**
@@ -102,13 +102,12 @@ public final class DcPaths {
    *
    * @throws IllegalArgumentException when the section has no such electrode
    */
-  public static DcPath to(
-      SupplyMap map, Circuit circuit, AmplifierSection section, Electrode electrode) {
+  public DcPath to(AmplifierSection section, Electrode electrode) {
     Node target = nodeOf(section, electrode);
     if (target == null) {
       throw new IllegalArgumentException(section.name() + " has no " + electrode.word());
     }
-    return new DcPaths(map, circuit).toElectrode(section, electrode, target);
+    return toElectrode(section, electrode, target);
   }
 
   /** Returns the steps by which current can leave {@code node} through resistors and the like. */

@@ -44,10 +44,10 @@ class DcPathsTest {
   void throughATriodeAndBack() {
     Circuit circuit = amplifier().build();
     SupplyMap map = map(circuit);
-    DcPath path = DcPaths.to(map, circuit, circuit.node("p1").orElseThrow());
+    DcPath path = new DcPaths(map, circuit).to(circuit.node("p1").orElseThrow());
     assertThat(line(path.there())).isEqualTo("0 -VHT- bt -VHT- h1 -V9- b1 -R1- b2 -RP- p1");
     assertThat(line(path.back())).isEqualTo("p1 -V1A- k1 -RK- 0");
-    DcPath cathode = DcPaths.to(map, circuit, circuit.node("k1").orElseThrow());
+    DcPath cathode = new DcPaths(map, circuit).to(circuit.node("k1").orElseThrow());
     assertThat(line(cathode.there())).endsWith("b2 -RP- p1 -V1A- k1");
     assertThat(line(cathode.back())).isEqualTo("k1 -RK- 0");
   }
@@ -56,7 +56,7 @@ class DcPathsTest {
   void screensHangOnTheirOwnNode() {
     Circuit circuit = amplifier().build();
     AmplifierSection beam = (AmplifierSection) circuit.element("V2").orElseThrow();
-    DcPath path = DcPaths.to(map(circuit), circuit, beam, Electrode.SCREEN);
+    DcPath path = new DcPaths(map(circuit), circuit).to(beam, Electrode.SCREEN);
     assertThat(line(path.there())).endsWith("b1 -R1- b2");
     assertThat(line(path.back())).isEqualTo("b2 -V2- 0");
   }
@@ -65,10 +65,10 @@ class DcPathsTest {
   void gridsHangOnTheirLeak() {
     Circuit circuit = amplifier().build();
     SupplyMap map = map(circuit);
-    DcPath bias = DcPaths.to(map, circuit, circuit.node("g2").orElseThrow());
+    DcPath bias = new DcPaths(map, circuit).to(circuit.node("g2").orElseThrow());
     assertThat(line(bias.there())).isEqualTo("0 -VHT- bt -D1- n1 -RG- g2");
     assertThat(bias.back()).isEmpty();
-    DcPath leak = DcPaths.to(map, circuit, circuit.node("g1").orElseThrow());
+    DcPath leak = new DcPaths(map, circuit).to(circuit.node("g1").orElseThrow());
     assertThat(line(leak.there())).isEqualTo("0 -RG1- g1");
     assertThat(leak.supply()).isNull();
   }
@@ -92,7 +92,7 @@ class DcPathsTest {
             .r("RK", "k1", "0", 1500)
             .build();
     SupplyMap map = Walk.of(circuit);
-    DcPath path = DcPaths.to(map, circuit, circuit.node("p1").orElseThrow());
+    DcPath path = new DcPaths(map, circuit).to(circuit.node("p1").orElseThrow());
     assertThat(line(path.there())).isEqualTo("h2 -VHT- h1 -D1- b1 -RP- p1");
     assertThat(line(path.back())).isEqualTo("p1 -V1A- k1 -RK- 0 -D4- h2");
   }
@@ -110,7 +110,7 @@ class DcPathsTest {
             .r("RK", "k1", "0", 1500)
             .build();
     SupplyMap map = Walk.of(circuit);
-    DcPath path = DcPaths.to(map, circuit, circuit.node("p1").orElseThrow());
+    DcPath path = new DcPaths(map, circuit).to(circuit.node("p1").orElseThrow());
     assertThat(line(path.there())).isEqualTo("ct -VHT- h1 -V9- b1 -RP- p1");
     assertThat(line(path.back())).isEqualTo("p1 -V1A- k1 -RK- 0 -RB- ct");
   }
@@ -126,7 +126,7 @@ class DcPathsTest {
             .r("RT", "k1", "n", 100e3)
             .build();
     SupplyMap map = Walk.of(circuit);
-    DcPath path = DcPaths.to(map, circuit, circuit.node("k1").orElseThrow());
+    DcPath path = new DcPaths(map, circuit).to(circuit.node("k1").orElseThrow());
     assertThat(line(path.there())).isEqualTo("0 -VP- b -RP- p1 -V1A- k1");
     assertThat(line(path.back())).isEqualTo("k1 -RT- n -VN- 0");
   }

@@ -1,10 +1,13 @@
 package railwalk.render.text;
 
+import java.util.regex.Pattern;
 import railwalk.render.type.LineBreaker;
 
 /** The text so far, with the means to add lines that keep to the width. */
 final class Sheet {
   static final int COLUMNS = 80;
+
+  private static final Pattern CONTROL = Pattern.compile("\\p{Cntrl}");
 
   static final LineBreaker BREAKER = LineBreaker.ofWords(TextWidth::of);
 
@@ -63,7 +66,7 @@ final class Sheet {
 
   /** Returns {@code text} with a blank for every control character. */
   static String clean(String text) {
-    return text.replaceAll("\\p{Cntrl}", " ");
+    return CONTROL.matcher(text).replaceAll(" ");
   }
 
   /** Returns {@code text} filled up with blanks to {@code width}. */

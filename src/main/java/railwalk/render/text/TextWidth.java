@@ -8,7 +8,11 @@ final class TextWidth {
   private TextWidth() {}
 
   static int of(String text) {
-    return text.codePoints().map(TextWidth::of).sum();
+    int columns = 0;
+    for (int at = 0; at < text.length(); at = text.offsetByCodePoints(at, 1)) {
+      columns += of(text.codePointAt(at));
+    }
+    return columns;
   }
 
   private static int of(int codePoint) {

@@ -101,6 +101,9 @@ public final class LineBreaker {
   }
 
   private String[] pieces(String text) {
+    if (text.indexOf(' ') < 0 && text.indexOf(breakAt) < 0) {
+      return new String[] {text};
+    }
     return BEFORE_A_UNIT.matcher(text).replaceAll(NO_BREAK_SPACE).split(breakAt, -1);
   }
 
