@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
+import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Bottle;
 import railwalk.circuit.ControlledSource;
 import railwalk.circuit.Coupling;
@@ -122,6 +123,19 @@ final class StructureCheck {
 
   // nodes that only one part touches
 
+  /** Returns how many of a tube's amplifying sections touch a node: two in a cascode. */
+  private int sectionsAt(Bottle bottle, Node node) {
+    int count = 0;
+    for (Element element : elements) {
+      if (element instanceof AmplifierSection section
+          && section.bottle().equals(bottle.name())
+          && section.nodes().contains(node)) {
+        count++;
+      }
+    }
+    return count;
+  }
+
   private void lonelyNodes(Node reference) {
     Map<Node, Integer> touches = new HashMap<>();
     Map<Node, Element> only = new HashMap<>();
@@ -141,7 +155,7 @@ final class StructureCheck {
           .filter(e -> e.bottle().equals(bottle.name()))
           .forEach(e -> nodes.addAll(e.nodes()));
       for (Node node : nodes) {
-        touches.merge(node, 1, Integer::sum);
+        touches.merge(node, Math.max(1, sectionsAt(bottle, node)), Integer::sum);
         tubeAt.put(node, bottle.name());
       }
     }

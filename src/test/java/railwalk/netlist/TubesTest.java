@@ -343,4 +343,11 @@ class TubesTest {
         like.spreadLow(),
         like.spreadHigh());
   }
+
+  @Test
+  void aCascodeNeedsNothingElseBetweenItsHalves() {
+    NetlistResult result =
+        read("VB b 0 250", "RP b p 100k", "XV1A p 0 m 12AX7", "XV1B m 0 k 12AX7", "RK k 0 1k");
+    assertThat(codes(result)).doesNotContain("node-of-one-part");
+  }
 }
