@@ -23,6 +23,10 @@ final class Settings {
   private final Draft draft;
   private final Frame frame;
   private final Map<String, Card> seen = new HashMap<>();
+
+  /** No voltmeter is lower, on any range. */
+  private static final double LEAST_METER_OHMS = 1_000;
+
   private Meter meter = Meter.TEN_MEGOHM;
   private Spread spread = Spread.USUAL;
   private Words words = Words.AMERICAN;
@@ -194,6 +198,9 @@ final class Settings {
     int slash = word.text().indexOf('/');
     if (slash < 0) {
       double ohms = positive(part, word, Measure.RESISTANCE);
+      if (ohms > 0 && ohms < LEAST_METER_OHMS) {
+        draft.report().add(Problem.METER_SPEC, word.span(), word.text());
+      }
       part.done();
       meter = new Meter(ohms, Double.NaN, List.of());
       return;

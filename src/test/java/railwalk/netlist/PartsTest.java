@@ -195,4 +195,10 @@ class PartsTest {
   void theSecondOfTwoValuesIsRefused() {
     assertThat(codes(read("R1 a b c 10k", "R2 a b 10k 22k"))).contains("not-a-value", "two-values");
   }
+
+  @Test
+  void noVoltmeterHasTwelveOhms() {
+    assertThat(codes(read(".meter 12x", "R1 a 0 1k"))).contains("meter-spec");
+    assertThat(codes(read(".meter 1M", "R1 a 0 1k"))).doesNotContain("meter-spec");
+  }
 }
