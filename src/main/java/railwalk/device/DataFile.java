@@ -1,7 +1,9 @@
 package railwalk.device;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -22,8 +24,14 @@ import railwalk.source.SourceText;
  * heater   12.6V 0.15A tap=6.3V        further lines: other rated connections; direct, joined
  * section  A triode                    id (none when it is the only one) and
  *                                      triode, pentode, beam, rectifier, regulator or diode
- * pin      1 A plate                   number, section id (none when all share it), electrode, or
- *                                      empty, internal, shield, sleeve
+ * pin      1 A plate                   number or cap, section id (none when all share it),
+ *                                      electrode, or empty, internal, shield, sleeve
+ * pins     none                        no source for the pins is known: electrodes only
+ * strap    4 8                         pins to be wired together at the socket, since it is not
+ *                                      known whether they are joined inside
+ * caution  halves by some sheets …     why use by pin deserves a second look
+ * unlike   6DJ8 6.3 V on 4-5 …         a look-alike that does not go into this type's socket, and
+ *                                      what differs
  * rating   system=design-centre plate=300V platewatts=1W
  * spread   0.70 1.30                   current of new tubes at fixed volts as shares, two sigma
  * source   rca54 RCA sheet 11-5-1954   id and text
@@ -32,17 +40,41 @@ import railwalk.source.SourceText;
  *                                      volts it surely lights at, volts at mid current, rated
  *                                      current, change of volts over it
  * fit      triode mu=105.9412 …        constants, as railwalk.fit writes them
- * residual …                           how well the law meets each point, as railwalk.fit writes it
+ * residual point=1 …                   how well the law meets each point, as railwalk.fit writes it
  * </pre>
  *
- * Read by {@link Catalogue} for types and by railwalk.fit for points; the same words serve a type
- * given in a netlist.
+ * <p>Sections of unlike laws: {@code section=} on rating, spread, point, fit and residual lines
+ * names the section each belongs to; a line without it speaks of all that it fits. Sections of one
+ * kind share points and law unless a point names one of them.
+ *
+ * <p>Read by {@link Catalogue} for types and by railwalk.fit for points; the same words serve a
+ * type given in a netlist.
  */
 public final class DataFile {
   private static final Set<String> ONCE =
-      Set.of("type", "like", "alias", "summary", "base", "spread", "gas");
+      Set.of("type", "like", "alias", "summary", "base", "pins", "gas");
   private static final Set<String> MANY =
-      Set.of("heater", "section", "pin", "rating", "source", "point", "fit", "residual");
+      Set.of(
+          "heater",
+          "section",
+          "pin",
+          "strap",
+          "caution",
+          "unlike",
+          "rating",
+          "spread",
+          "source",
+          "point",
+          "fit",
+          "residual");
+
+  /** What a file that says one of the keys does not take over from the type it is like. */
+  private static final Map<String, Set<String>> SUPERSEDES =
+      Map.of(
+          "pin", Set.of("pins", "strap", "caution"),
+          "pins", Set.of("pin", "strap", "caution"),
+          "point", Set.of("fit", "residual"),
+          "fit", Set.of("residual"));
 
   private final SourceText text;
   private final Function<String, DataFile> others;
@@ -87,9 +119,11 @@ public final class DataFile {
     List<DataLine> like = lines.get("like");
     if (like != null) {
       DataFile other = others.apply(like.get(0).word(0));
+      Set<String> dropped = new HashSet<>(Set.of("alias", "unlike"));
+      lines.keySet().forEach(key -> dropped.addAll(SUPERSEDES.getOrDefault(key, Set.of())));
       other.lines.forEach(
           (key, inherited) -> {
-            if (!key.equals("alias")) {
+            if (!dropped.contains(key)) {
               lines.putIfAbsent(key, inherited);
             }
           });
@@ -114,7 +148,8 @@ public final class DataFile {
 
   /** Returns whether the law and its points are another type's, named on the {@code like} line. */
   public boolean borrowsLaw() {
-    return lines.containsKey("like") && own.stream().noneMatch(l -> l.key().equals("fit"));
+    return lines.containsKey("like")
+        && own.stream().noneMatch(l -> l.key().equals("fit") || l.key().equals("point"));
   }
 
   /** Returns where figures come from: the sources' texts by their ids. */
@@ -130,40 +165,66 @@ public final class DataFile {
 
   /** Returns the published points, in file order. */
   public List<PublishedPoint> points() {
-    PointReader reader = new PointReader(sources());
+    PointReader reader = new PointReader(sources(), this);
     return all("point").stream().map(reader::read).toList();
   }
 
   /**
-   * Returns the kinds of section whose laws are fitted, in file order: "triode", "pentode", "beam",
-   * "rectifier", "diode".
+   * Returns the groups of sections that share points and a fitted law, in file order: like sections
+   * together, unlike ones each for itself.
    */
-  public List<String> curves() {
-    return all("section").stream()
-        .map(line -> line.word(line.size() - 1))
-        .filter(word -> !word.equals("regulator"))
-        .distinct()
-        .toList();
+  public List<LikeSections> likeSections() {
+    Map<String, LikeSections> groups = new LinkedHashMap<>();
+    for (DataLine line : all("section")) {
+      String kind = line.word(line.size() - 1);
+      if (!kind.equals("regulator")) {
+        String id = idOf(line);
+        String key = isTold(kind) ? kind + " " + id : kind;
+        LikeSections group = groups.get(key);
+        groups.put(key, group == null ? new LikeSections(kind, List.of(id)) : group.and(id));
+      }
+    }
+    return List.copyOf(groups.values());
   }
 
-  /** Returns the id of the first section of kind {@code curve}. */
-  public String sectionOf(String curve) {
-    return all("section").stream()
-        .filter(line -> line.word(line.size() - 1).equals(curve))
-        .map(line -> line.size() > 1 ? line.word(0) : "")
-        .findFirst()
-        .orElseThrow(() -> new IllegalArgumentException(name() + " has no " + curve));
+  /** Returns whether a point or fit line names one of several sections of {@code kind}. */
+  private boolean isTold(String kind) {
+    Set<String> ids = new HashSet<>();
+    for (DataLine line : all("section")) {
+      if (line.word(line.size() - 1).equals(kind)) {
+        ids.add(idOf(line));
+      }
+    }
+    if (ids.size() > 1) {
+      for (String key : List.of("point", "fit")) {
+        for (DataLine line : all(key)) {
+          if (line.has("section") && ids.contains(line.option("section", ""))) {
+            return true;
+          }
+        }
+      }
+    }
+    return false;
   }
 
-  /**
-   * Returns the points of sections of kind {@code curve}; one that names no section is the first's.
-   */
-  public List<PublishedPoint> points(String curve) {
-    String own = sectionOf(curve);
-    boolean first = curves().get(0).equals(curve);
+  /** Returns the points of {@code group}; one that names no section is the first group's. */
+  public List<PublishedPoint> points(LikeSections group) {
+    boolean first = likeSections().get(0).equals(group);
     return points().stream()
-        .filter(p -> p.section().isEmpty() ? first : p.section().equals(own))
+        .filter(p -> p.section().isEmpty() ? first : group.ids().contains(p.section()))
         .toList();
+  }
+
+  /** Returns the ids of all sections, the empty one of an only section too. */
+  Set<String> sectionIds() {
+    Set<String> ids = new LinkedHashSet<>();
+    all("section").forEach(line -> ids.add(idOf(line)));
+    return ids;
+  }
+
+  /** Returns the id that a section line gives; empty for an only section. */
+  static String idOf(DataLine section) {
+    return section.size() > 1 ? section.word(0) : "";
   }
 
   /** Returns this file with its fit and residual lines replaced by {@code fitted}. */

@@ -144,6 +144,11 @@ final class DataLine {
     return text.line(number).substring(words.get(index).column - 1).strip();
   }
 
+  /** Returns the names of the options, in the line's order. */
+  Set<String> optionNames() {
+    return options.keySet();
+  }
+
   boolean has(String option) {
     return options.containsKey(option);
   }

@@ -39,11 +39,18 @@ final class LawReader {
   }
 
   private DataLine fit(DataLine section, String id, String word) {
+    DataLine found = null;
     for (DataLine line : file.all("fit")) {
       line.allow(CONSTANTS);
       if (line.word(0).equals(word) && line.option("section", id).equals(id)) {
-        return line;
+        if (found != null) {
+          throw line.error("a second fit line for the same section", "");
+        }
+        found = line;
       }
+    }
+    if (found != null) {
+      return found;
     }
     throw section.error("no fit line for this " + word + " section", "fit " + word + " …");
   }

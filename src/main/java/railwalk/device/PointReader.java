@@ -1,5 +1,6 @@
 package railwalk.device;
 
+import java.util.List;
 import java.util.Map;
 import java.util.Set;
 
@@ -34,25 +35,71 @@ final class PointReader {
   private static final double ROUNDING = 0.15;
 
   private final Map<String, String> sources;
+  private final List<LikeSections> groups;
 
-  PointReader(Map<String, String> sources) {
+  PointReader(Map<String, String> sources, DataFile file) {
     this.sources = sources;
+    this.groups = file.likeSections();
   }
 
   PublishedPoint read(DataLine line) {
     line.allow(OPTIONS);
+    LikeSections group = group(line);
     PublishedPoint point =
         new PublishedPoint(line.option("section", ""), setup(line), figures(line), credit(line));
     PublishedPoint.Figures figures = point.published();
     if (Double.isNaN(figures.plateAmps()) && Double.isNaN(figures.cathodeAmps())) {
       throw line.error("the point has no current", "current=… or cathodecurrent=…");
     }
+    check(line, group.kind(), point.setup());
     double product = figures.gmSiemens() * figures.plateOhms();
     if (Math.abs(figures.mu() / product - 1) > ROUNDING) {
       throw line.error(
           "mu", "mu and gm · rp differ by more than 15 %", "one of the three is misread");
     }
     return point;
+  }
+
+  /** Returns the sections that the point speaks of. */
+  private LikeSections group(DataLine line) {
+    if (!line.has("section")) {
+      if (groups.stream().filter(LikeSections::amplify).count() > 1) {
+        throw line.error("the type has unlike sections: which one is meant?", "section=…");
+      }
+      return groups.get(0);
+    }
+    String id = line.option("section", "");
+    for (LikeSections group : groups) {
+      if (group.ids().contains(id)) {
+        return group;
+      }
+    }
+    throw line.error("section", "no section " + id, "");
+  }
+
+  /** Complains about volts that such a section has no electrode for, and about missing ones. */
+  private static void check(DataLine line, String kind, PublishedPoint.Setup setup) {
+    boolean hasScreen = kind.equals("pentode") || kind.equals("beam");
+    boolean hasGrid = hasScreen || kind.equals("triode");
+    if (!hasScreen) {
+      for (String odd : List.of("screen", "screencurrent", "screenmu", "screenload")) {
+        if (line.has(odd)) {
+          throw line.error(odd, "a " + kind + " has no screen", "");
+        }
+      }
+    } else if (setup.triodeConnected() == line.has("screen")) {
+      throw line.error(
+          setup.triodeConnected()
+              ? "the screen is joined to the plate and has no volts of its own"
+              : "the screen volts are missing",
+          "screen=…, or connection=triode");
+    }
+    if (hasGrid && Double.isNaN(setup.gridVolts())) {
+      throw line.error("neither grid volts nor a cathode resistor", "grid=… or cathode=…");
+    }
+    if (!(setup.plateVolts() > 0)) {
+      throw line.error("plate", "plate volts of " + line.option("plate", "") + " draw nothing", "");
+    }
   }
 
   private static PublishedPoint.Setup setup(DataLine line) {

@@ -18,7 +18,8 @@ import java.util.TreeMap;
  * @param family the kind of socket: "noval", "octal", "miniature-7" and so on
  * @param sections in bench order
  * @param pins socket pins by number; 0 stands for the top cap. Empty when no source for them is
- *     known
+ *     known: then only use by electrode makes sense
+ * @param care what to mind about its pins and its look-alikes
  */
 public record TubeType(
     String name,
@@ -28,7 +29,49 @@ public record TubeType(
     String family,
     Heater heater,
     List<SectionType> sections,
-    SortedMap<Integer, PinUse> pins) {
+    SortedMap<Integer, PinUse> pins,
+    Care care) {
+
+  /**
+   * What to mind.
+   *
+   * @param cautions why use by pin deserves a second look, such as sheets that disagree
+   * @param straps pins to be wired together at the socket, since it is not known whether they are
+   *     joined inside
+   * @param lookAlikes types that are easily taken for this one
+   */
+  public record Care(
+      List<String> cautions, List<List<Integer>> straps, List<LookAlike> lookAlikes) {
+    /** Nothing to mind. */
+    public static final Care NONE = new Care(List.of(), List.of(), List.of());
+
+    public Care {
+      cautions = List.copyOf(cautions);
+      straps = List.copyOf(straps);
+      lookAlikes = List.copyOf(lookAlikes);
+    }
+  }
+
+  /**
+   * A type that is easily taken for another but does not replace it.
+   *
+   * @param type its name
+   * @param difference what differs, in a few words
+   */
+  public record LookAlike(String type, String difference) {}
+
+  /** A type with nothing to mind. */
+  public TubeType(
+      String name,
+      List<String> aliases,
+      String summary,
+      String base,
+      String family,
+      Heater heater,
+      List<SectionType> sections,
+      SortedMap<Integer, PinUse> pins) {
+    this(name, aliases, summary, base, family, heater, sections, pins, Care.NONE);
+  }
 
   public TubeType {
     aliases = List.copyOf(aliases);

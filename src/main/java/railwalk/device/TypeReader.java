@@ -2,11 +2,8 @@ package railwalk.device;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
-import java.util.Map;
 import java.util.Set;
 import java.util.SortedMap;
-import java.util.TreeMap;
 import org.jspecify.annotations.Nullable;
 
 /** Makes a {@link TubeType} of a data file's lines. One piece of {@link DataFile}. */
@@ -40,6 +37,8 @@ final class TypeReader {
     List<SectionType> sections = sections();
     DataLine base = file.one("base");
     base.allow(Set.of("source"));
+    SortedMap<Integer, PinUse> pins = new PinReader(file, sections).pins();
+    new FigureCheck(file).check();
     return new TubeType(
         file.name(),
         file.all("alias").stream().flatMap(line -> line.words().stream()).toList(),
@@ -48,7 +47,34 @@ final class TypeReader {
         base.word(1),
         heater(),
         sections,
-        pins(sections));
+        pins,
+        care(pins));
+  }
+
+  private TubeType.Care care(SortedMap<Integer, PinUse> pins) {
+    List<List<Integer>> straps = new ArrayList<>();
+    for (DataLine line : file.all("strap")) {
+      List<Integer> strap = new ArrayList<>();
+      for (int i = 0; i < line.size(); i++) {
+        int pin = (int) line.figure(i);
+        if (!pins.containsKey(pin)) {
+          throw line.error(i, "pin " + pin + " leads nowhere", "");
+        }
+        strap.add(pin);
+      }
+      straps.add(List.copyOf(strap));
+    }
+    List<TubeType.LookAlike> lookAlikes = new ArrayList<>();
+    for (DataLine line : file.all("unlike")) {
+      lookAlikes.add(new TubeType.LookAlike(line.word(0), line.rest(1)));
+    }
+    List<String> cautions = new ArrayList<>();
+    for (DataLine line : file.all("caution")) {
+      cautions.add(line.rest(0));
+    }
+    return cautions.isEmpty() && straps.isEmpty() && lookAlikes.isEmpty()
+        ? TubeType.Care.NONE
+        : new TubeType.Care(cautions, straps, lookAlikes);
   }
 
   private List<SectionType> sections() {
@@ -71,20 +97,26 @@ final class TypeReader {
               laws.law(line, id, word),
               amplifies ? ratings(id) : Ratings.NONE,
               kind == SectionKind.RECTIFIER ? rectifierRatings(id) : RectifierRatings.NONE,
-              spread(amplifies, 0),
-              spread(amplifies, 1)));
+              amplifies ? spread(id).figure(0) : Double.NaN,
+              amplifies ? spread(id).figure(1) : Double.NaN));
     }
     return sections;
   }
 
-  /** Returns a limit of the spread; NaN for kinds that have none. */
-  private double spread(boolean amplifies, int index) {
-    if (!amplifies) {
-      return Double.NaN;
+  private DataLine spread(String id) {
+    DataLine line = only("spread", id);
+    if (line == null) {
+      throw file.one("type").error("the file has no spread line" + of(id), "spread 0.70 1.30");
     }
-    DataLine line = file.one("spread");
-    line.allow(Set.of("source"));
-    return line.figure(index);
+    line.allow(Set.of("section", "source"));
+    if (!(line.figure(0) > 0 && line.figure(0) < 1 && line.figure(1) > 1)) {
+      throw line.error("the spread does not straddle 1", "shares of the current: 0.70 1.30");
+    }
+    return line;
+  }
+
+  private static String of(String id) {
+    return id.isEmpty() ? "" : " for section " + id;
   }
 
   private static SectionKind kind(DataLine line, String word) {
@@ -152,15 +184,22 @@ final class TypeReader {
   }
 
   private @Nullable DataLine rating(String id) {
-    DataLine found = null;
     for (DataLine line : file.all("rating")) {
       line.allow(RATINGS);
       if (!line.has("system")) {
         throw line.error("the rating system is missing", "system=design-centre and the like");
       }
+    }
+    return only("rating", id);
+  }
+
+  /** Returns the line with {@code key} that speaks of section {@code id}; null without one. */
+  private @Nullable DataLine only(String key, String id) {
+    DataLine found = null;
+    for (DataLine line : file.all(key)) {
       if (line.option("section", id).equals(id)) {
         if (found != null) {
-          throw line.error("a second rating for the same section", "");
+          throw line.error("a second " + key + " for the same section", "");
         }
         found = line;
       }
@@ -174,42 +213,5 @@ final class TypeReader {
       throw line.error(name, "a limit of " + line.option(name, "") + " makes no sense", "");
     }
     return value;
-  }
-
-  private SortedMap<Integer, PinUse> pins(List<SectionType> sections) {
-    SortedMap<Integer, PinUse> pins = new TreeMap<>();
-    for (DataLine line : file.all("pin")) {
-      line.allow(Set.of());
-      int number = (int) line.figure(0);
-      String id = line.size() > 2 ? line.word(1) : "";
-      if (sections.stream().noneMatch(s -> id.isEmpty() || s.id().equals(id))) {
-        throw line.error(1, "no section " + id, "");
-      }
-      PinUse use = pinUse(line, id, line.word(line.size() > 2 ? 2 : 1));
-      if (pins.put(number, use) != null) {
-        throw line.error(0, "pin " + number + " stands twice", "");
-      }
-    }
-    return pins;
-  }
-
-  private static final Map<String, PinUse.Role> ROLES =
-      Map.of(
-          "empty", PinUse.Role.EMPTY,
-          "internal", PinUse.Role.INTERNAL,
-          "shield", PinUse.Role.SHIELD,
-          "sleeve", PinUse.Role.SLEEVE);
-
-  private static PinUse pinUse(DataLine line, String id, String word) {
-    PinUse.Role role = ROLES.get(word);
-    if (role != null) {
-      return new PinUse(role, id, null);
-    }
-    for (Electrode electrode : Electrode.values()) {
-      if (electrode.word().equals(word.toLowerCase(Locale.ROOT))) {
-        return new PinUse(PinUse.Role.ELECTRODE, id, electrode);
-      }
-    }
-    throw line.error("no electrode is called " + word, "plate, screen, grid, cathode, heater1 …");
   }
 }

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import railwalk.device.Catalogue;
 import railwalk.device.DataFile;
+import railwalk.device.LikeSections;
 import railwalk.device.PublishedPoint;
 
 /**
@@ -38,8 +39,11 @@ public final class TubeFit {
       return new Refit(String.join("\n", file.text().lines()), TypeSheet.of(file));
     }
     List<String> lines = new ArrayList<>();
-    for (String word : file.curves()) {
-      lines.add("fit      " + word + constants(word, file.points(word)));
+    List<LikeSections> groups = file.likeSections();
+    for (LikeSections group : groups) {
+      boolean alone = groups.stream().filter(g -> g.kind().equals(group.kind())).count() == 1;
+      String section = alone ? "" : " section=" + group.first();
+      lines.add("fit      " + group.kind() + section + constants(group.kind(), file.points(group)));
     }
     DataFile fitted = file.with(lines);
     TypeSheet sheet = TypeSheet.of(fitted);
@@ -63,7 +67,8 @@ public final class TubeFit {
     int number = 0;
     for (PublishedPoint point : file.points()) {
       number++;
-      StringBuilder line = new StringBuilder("residual point=" + number);
+      String section = point.section().isEmpty() ? "" : " section=" + point.section();
+      StringBuilder line = new StringBuilder("residual point=" + number + section);
       for (Comparison row : sheet.rows()) {
         if (row.point().equals(point)) {
           line.append(

@@ -28,8 +28,8 @@ public record TypeSheet(TubeType type, List<Comparison> rows, List<String> sourc
   public static TypeSheet of(DataFile file) {
     TubeType type = file.type();
     List<Comparison> rows =
-        file.curves().stream()
-            .flatMap(word -> compare(law(type, file.sectionOf(word)), file.points(word)).stream())
+        file.likeSections().stream()
+            .flatMap(group -> compare(law(type, group.first()), file.points(group)).stream())
             .toList();
     return new TypeSheet(type, rows, List.copyOf(file.sources().values()));
   }
