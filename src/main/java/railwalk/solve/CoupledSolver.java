@@ -84,7 +84,7 @@ final class CoupledSolver {
   /** Starts from a solved neighbour of the same topology. */
   void startFrom(CoupledSolver neighbour) {
     System.arraycopy(neighbour.x, 0, x, 0, x.length);
-    dc.copyGlow(neighbour.dc);
+    dc.devices.copyGlow(neighbour.dc.devices);
     for (int g = 0; g < supplies.size(); g++) {
       supplies.get(g).copyFrom(neighbour.supplies.get(g));
     }

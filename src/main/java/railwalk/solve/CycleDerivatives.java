@@ -50,7 +50,7 @@ final class CycleDerivatives {
     }
     Arrays.fill(unknowns, 0);
     for (int s = 0; s < net.stores.size(); s++) {
-      CycleNetwork.Store store = net.stores.get(s);
+      Stores.Store store = net.stores.get(s);
       double companion = store.size() * perStage;
       if (store.isChoke()) {
         addRow(store.branch(), -companion, s);
@@ -83,7 +83,7 @@ final class CycleDerivatives {
   }
 
   private void advance(int s, int half, double stage) {
-    CycleNetwork.Store store = net.stores.get(s);
+    Stores.Store store = net.stores.get(s);
     int a = store.isChoke() ? store.branch() : store.a();
     int b = store.isChoke() ? -1 : store.b();
     int at = s * count;
@@ -102,8 +102,8 @@ final class CycleDerivatives {
     if (by instanceof CycleColumn.Drawn drawn) {
       add(drawn.node(), c, -1);
     } else if (by instanceof CycleColumn.WindingVolts winding) {
-      for (CycleNetwork.Emf emf : net.emfs) {
-        if (emf.winding().name().equals(winding.winding().name())) {
+      for (Windings.Emf emf : net.emfs) {
+        if (emf.winding() != null && emf.winding().name().equals(winding.winding().name())) {
           add(emf.branch(), c, emf.peakVolts() * sine);
         }
       }

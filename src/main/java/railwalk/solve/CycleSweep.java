@@ -130,7 +130,7 @@ final class CycleSweep {
   /** Takes the states out of a solved stage: their rates after the first, themselves after both. */
   private void advance(double[] history, double @Nullable [] rate, double[] state, double stage) {
     for (int s = 0; s < history.length; s++) {
-      CycleNetwork.Store store = net.stores.get(s);
+      Stores.Store store = net.stores.get(s);
       double present =
           store.isChoke() ? unknowns[store.branch()] : volts(unknowns, store.a(), store.b());
       if (rate != null) {
@@ -150,7 +150,7 @@ final class CycleSweep {
     for (int n = 0; n < net.nodeCount; n++) {
       base[net.diagonal[n]] += drawnSiemens[n];
     }
-    for (CycleNetwork.Store store : net.stores) {
+    for (Stores.Store store : net.stores) {
       double companion = store.size() * perStage;
       int[] p = store.places();
       if (store.isChoke()) {
@@ -171,7 +171,7 @@ final class CycleSweep {
     for (int n = 0; n < net.nodeCount; n++) {
       fixed[n] -= drawnAmps[n];
     }
-    for (CycleNetwork.Emf emf : net.emfs) {
+    for (Windings.Emf emf : net.emfs) {
       fixed[emf.branch()] += emf.peakVolts() * sine;
     }
     addHistory(history, perStage, fixed);
@@ -232,7 +232,7 @@ final class CycleSweep {
 
   private void addHistory(double[] history, double perStage, double[] target) {
     for (int s = 0; s < history.length; s++) {
-      CycleNetwork.Store store = net.stores.get(s);
+      Stores.Store store = net.stores.get(s);
       double amount = store.size() * perStage * history[s];
       if (store.isChoke()) {
         target[store.branch()] -= amount;

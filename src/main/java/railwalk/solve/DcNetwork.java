@@ -1,26 +1,16 @@
 package railwalk.solve;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
-import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Capacitor;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Element;
-import railwalk.circuit.GlowLamp;
 import railwalk.circuit.Node;
-import railwalk.circuit.RegulatorSection;
-import railwalk.device.AmplifierLaw;
-import railwalk.device.GasLaw;
-import railwalk.device.SectionCurrents;
-import railwalk.device.SectionLaw;
-import railwalk.device.TwoPoleCurrent;
-import railwalk.device.TwoPoleLaw;
 import railwalk.walk.SupplyMap;
 
 /**
@@ -33,13 +23,6 @@ import railwalk.walk.SupplyMap;
  * <p>The pattern is made once; {@link #load} writes the values of a circuit of the same topology.
  */
 final class DcNetwork {
-  /** A tube section: unknowns of its electrodes (−1: reference) and places of its 4 × 4 block. */
-  record Amplifier(
-      AmplifierSection section, int plate, int screen, int grid, int cathode, int[] places) {}
-
-  /** A diode or one plate of a rectifier or regulator. */
-  record TwoPole(Element element, int anode, int cathode, int[] places) {}
-
   /**
    * Where a supply port stands: which port of which group, its node, the unknown of its current,
    * and the number of the first entry of its row of source resistances.
@@ -53,8 +36,7 @@ final class DcNetwork {
   final int nodeCount;
   final int size;
   final SparseMatrix matrix;
-  final List<Amplifier> amplifiers = new ArrayList<>();
-  final List<TwoPole> twoPoles = new ArrayList<>();
+  final Devices devices;
   final List<Port> ports = new ArrayList<>();
   final int[] diagonal;
   final List<Element> elements;
@@ -66,12 +48,7 @@ final class DcNetwork {
   private int firstDiagonal;
   private final double[] linear;
   private double[] source;
-  private AmplifierLaw[] laws;
-  private TwoPoleLaw[] twoPoleLaws;
-  private final int[] glow;
   private Map<Element, Integer> branches;
-  private final SectionCurrents currents = new SectionCurrents();
-  private final TwoPoleCurrent current = new TwoPoleCurrent();
 
   DcNetwork(Circuit circuit, SupplyMap map) {
     this.map = map;
@@ -104,20 +81,10 @@ final class DcNetwork {
     size = stamps.size();
     matrix = new SparseMatrix(stamps);
     branches = stamper.branches();
-    diagonal = run(firstDiagonal, nodeCount);
-    for (DcStamper.AmplifierDraft d : stamper.amplifiers) {
-      amplifiers.add(
-          new Amplifier(
-              d.section(), d.plate(), d.screen(), d.grid(), d.cathode(), run(d.entry(), 16)));
-    }
-    for (DcStamper.TwoPoleDraft d : stamper.twoPoles) {
-      twoPoles.add(new TwoPole(d.element(), d.anode(), d.cathode(), run(d.entry(), 4)));
-    }
-    glow = new int[twoPoles.size()];
+    diagonal = matrix.places(firstDiagonal, nodeCount);
+    devices = new Devices(stamper, matrix);
     linear = matrix.newValues();
     source = new double[0];
-    laws = new AmplifierLaw[0];
-    twoPoleLaws = new TwoPoleLaw[0];
     take(stamper);
   }
 
@@ -170,32 +137,7 @@ final class DcNetwork {
     matrix.load(stamps, linear);
     source = stamps.rightHandSide();
     branches = stamper.branches();
-    laws = stamper.amplifiers.stream().map(d -> d.section().law()).toArray(AmplifierLaw[]::new);
-    twoPoleLaws = new TwoPoleLaw[twoPoles.size()];
-    for (int i = 0; i < twoPoleLaws.length; i++) {
-      twoPoleLaws[i] = branchOf(stamper.twoPoles.get(i).law(), glow[i]);
-    }
-  }
-
-  private static TwoPoleLaw branchOf(SectionLaw law, int glow) {
-    if (law instanceof GasLaw gas) {
-      return glow == 0 ? gas.dark() : glow > 0 ? gas.lit() : new Turned(gas.lit());
-    }
-    return (TwoPoleLaw) law;
-  }
-
-  /** A neon lamp lit the other way round. */
-  private record Turned(TwoPoleLaw law) implements TwoPoleLaw {
-    @Override
-    public void evaluate(double volts, TwoPoleCurrent out) {
-      law.evaluate(-volts, out);
-      out.amps = -out.amps;
-    }
-
-    @Override
-    public TwoPoleLaw withEmission(double emission) {
-      return this;
-    }
+    devices.load(stamper);
   }
 
   /** Sets what a port sees: {@code open volts − Σ ohms · I}. */
@@ -239,72 +181,7 @@ final class DcNetwork {
         residual[n] += tieSiemens * x[n];
       }
     }
-    for (int i = 0; i < twoPoles.size(); i++) {
-      TwoPole pole = twoPoles.get(i);
-      twoPoleLaws[i].evaluate(at(x, pole.anode) - at(x, pole.cathode), current);
-      add(residual, pole.anode, current.amps);
-      add(residual, pole.cathode, -current.amps);
-      int[] p = pole.places;
-      jacobian[p[0]] += current.siemens;
-      jacobian[p[1]] -= current.siemens;
-      jacobian[p[2]] -= current.siemens;
-      jacobian[p[3]] += current.siemens;
-    }
-    for (int i = 0; i < laws.length; i++) {
-      Amplifier tube = amplifiers.get(i);
-      law(i, x);
-      add(residual, tube.plate, currents.plateAmps);
-      add(residual, tube.screen, currents.screenAmps);
-      add(residual, tube.grid, currents.gridAmps);
-      add(residual, tube.cathode, -currents.plateAmps - currents.screenAmps - currents.gridAmps);
-      stampSection(tube.places, jacobian);
-    }
-  }
-
-  private void law(int tube, double[] x) {
-    Amplifier a = amplifiers.get(tube);
-    double cathode = at(x, a.cathode);
-    double screen = a.section.screen() == null ? 0 : at(x, a.screen) - cathode;
-    laws[tube].evaluate(at(x, a.plate) - cathode, screen, at(x, a.grid) - cathode, currents);
-  }
-
-  private void stampSection(int[] p, double[] jacobian) {
-    SectionCurrents c = currents;
-    double plateSum = c.plateByPlateSiemens + c.plateByScreenSiemens + c.plateByGridSiemens;
-    double screenSum = c.screenByPlateSiemens + c.screenByScreenSiemens + c.screenByGridSiemens;
-    double gridSum = c.gridByPlateSiemens + c.gridByScreenSiemens + c.gridByGridSiemens;
-    double byPlate = c.plateByPlateSiemens + c.screenByPlateSiemens + c.gridByPlateSiemens;
-    double byScreen = c.plateByScreenSiemens + c.screenByScreenSiemens + c.gridByScreenSiemens;
-    double byGrid = c.plateByGridSiemens + c.screenByGridSiemens + c.gridByGridSiemens;
-    jacobian[p[0]] += c.plateByPlateSiemens;
-    jacobian[p[1]] += c.plateByScreenSiemens;
-    jacobian[p[2]] += c.plateByGridSiemens;
-    jacobian[p[3]] -= plateSum;
-    jacobian[p[4]] += c.screenByPlateSiemens;
-    jacobian[p[5]] += c.screenByScreenSiemens;
-    jacobian[p[6]] += c.screenByGridSiemens;
-    jacobian[p[7]] -= screenSum;
-    jacobian[p[8]] += c.gridByPlateSiemens;
-    jacobian[p[9]] += c.gridByScreenSiemens;
-    jacobian[p[10]] += c.gridByGridSiemens;
-    jacobian[p[11]] -= gridSum;
-    jacobian[p[12]] -= byPlate;
-    jacobian[p[13]] -= byScreen;
-    jacobian[p[14]] -= byGrid;
-    jacobian[p[15]] += plateSum + screenSum + gridSum;
-  }
-
-  /** Returns the currents of a tube section at {@code x}; valid until the next call. */
-  SectionCurrents section(int tube, double[] x) {
-    law(tube, x);
-    return currents;
-  }
-
-  /** Returns the current of a two-pole at {@code x}. */
-  double twoPoleAmps(int pole, double[] x) {
-    TwoPole p = twoPoles.get(pole);
-    twoPoleLaws[pole].evaluate(at(x, p.anode) - at(x, p.cathode), current);
-    return current.amps;
+    devices.addTo(x, residual, jacobian);
   }
 
   /** Returns the name of the node of an unknown. */
@@ -317,83 +194,7 @@ final class DcNetwork {
     return branches.get(element);
   }
 
-  /**
-   * Lights every gas tube whose volts at {@code x} pass its strike, and puts out every lit one
-   * whose current would reverse. Returns whether any changed.
-   */
-  boolean updateGlow(double[] x) {
-    boolean changed = false;
-    for (int i = 0; i < twoPoles.size(); i++) {
-      TwoPole pole = twoPoles.get(i);
-      GasLaw gas = gasOf(pole.element);
-      if (gas == null) {
-        continue;
-      }
-      double volts = at(x, pole.anode) - at(x, pole.cathode);
-      int next = glow[i];
-      if (glow[i] == 0) {
-        boolean bothWays = pole.element instanceof GlowLamp;
-        if (volts > gas.strikeVolts()) {
-          next = 1;
-        } else if (bothWays && volts < -gas.strikeVolts()) {
-          next = -1;
-        }
-      } else if (glow[i] * twoPoleAmps(i, x) < 0) {
-        next = 0;
-      }
-      if (next != glow[i]) {
-        glow[i] = next;
-        twoPoleLaws[i] = branchOf(gas, next);
-        changed = true;
-      }
-    }
-    return changed;
-  }
-
-  private static @Nullable GasLaw gasOf(Element element) {
-    if (element instanceof RegulatorSection regulator) {
-      return regulator.law();
-    }
-    return element instanceof GlowLamp lamp ? lamp.law() : null;
-  }
-
-  /** Returns 1 (or −1, turned round) for a gas tube that glows, 0 for a dark one or other part. */
-  int glow(int pole) {
-    return glow[pole];
-  }
-
-  /** Takes over which gas tubes glow. */
-  void copyGlow(DcNetwork other) {
-    System.arraycopy(other.glow, 0, glow, 0, glow.length);
-    for (int i = 0; i < glow.length; i++) {
-      GasLaw gas = gasOf(twoPoles.get(i).element);
-      if (gas != null) {
-        twoPoleLaws[i] = branchOf(gas, glow[i]);
-      }
-    }
-  }
-
   static double at(double[] x, int unknown) {
     return unknown < 0 ? 0 : x[unknown];
-  }
-
-  private static void add(double[] target, int unknown, double amount) {
-    if (unknown >= 0) {
-      target[unknown] += amount;
-    }
-  }
-
-  private int[] run(int first, int count) {
-    int[] numbers = new int[count];
-    Arrays.setAll(numbers, i -> first + i);
-    return places(numbers);
-  }
-
-  private int[] places(int[] numbers) {
-    int[] places = new int[numbers.length];
-    for (int i = 0; i < numbers.length; i++) {
-      places[i] = matrix.place(numbers[i]);
-    }
-    return places;
   }
 }

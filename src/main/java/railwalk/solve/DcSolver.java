@@ -26,7 +26,7 @@ final class DcSolver {
       if (!settleOnce(x)) {
         return false;
       }
-      if (!net.updateGlow(x)) {
+      if (!net.devices.updateGlow(x)) {
         return true;
       }
       trace.add("a gas tube lights or goes out");

@@ -129,10 +129,10 @@ public final class Sensitivities {
       } else if (element instanceof GlowLamp g && point.lit(g.name())) {
         add(new SpreadPart.GlowVolts(g), glow(g.a(), g.b(), g.law()));
       }
-      for (int i = 0; i < dc.amplifiers.size(); i++) {
-        DcNetwork.Amplifier tube = dc.amplifiers.get(i);
+      for (int i = 0; i < dc.devices.amplifiers.size(); i++) {
+        Devices.Amplifier tube = dc.devices.amplifiers.get(i);
         if (tube.section().equals(element)) {
-          SectionCurrents c = dc.section(i, x);
+          SectionCurrents c = dc.devices.section(i, x);
           add(
               new SpreadPart.SpaceCurrent(tube.section()),
               new Source(

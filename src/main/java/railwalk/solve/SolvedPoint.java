@@ -97,9 +97,9 @@ final class SolvedPoint implements OperatingPoint {
     DcNetwork dc = solver.dc;
     double sum = 0;
     boolean found = false;
-    for (int i = 0; i < dc.twoPoles.size(); i++) {
-      if (dc.twoPoles.get(i).element().equals(element)) {
-        sum += dc.twoPoleAmps(i, solver.x);
+    for (int i = 0; i < dc.devices.twoPoles.size(); i++) {
+      if (dc.devices.twoPoles.get(i).element().equals(element)) {
+        sum += dc.devices.twoPoleAmps(i, solver.x);
         found = true;
       }
     }
@@ -135,9 +135,9 @@ final class SolvedPoint implements OperatingPoint {
     DcNetwork dc = solver.dc;
     double cathode = known(section.cathode());
     Node screen = section.screen();
-    for (int i = 0; i < dc.amplifiers.size(); i++) {
-      if (dc.amplifiers.get(i).section().equals(section)) {
-        SectionCurrents currents = dc.section(i, solver.x);
+    for (int i = 0; i < dc.devices.amplifiers.size(); i++) {
+      if (dc.devices.amplifiers.get(i).section().equals(section)) {
+        SectionCurrents currents = dc.devices.section(i, solver.x);
         return new SectionPoint(
             known(section.plate()) - cathode,
             screen == null ? Double.NaN : known(screen) - cathode,
@@ -178,9 +178,9 @@ final class SolvedPoint implements OperatingPoint {
   @Override
   public boolean lit(String elementName) {
     DcNetwork dc = solver.dc;
-    for (int i = 0; i < dc.twoPoles.size(); i++) {
-      if (dc.twoPoles.get(i).element().name().equalsIgnoreCase(elementName)) {
-        return dc.glow(i) != 0;
+    for (int i = 0; i < dc.devices.twoPoles.size(); i++) {
+      if (dc.devices.twoPoles.get(i).element().name().equalsIgnoreCase(elementName)) {
+        return dc.devices.glow(i) != 0;
       }
     }
     return false;

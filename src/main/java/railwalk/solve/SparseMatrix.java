@@ -56,6 +56,15 @@ final class SparseMatrix {
     return placeOf[number];
   }
 
+  /** Returns the places of {@code count} entries from number {@code first} on. */
+  int[] places(int first, int count) {
+    int[] places = new int[count];
+    for (int i = 0; i < count; i++) {
+      places[i] = place(first + i);
+    }
+    return places;
+  }
+
   /** Returns a zeroed value array. */
   double[] newValues() {
     return new double[rows.length + 1];

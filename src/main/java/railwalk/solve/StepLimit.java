@@ -18,7 +18,7 @@ interface StepLimit {
   static StepLimit tubes(double gridVolts, double plateVolts) {
     return (net, x, step) -> {
       double share = 1;
-      for (DcNetwork.Amplifier tube : net.amplifiers) {
+      for (Devices.Amplifier tube : net.devices.amplifiers) {
         int k = tube.cathode();
         share = Math.min(share, allowed(x, step, tube.grid(), k, gridVolts));
         share = Math.min(share, allowed(x, step, tube.plate(), k, plateVolts));
