@@ -1,25 +1,71 @@
 package railwalk.app;
 
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.function.Consumer;
 import railwalk.chart.CataloguePage;
 import railwalk.chart.Page;
+import railwalk.chart.TubePageBuilder;
 import railwalk.chart.TypePage;
 import railwalk.device.Catalogue;
 import railwalk.device.DataFile;
+import railwalk.device.TubeType;
 import railwalk.fit.TypeSheet;
+import railwalk.render.pdf.Paper;
+import railwalk.render.pdf.TubePageRenderer;
 import railwalk.render.text.TextRenderer;
 
 /** Looks things up in the catalogue of tube types. */
 public final class TubesJob {
   private TubesJob() {}
 
-  /** Returns the list of all types as text. */
-  public static String list() {
-    return print(CataloguePage.of(Catalogue.standard().types()));
+  /** Returns the list of the types asked for as text. */
+  public static String list(TubeFilter filter) throws CannotDo {
+    return print(CataloguePage.of(filter.of(Catalogue.standard())));
   }
 
   /** Returns one type's page as text. */
   public static String show(String name) throws CannotDo {
     return print(TypePage.of(TypeSheet.of(file(name))));
+  }
+
+  /** Writes one type's page to {@code target} as a PDF, whole or not at all. */
+  public static void write(String name, Path target, Paper paper) throws CannotDo {
+    write(file(name), target, paper);
+  }
+
+  /**
+   * Writes the page of every type asked for into {@code folder}, which is made when it is missing.
+   *
+   * @param progress is told of each type before its page is written: "12AX7, 3 of 118"
+   * @return how many pages there are
+   */
+  public static int writeAll(TubeFilter filter, Path folder, Paper paper, Consumer<String> progress)
+      throws CannotDo {
+    List<TubeType> types = filter.of(Catalogue.standard());
+    try {
+      Files.createDirectories(folder);
+    } catch (IOException failure) {
+      throw new CannotDo("cannot make " + folder + ": " + WholeFile.reason(failure));
+    }
+    int count = 0;
+    for (TubeType type : types) {
+      count++;
+      progress.accept(type.name() + ", " + count + " of " + types.size());
+      write(file(type.name()), folder.resolve(fileName(type.name())), paper);
+    }
+    return count;
+  }
+
+  /** Returns the name of the file that holds the page of {@code type}. */
+  private static String fileName(String type) {
+    return type.replaceAll("[^A-Za-z0-9+-]", "_") + ".pdf";
+  }
+
+  private static void write(DataFile file, Path target, Paper paper) throws CannotDo {
+    WholeFile.write(target, new TubePageRenderer().render(TubePageBuilder.of(file), paper));
   }
 
   /** Returns the data file of the type called {@code name}. */

@@ -17,4 +17,12 @@ public interface BlockVisitor {
   void visit(Remarks remarks);
 
   void visit(FillIn fillIn);
+
+  void visit(Plot plot);
+
+  void visit(BaseDrawing base);
+
+  void visit(Abreast abreast);
+
+  void visit(SmallPrint smallPrint);
 }

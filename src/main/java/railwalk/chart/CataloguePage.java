@@ -1,5 +1,6 @@
 package railwalk.chart;
 
+import java.util.Comparator;
 import java.util.List;
 import railwalk.device.Heater;
 import railwalk.device.TubeType;
@@ -19,7 +20,11 @@ public final class CataloguePage {
 
   /** Returns the page with a row for each of {@code types}. */
   public static Page of(List<TubeType> types) {
-    List<Table.Row> rows = types.stream().map(CataloguePage::row).toList();
+    List<Table.Row> rows =
+        types.stream()
+            .sorted(Comparator.comparing(TubeType::name, NaturalOrder.INSTANCE))
+            .map(CataloguePage::row)
+            .toList();
     return new Page("Tube types", List.of(Table.of("", COLUMNS, rows)));
   }
 

@@ -16,8 +16,6 @@ import railwalk.render.pdf.Paper;
 
 /** Prints the voltage chart of a netlist. */
 final class ChartCommand implements Command {
-  private static final List<String> PAPERS = List.of("a4", "letter");
-
   @Override
   public CommandSpec spec() {
     CommandSpec spec =
@@ -51,14 +49,7 @@ final class ChartCommand implements Command {
                     .description(
                         "Meter in place of the netlist's: 10M, or 20k/V, or \"20k/V 50 250 500\".")
                     .build())
-            .addOption(
-                OptionSpec.builder("--paper")
-                    .paramLabel("SIZE")
-                    .type(Paper.class)
-                    .converters(ChartCommand::paper)
-                    .completionCandidates(PAPERS)
-                    .description("a4 (used when nothing is said) or letter.")
-                    .build());
+            .addOption(PaperOption.spec());
     spec.usageMessage()
         .description(
             "Print the voltage chart of a netlist. Without --as it is written as NAME-chart.pdf in"
@@ -72,7 +63,7 @@ final class ChartCommand implements Command {
     Path netlist = given.matchedPositionalValue(0, Path.of(""));
     Optional<ChartFormat> format = Optional.ofNullable(given.matchedOptionValue("--as", null));
     Optional<Path> output = Optional.ofNullable(given.matchedOptionValue("-o", null));
-    Paper paper = given.matchedOptionValue("--paper", Paper.A4);
+    Paper paper = PaperOption.given(given);
     BenchConditions conditions =
         new BenchConditions(
             Optional.ofNullable(given.matchedOptionValue("--line", null)),
@@ -107,14 +98,6 @@ final class ChartCommand implements Command {
 
   private static ChartFormat format(String word) {
     return ChartFormat.of(word).orElseThrow(() -> notOneOf(ChartFormat.words()));
-  }
-
-  private static Paper paper(String word) {
-    return switch (PAPERS.indexOf(word.toLowerCase(Locale.ROOT))) {
-      case 0 -> Paper.A4;
-      case 1 -> Paper.LETTER;
-      default -> throw notOneOf(PAPERS);
-    };
   }
 
   private static TypeConversionException notOneOf(List<String> words) {

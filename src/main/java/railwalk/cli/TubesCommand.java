@@ -1,30 +1,140 @@
 package railwalk.cli;
 
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
 import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Model.OptionSpec;
+import picocli.CommandLine.Model.PositionalParamSpec;
 import picocli.CommandLine.ParseResult;
 import railwalk.app.CannotDo;
+import railwalk.app.TubeFilter;
 import railwalk.app.TubesJob;
+import railwalk.render.pdf.Paper;
 
-/** Lists the tube types, or shows one. */
+/** Lists the tube types, shows some, or prints their pages. */
 final class TubesCommand implements Command {
   @Override
   public CommandSpec spec() {
     CommandSpec spec =
         CommandTree.named("tubes", this)
             .addPositional(
-                CommandTree.argument(
-                    "TYPE", "0..1", "A type or one of its other names.", String.class));
+                PositionalParamSpec.builder()
+                    .paramLabel("TYPE")
+                    .index("0..*")
+                    .arity("0..*")
+                    .type(List.class)
+                    .auxiliaryTypes(String.class)
+                    .description("Types by any of their names.")
+                    .build())
+            .addOption(
+                text("--base", "BASE", "List types of this base (9A) or socket (noval, octal)."))
+            .addOption(
+                text(
+                    "--heater",
+                    "HEATER",
+                    "List types with this heater: 6.3V, 0.3A, \"6.3V 0.3A\"."))
+            .addOption(
+                OptionSpec.builder("--kind")
+                    .paramLabel("KIND")
+                    .type(String.class)
+                    .completionCandidates(TubeFilter.KINDS)
+                    .description(
+                        "List types with such a section: "
+                            + String.join(", ", TubeFilter.KINDS)
+                            + ".")
+                    .build())
+            .addOption(
+                OptionSpec.builder("-o", "--output")
+                    .paramLabel("FILE")
+                    .type(Path.class)
+                    .description("Write the type's page to this PDF.")
+                    .build())
+            .addOption(
+                OptionSpec.builder("--all")
+                    .paramLabel("FOLDER")
+                    .type(Path.class)
+                    .description(
+                        "Write the pages of all types, or of those listed, to this folder.")
+                    .build())
+            .addOption(PaperOption.spec());
     spec.usageMessage()
         .description(
-            "List the tube types, or show one with its pins, limits and how well its law meets the"
-                + " published figures.");
+            "List the tube types, or show some with their pins, limits and how well their laws meet"
+                + " the published figures, or print their pages with base, curves and published"
+                + " points.");
     return spec;
+  }
+
+  private static OptionSpec text(String name, String label, String description) {
+    return OptionSpec.builder(name)
+        .paramLabel(label)
+        .type(String.class)
+        .description(description)
+        .build();
   }
 
   @Override
   public int run(ParseResult given, Console console) throws CannotDo {
-    String type = given.matchedPositionalValue(0, "");
-    console.out().print(type.isEmpty() ? TubesJob.list() : TubesJob.show(type));
+    List<String> types = given.matchedPositionalValue(0, List.of());
+    Optional<Path> output = Optional.ofNullable(given.matchedOptionValue("-o", null));
+    Optional<Path> all = Optional.ofNullable(given.matchedOptionValue("--all", null));
+    TubeFilter filter =
+        new TubeFilter(
+            Optional.ofNullable(given.matchedOptionValue("--base", null)),
+            Optional.ofNullable(given.matchedOptionValue("--heater", null)),
+            Optional.ofNullable(given.matchedOptionValue("--kind", null)));
+    boolean filtered =
+        filter.base().isPresent() || filter.heater().isPresent() || filter.kind().isPresent();
+    if (!types.isEmpty() && (filtered || all.isPresent())) {
+      throw new CannotDo(
+          "either name types, or list them with --base, --heater, --kind, or print all with --all");
+    }
+    Paper paper = PaperOption.given(given);
+    if (all.isPresent()) {
+      if (output.isPresent()) {
+        throw new CannotDo("--all names the folder itself: leave out -o");
+      }
+      writeAll(filter, console.folder().resolve(all.get()), paper, console);
+    } else if (output.isPresent()) {
+      write(types, console.folder().resolve(output.get()), paper, console);
+    } else if (types.isEmpty()) {
+      console.out().print(TubesJob.list(filter));
+    } else {
+      for (String type : types) {
+        console.out().print(TubesJob.show(type));
+      }
+    }
     return Main.DONE;
+  }
+
+  private static void write(List<String> types, Path target, Paper paper, Console console)
+      throws CannotDo {
+    if (types.isEmpty()) {
+      throw new CannotDo("-o needs a type; --all FOLDER writes the pages of all");
+    }
+    if (types.size() > 1) {
+      throw new CannotDo("-o takes the page of one type; --all FOLDER writes the pages of all");
+    }
+    Progress.during(
+        console,
+        "drawing …",
+        () -> {
+          TubesJob.write(types.get(0), target, paper);
+          return target;
+        });
+    console.err().println("wrote " + target);
+  }
+
+  private static void writeAll(TubeFilter filter, Path folder, Paper paper, Console console)
+      throws CannotDo {
+    ProgressLine line = new ProgressLine(console);
+    try {
+      int count = TubesJob.writeAll(filter, folder, paper, line::show);
+      line.end();
+      console.err().println("wrote " + count + " pages to " + folder);
+    } finally {
+      line.end();
+    }
   }
 }

@@ -95,7 +95,7 @@ final class TypeReader {
               id,
               kind,
               laws.law(line, id, word),
-              amplifies ? ratings(id) : Ratings.NONE,
+              amplifies || kind == SectionKind.RECTIFIER ? ratings(id) : Ratings.NONE,
               kind == SectionKind.RECTIFIER ? rectifierRatings(id) : RectifierRatings.NONE,
               amplifies ? spread(id).figure(0) : Double.NaN,
               amplifies ? spread(id).figure(1) : Double.NaN));

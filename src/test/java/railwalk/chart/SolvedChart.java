@@ -131,5 +131,28 @@ final class SolvedChart {
     public void visit(FillIn fillIn) {
       texts.addAll(fillIn.labels());
     }
+
+    @Override
+    public void visit(Plot plot) {
+      texts.add(plot.title());
+      plot.curves().forEach(curve -> texts.add(curve.label()));
+    }
+
+    @Override
+    public void visit(BaseDrawing base) {
+      texts.add(base.title());
+      base.contacts().forEach(contact -> texts.add(contact.leadsTo()));
+    }
+
+    @Override
+    public void visit(Abreast abreast) {
+      abreast.left().forEach(block -> block.accept(this));
+      abreast.right().forEach(block -> block.accept(this));
+    }
+
+    @Override
+    public void visit(SmallPrint smallPrint) {
+      smallPrint.blocks().forEach(block -> block.accept(this));
+    }
   }
 }

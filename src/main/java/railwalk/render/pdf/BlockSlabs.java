@@ -1,8 +1,12 @@
 package railwalk.render.pdf;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
+import railwalk.chart.Abreast;
+import railwalk.chart.BaseDrawing;
 import railwalk.chart.Block;
 import railwalk.chart.BlockVisitor;
 import railwalk.chart.Caution;
@@ -11,7 +15,9 @@ import railwalk.chart.Heading;
 import railwalk.chart.KeyFigures;
 import railwalk.chart.Ladder;
 import railwalk.chart.Paragraph;
+import railwalk.chart.Plot;
 import railwalk.chart.Remarks;
+import railwalk.chart.SmallPrint;
 import railwalk.chart.Table;
 
 /** Sets the blocks of a page as slabs of a given width. */
@@ -24,21 +30,29 @@ final class BlockSlabs implements BlockVisitor {
   private static final double BOX_INSET = 11;
   private static final double BULLET = 9;
   private static final double FILL_IN_HEIGHT = 22;
+  private static final double COLUMN_GAP = 16;
 
   private final Faces faces;
   private final double width;
   private final double bodyHeight;
+  private final Fit fit;
   private final List<Slab> slabs = new ArrayList<>();
 
-  private BlockSlabs(Faces faces, double width, double bodyHeight) {
+  private BlockSlabs(Faces faces, double width, double bodyHeight, Fit fit) {
     this.faces = faces;
     this.width = width;
     this.bodyHeight = bodyHeight;
+    this.fit = fit;
   }
 
   /** Returns the slabs of one block. */
   static List<Slab> of(Block block, Faces faces, double width, double bodyHeight) {
-    BlockSlabs slabs = new BlockSlabs(faces, width, bodyHeight);
+    return of(block, faces, width, bodyHeight, Fit.EASY);
+  }
+
+  /** Returns the slabs of one block, set as large as {@code fit} allows. */
+  static List<Slab> of(Block block, Faces faces, double width, double bodyHeight, Fit fit) {
+    BlockSlabs slabs = new BlockSlabs(faces, width, bodyHeight, fit);
     block.accept(slabs);
     return slabs.slabs;
   }
@@ -238,5 +252,67 @@ final class BlockSlabs implements BlockVisitor {
               }));
     }
     slabs.add(Slab.of(slices));
+  }
+
+  @Override
+  public void visit(Plot plot) {
+    slabs.add(Slab.of(List.of(PlotDrawing.of(plot, faces, width, fit.plotHeight()))));
+  }
+
+  @Override
+  public void visit(BaseDrawing base) {
+    slabs.add(Slab.of(List.of(BasePicture.of(base, width))));
+  }
+
+  @Override
+  public void visit(Abreast abreast) {
+    double leftWidth = (width - COLUMN_GAP) * abreast.leftShare();
+    double rightWidth = width - COLUMN_GAP - leftWidth;
+    List<Slice> leftColumn = column(abreast.left(), leftWidth);
+    List<Slice> rightColumn = column(abreast.right(), rightWidth);
+    slabs.add(
+        Slab.of(
+            List.of(
+                Slice.of(
+                    Math.max(Slab.height(leftColumn), Slab.height(rightColumn)),
+                    (pen, left, top) -> {
+                      stack(leftColumn, pen, left, top);
+                      stack(rightColumn, pen, left + leftWidth + COLUMN_GAP, top);
+                    }))));
+  }
+
+  private List<Slice> column(List<Block> blocks, double columnWidth) {
+    List<Slice> slices = new ArrayList<>();
+    for (Block block : blocks) {
+      if (!slices.isEmpty()) {
+        slices.add(Slice.gap(fit.blockGap()));
+      }
+      for (Slab slab : of(block, faces, columnWidth, bodyHeight, fit)) {
+        slices.addAll(slab.all());
+      }
+    }
+    return slices;
+  }
+
+  private static void stack(List<Slice> slices, Pen pen, double left, double top) {
+    double y = top;
+    for (Slice slice : slices) {
+      slice.draw(pen, left, y);
+      y += slice.height();
+    }
+  }
+
+  @Override
+  public void visit(SmallPrint smallPrint) {
+    double scale = fit.smallScale();
+    for (Block block : smallPrint.blocks()) {
+      Map<Slab.Head, Slab.Head> heads = new HashMap<>();
+      for (Slab slab : of(block, faces, width / scale, bodyHeight / scale, fit)) {
+        Slab.Head head = slab.head();
+        Slab.Head small =
+            head == null ? null : heads.computeIfAbsent(head, h -> h.scaled(scale, faces));
+        slabs.add(slab.scaled(scale, small, faces));
+      }
+    }
   }
 }

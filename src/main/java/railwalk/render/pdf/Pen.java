@@ -87,7 +87,18 @@ final class Pen {
   }
 
   void disc(double x, double y, double radius) {
-    inks.add(new Ink.Fill(round(x, y, radius), Style.BLACK));
+    disc(x, y, radius, Style.BLACK);
+  }
+
+  void disc(double x, double y, double radius, double grey) {
+    inks.add(new Ink.Fill(round(x, y, radius), grey));
+  }
+
+  /** Adds what another pen drew around its own origin, {@code scale} times as large. */
+  void add(Pen drawn, double scale, double left, double top) {
+    for (Ink ink : drawn.inks) {
+      inks.add(ink.moved(scale, left, top));
+    }
   }
 
   private void box(double left, double top, double width, double height) {

@@ -40,6 +40,11 @@ record Slab(
     Slice repeated() {
       return repeated;
     }
+
+    /** Returns this head, {@code scale} times as large. */
+    Head scaled(double scale, Faces faces) {
+      return new Head(first.scaled(scale, faces), repeated.scaled(scale, faces));
+    }
   }
 
   /** Returns a slab outside tables. */
@@ -52,6 +57,30 @@ record Slab(
     List<Slice> all = new ArrayList<>(slicesBefore);
     all.addAll(lead);
     return new Slab(whole, all, head, again, slices);
+  }
+
+  /** Returns all its slices with the head as it first stands, for a place where it is not cut. */
+  List<Slice> all() {
+    List<Slice> all = new ArrayList<>(lead);
+    if (head != null) {
+      all.add(head.first());
+    }
+    all.addAll(slices);
+    return all;
+  }
+
+  /** Returns the same, {@code scale} times as large, under a head that is already so. */
+  Slab scaled(double scale, @Nullable Head scaledHead, Faces faces) {
+    return new Slab(
+        whole,
+        scaled(lead, scale, faces),
+        scaledHead,
+        again == null ? null : again.scaled(scale, faces),
+        scaled(slices, scale, faces));
+  }
+
+  private static List<Slice> scaled(List<Slice> slices, double scale, Faces faces) {
+    return slices.stream().map(slice -> slice.scaled(scale, faces)).toList();
   }
 
   static double height(List<Slice> slices) {

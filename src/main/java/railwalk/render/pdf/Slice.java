@@ -13,6 +13,20 @@ interface Slice {
     return false;
   }
 
+  /** Returns the same, {@code scale} times as large. */
+  default Slice scaled(double scale, Faces faces) {
+    if (isGap()) {
+      return gap(scale * height());
+    }
+    return of(
+        scale * height(),
+        (pen, left, top) -> {
+          Pen apart = new Pen(faces);
+          draw(apart, 0, 0);
+          pen.add(apart, scale, left, top);
+        });
+  }
+
   /** Returns empty room. */
   static Slice gap(double height) {
     return new Gap(height);

@@ -1,6 +1,10 @@
 package railwalk.render.text;
 
+import java.util.List;
 import java.util.Locale;
+import railwalk.chart.Abreast;
+import railwalk.chart.BaseDrawing;
+import railwalk.chart.Block;
 import railwalk.chart.BlockVisitor;
 import railwalk.chart.Caution;
 import railwalk.chart.FillIn;
@@ -8,7 +12,9 @@ import railwalk.chart.Heading;
 import railwalk.chart.KeyFigures;
 import railwalk.chart.Ladder;
 import railwalk.chart.Paragraph;
+import railwalk.chart.Plot;
 import railwalk.chart.Remarks;
+import railwalk.chart.SmallPrint;
 import railwalk.chart.Table;
 
 /** Each kind of block as text. */
@@ -103,6 +109,43 @@ final class BlockText implements BlockVisitor {
     int label = fillIn.labels().stream().mapToInt(TextWidth::of).max().orElse(0);
     for (String name : fillIn.labels()) {
       sheet.line(Sheet.left(name, label) + "  " + "_".repeat(36));
+    }
+  }
+
+  @Override
+  public void visit(Plot plot) {
+    PlotText.print(plot, this::visit);
+  }
+
+  @Override
+  public void visit(BaseDrawing base) {
+    sheet.ruleWith(base.title(), '-');
+    for (BaseDrawing.Contact contact : base.contacts()) {
+      if (contact.present()) {
+        sheet.hanging(Sheet.right(Integer.toString(contact.number()), 3) + "  ", contact.leadsTo());
+      }
+    }
+    if (!base.cap().isEmpty()) {
+      sheet.hanging("cap  ", base.cap());
+    }
+  }
+
+  @Override
+  public void visit(Abreast abreast) {
+    stacked(abreast.left());
+    sheet.blank();
+    stacked(abreast.right());
+  }
+
+  @Override
+  public void visit(SmallPrint smallPrint) {
+    stacked(smallPrint.blocks());
+  }
+
+  private void stacked(List<Block> blocks) {
+    for (Block block : blocks) {
+      sheet.blank();
+      block.accept(this);
     }
   }
 }
