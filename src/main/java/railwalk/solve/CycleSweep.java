@@ -151,16 +151,7 @@ final class CycleSweep {
       base[net.diagonal[n]] += drawnSiemens[n];
     }
     for (Stores.Store store : net.stores) {
-      double companion = store.size() * perStage;
-      int[] p = store.places();
-      if (store.isChoke()) {
-        base[p[0]] -= companion;
-      } else {
-        base[p[0]] += companion;
-        base[p[1]] -= companion;
-        base[p[2]] -= companion;
-        base[p[3]] += companion;
-      }
+      store.addCompanion(perStage, base);
     }
     factored = false;
   }
@@ -174,7 +165,9 @@ final class CycleSweep {
     for (Windings.Emf emf : net.emfs) {
       fixed[emf.branch()] += emf.peakVolts() * sine;
     }
-    addHistory(history, perStage, fixed);
+    for (int s = 0; s < history.length; s++) {
+      net.stores.get(s).addHistory(history[s], perStage, fixed);
+    }
     List<CycleNetwork.Path> paths = net.paths;
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
       System.arraycopy(fixed, 0, rightHandSide, 0, net.size);
@@ -228,19 +221,6 @@ final class CycleSweep {
     }
     factored = net.matrix.lu().factor(values);
     return factored;
-  }
-
-  private void addHistory(double[] history, double perStage, double[] target) {
-    for (int s = 0; s < history.length; s++) {
-      Stores.Store store = net.stores.get(s);
-      double amount = store.size() * perStage * history[s];
-      if (store.isChoke()) {
-        target[store.branch()] -= amount;
-      } else {
-        add(target, store.a(), amount);
-        add(target, store.b(), -amount);
-      }
-    }
   }
 
   private static void add(double[] target, int index, double amount) {

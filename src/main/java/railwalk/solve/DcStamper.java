@@ -20,7 +20,7 @@ import railwalk.device.SectionLaw;
  * Writes the direct-current equations of parts: coils and windings are their resistance, capacitors
  * their leak; what follows a law is noted for {@link DcNetwork} to evaluate.
  */
-final class DcStamper extends LinearStamper {
+class DcStamper extends LinearStamper {
   /** A tube section with the number of the first of its 16 entries. */
   record AmplifierDraft(
       AmplifierSection section, int plate, int screen, int grid, int cathode, int entry) {}

@@ -212,6 +212,19 @@ final class Devices {
     }
   }
 
+  /** Takes over which gas tubes glow from a network that has other parts beside them. */
+  void glowAs(Devices other) {
+    for (int i = 0; i < glow.length; i++) {
+      GasLaw gas = gasOf(twoPoles.get(i).element);
+      for (int j = 0; gas != null && j < other.glow.length; j++) {
+        if (other.twoPoles.get(j).element.name().equals(twoPoles.get(i).element.name())) {
+          glow[i] = other.glow[j];
+          twoPoleLaws[i] = branchOf(gas, glow[i]);
+        }
+      }
+    }
+  }
+
   private static void add(double[] target, int unknown, double amount) {
     if (unknown >= 0) {
       target[unknown] += amount;

@@ -69,7 +69,7 @@ final class Newton {
         step[n] = -residual[n];
       }
       net.matrix.lu().solve(step, step);
-      double share = limit.share(net, x, step);
+      double share = limit.share(net.devices, x, step);
       boolean settled = share == 1;
       double limitFactor = iteration < ROUNDING_ITERATIONS ? 1 : ROUNDING_FACTOR;
       double worst = 0;

@@ -6,19 +6,19 @@ package railwalk.solve;
  */
 interface StepLimit {
   /** Returns the share of {@code step} to take from {@code x}, above 0 up to 1. */
-  double share(DcNetwork net, double[] x, double[] step);
+  double share(Devices devices, double[] x, double[] step);
 
   /** Takes every step whole. */
-  StepLimit NONE = (net, x, step) -> 1;
+  StepLimit NONE = (devices, x, step) -> 1;
 
   /**
    * Lets grid-to-cathode volts of a tube move by {@code gridVolts} and half their size at most,
    * plate and screen volts by {@code plateVolts} and half their size.
    */
   static StepLimit tubes(double gridVolts, double plateVolts) {
-    return (net, x, step) -> {
+    return (devices, x, step) -> {
       double share = 1;
-      for (Devices.Amplifier tube : net.devices.amplifiers) {
+      for (Devices.Amplifier tube : devices.amplifiers) {
         int k = tube.cathode();
         share = Math.min(share, allowed(x, step, tube.grid(), k, gridVolts));
         share = Math.min(share, allowed(x, step, tube.plate(), k, plateVolts));

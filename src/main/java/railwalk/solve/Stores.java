@@ -2,7 +2,9 @@ package railwalk.solve;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Capacitor;
+import railwalk.circuit.Element;
 import railwalk.circuit.Inductor;
 
 /**
@@ -12,15 +14,44 @@ final class Stores {
   /**
    * A capacitor (volts across it are the state) or, with a branch, a choke (its current is).
    *
+   * @param part null for the magnetising current of a transformer
    * @param size farad or henry
    */
-  record Store(int a, int b, int branch, double size, int[] places) {
+  record Store(@Nullable Element part, int a, int b, int branch, double size, int[] places) {
     boolean isChoke() {
       return branch >= 0;
     }
+
+    /** Adds its conductance (a coil: its resistance) over a stage to a network's values. */
+    void addCompanion(double perStage, double[] values) {
+      double companion = size * perStage;
+      if (isChoke()) {
+        values[places[0]] -= companion;
+      } else {
+        values[places[0]] += companion;
+        values[places[1]] -= companion;
+        values[places[2]] -= companion;
+        values[places[3]] += companion;
+      }
+    }
+
+    /** Adds what it holds from before the stage to the right-hand side. */
+    void addHistory(double history, double perStage, double[] target) {
+      double amount = size * perStage * history;
+      if (isChoke()) {
+        target[branch] -= amount;
+        return;
+      }
+      if (a >= 0) {
+        target[a] += amount;
+      }
+      if (b >= 0) {
+        target[b] -= amount;
+      }
+    }
   }
 
-  private record Draft(int a, int b, int branch, double size, int entry) {}
+  private record Draft(@Nullable Element part, int a, int b, int branch, double size, int entry) {}
 
   private final LinearStamper stamper;
   private final List<Draft> drafts = new ArrayList<>();
@@ -34,22 +65,22 @@ final class Stores {
     int b = stamper.at(capacitor.b());
     double leak = Double.isInfinite(capacitor.leakOhms()) ? 0 : 1 / capacitor.leakOhms();
     int entry = stamper.stamps.conductance(a, b, leak);
-    drafts.add(new Draft(a, b, -1, capacitor.farads(), entry));
+    drafts.add(new Draft(capacitor, a, b, -1, capacitor.farads(), entry));
   }
 
   void stamp(Inductor inductor, double henries) {
     double ohms = Double.isNaN(inductor.dcOhms()) ? 0 : inductor.dcOhms();
     int a = stamper.at(inductor.a());
     int b = stamper.at(inductor.b());
-    stamper.branches().put(inductor, stampChoke(a, b, ohms, henries));
+    stamper.branches().put(inductor, stampChoke(inductor, a, b, ohms, henries));
   }
 
   /** Writes a coil between two unknowns and returns the unknown of its current. */
-  int stampChoke(int a, int b, double ohms, double henries) {
+  int stampChoke(@Nullable Element part, int a, int b, double ohms, double henries) {
     int branch = stamper.stamps.newBranch();
     stamper.stamps.branch(branch, a, b, ohms, 0);
     int entry = stamper.stamps.entry(branch, branch, 0);
-    drafts.add(new Draft(a, b, branch, henries, entry));
+    drafts.add(new Draft(part, a, b, branch, henries, entry));
     return branch;
   }
 
@@ -58,7 +89,7 @@ final class Stores {
     List<Store> stores = new ArrayList<>(drafts.size());
     for (Draft d : drafts) {
       int[] places = matrix.places(d.entry, d.branch >= 0 ? 1 : 4);
-      stores.add(new Store(d.a, d.b, d.branch, d.size, places));
+      stores.add(new Store(d.part, d.a, d.b, d.branch, d.size, places));
     }
     return stores;
   }

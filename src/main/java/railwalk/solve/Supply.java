@@ -101,6 +101,11 @@ final class Supply {
     meterSiemens[net.at(node)] = siemens;
   }
 
+  /** Returns the state of store {@code number} at the start of the period. */
+  double startState(int number) {
+    return states[number];
+  }
+
   /** Returns the mean volts of a node over the last sweep. */
   double meanVolts(Node node) {
     return sweep.means[net.at(node)];

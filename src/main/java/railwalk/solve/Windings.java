@@ -114,7 +114,7 @@ final class Windings {
     double share = 1 / (1 + transformer.primaryOhms() * siemens);
     double ohms = share * transformer.primaryOhms();
     double omega = 2 * Math.PI * circuit.line().hertz();
-    int core = stores.stampChoke(-1, -1, ohms, MAGNETISING_RATIO * ohms / omega);
+    int core = stores.stampChoke(null, -1, -1, ohms, MAGNETISING_RATIO * ohms / omega);
     for (Coupled k : sections) {
       for (Coupled j : sections) {
         stamper.stamps.entry(k.branch, j.branch, -k.turnsRatio * j.turnsRatio * ohms);
