@@ -9,12 +9,13 @@ import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.CircuitBuilder;
+import railwalk.circuit.Node;
 import railwalk.walk.Walk;
 
 /**
  * Seeded random supplies of twelve arrangements, values over decades and loads from none to
- * overload: all must settle, whatever they look like. A short run goes with every build, the long
- * one with the {@code slow} profile.
+ * overload: all must settle in both engines, whatever they look like, and to the same volts. A
+ * short run goes with every build, the long one with the {@code slow} profile.
  */
 class SupplyCampaignTest {
   private static final String[] ARRANGEMENTS = {
@@ -34,28 +35,74 @@ class SupplyCampaignTest {
 
   @Test
   void shortRunSettles() {
-    run(120);
+    run(204);
   }
 
   @Test
   @Tag("slow")
   void longRunSettles() {
-    run(1800);
+    run(2004);
   }
 
+  /** What a supply came to. */
+  private record Tally(int all, int settled, int compared, double worst) {}
+
   private static void run(int count) {
-    Map<String, int[]> settledAndAll = new TreeMap<>();
+    Map<String, Tally> tallies = new TreeMap<>();
     for (int seed = 0; seed < count; seed++) {
       String arrangement = ARRANGEMENTS[seed % ARRANGEMENTS.length];
       Circuit circuit = supply(arrangement, new Random(seed));
-      CoupledSolver solver = new CoupledSolver(circuit, Walk.of(circuit), false);
-      int[] tally = settledAndAll.computeIfAbsent(arrangement, key -> new int[2]);
-      tally[0] += solver.startCold() && solver.settle() ? 1 : 0;
-      tally[1]++;
+      Tally before = tallies.getOrDefault(arrangement, new Tally(0, 0, 0, 0));
+      SolveOutcome outcome = OperatingPointSolver.solve(circuit, Walk.of(circuit));
+      boolean settled = outcome instanceof SolveOutcome.Solved;
+      double difference = Double.NaN;
+      if (outcome instanceof SolveOutcome.Solved solved) {
+        difference = difference(solved.point(), seed);
+      }
+      boolean compared = !Double.isNaN(difference);
+      tallies.put(
+          arrangement,
+          new Tally(
+              before.all + 1,
+              before.settled + (settled ? 1 : 0),
+              before.compared + (compared ? 1 : 0),
+              compared ? Math.max(before.worst, difference) : before.worst));
     }
-    settledAndAll.forEach(
-        (name, tally) -> System.out.printf("%-26s %d of %d settle%n", name, tally[0], tally[1]));
-    assertThat(settledAndAll.values()).allSatisfy(t -> assertThat(t[0]).isEqualTo(t[1]));
+    tallies.forEach(
+        (name, t) ->
+            System.out.printf(
+                "%-26s %d of %d settle, %d in time too, engines differ by %.2f of 1 %% at most%n",
+                name, t.settled, t.all, t.compared, t.worst));
+    assertThat(tallies.values())
+        .allSatisfy(
+            t -> {
+              assertThat(t.settled).isEqualTo(t.all);
+              assertThat(t.compared).isEqualTo(t.all);
+              assertThat(t.worst).isLessThanOrEqualTo(1);
+            });
+  }
+
+  /**
+   * Returns the greatest difference between the engines over all nodes, as a share of 1 % of the
+   * node's volts or 0.05 V, whichever is more; NaN when time stepping does not settle.
+   */
+  private static double difference(OperatingPoint averaged, int seed) {
+    if (!(TimeStepping.of(averaged) instanceof CycleOutcome.Settled settled)) {
+      System.out.printf("seed %d does not settle in time%n", seed);
+      return Double.NaN;
+    }
+    double worst = 0;
+    for (Node node : averaged.circuit().nodes()) {
+      double mean = settled.cycle().meanVolts(node);
+      double limit = Math.max(0.05, 0.01 * Math.abs(mean));
+      double difference = Math.abs(averaged.volts(node) - mean) / limit;
+      if (difference > 1) {
+        System.out.printf(
+            "seed %d, %s: %.4f against %.4f V%n", seed, node.name(), averaged.volts(node), mean);
+      }
+      worst = Math.max(worst, Double.isNaN(difference) ? 0 : difference);
+    }
+    return worst;
   }
 
   private static double between(Random random, double low, double high) {
