@@ -4,15 +4,18 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Consumer;
+import railwalk.chart.Alternative;
+import railwalk.chart.Alternatives;
 import railwalk.chart.CataloguePage;
 import railwalk.chart.Page;
+import railwalk.chart.StagesIdle;
 import railwalk.chart.TubePageBuilder;
 import railwalk.chart.TypePage;
 import railwalk.device.Catalogue;
 import railwalk.device.DataFile;
 import railwalk.device.TubeType;
-import railwalk.fit.TypeSheet;
 import railwalk.render.pdf.Paper;
 import railwalk.render.pdf.TubePageRenderer;
 import railwalk.render.text.TextRenderer;
@@ -26,9 +29,19 @@ public final class TubesJob {
     return print(CataloguePage.of(filter.of(Catalogue.standard())));
   }
 
-  /** Returns one type's page as text. */
-  public static String show(String name) throws CannotDo {
-    return print(TypePage.of(TypeSheet.of(file(name))));
+  /**
+   * Returns one type's page as text.
+   *
+   * @param netlist an amplifier in which its alternatives are tried
+   */
+  public static String show(String name, Optional<Path> netlist) throws CannotDo {
+    DataFile file = file(name);
+    List<Alternative> alternatives = Alternatives.of(file, Catalogue.standard().types());
+    Optional<StagesIdle> idle = Optional.empty();
+    if (netlist.isPresent()) {
+      idle = Optional.of(Substitutes.of(file.type(), alternatives, netlist.get()));
+    }
+    return print(TypePage.of(file, alternatives, idle));
   }
 
   /** Writes one type's page to {@code target} as a PDF, whole or not at all. */

@@ -3,11 +3,14 @@ package railwalk.chart;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.Collectors;
+import railwalk.device.DataFile;
 import railwalk.device.PinUse;
 import railwalk.device.TubeType;
 import railwalk.fit.Comparison;
 import railwalk.fit.TypeSheet;
+import railwalk.units.Quantity;
 
 /**
  * One tube type on a page: what it is, its pins, its ratings, and every published figure beside
@@ -24,24 +27,54 @@ public final class TypePage {
           new Table.Column("Law", Table.Use.FIGURES),
           new Table.Column("Off by %", Table.Use.FIGURES));
 
+  private static final List<Table.Column> ALTERNATIVE_COLUMNS =
+      List.of(
+          new Table.Column("Type", Table.Use.WORDS),
+          new Table.Column("What would change", Table.Use.WORDS));
+  private static final List<Table.Column> IDLE_COLUMNS =
+      List.of(
+          new Table.Column("Fitted", Table.Use.WORDS),
+          new Table.Column("Section", Table.Use.WORDS),
+          new Table.Column("Plate current", Table.Use.FIGURES),
+          new Table.Column("Plate to cathode", Table.Use.FIGURES),
+          new Table.Column("Plate watts", Table.Use.WORDS));
+
   private final TypeSheet sheet;
   private final TubeType type;
+  private final List<Alternative> alternatives;
+  private final Optional<StagesIdle> idle;
 
-  private TypePage(TypeSheet sheet) {
-    this.sheet = sheet;
+  private TypePage(DataFile file, List<Alternative> alternatives, Optional<StagesIdle> idle) {
+    this.sheet = TypeSheet.of(file);
     this.type = sheet.type();
+    this.alternatives = alternatives;
+    this.idle = idle;
   }
 
-  /** Returns the page of the type on {@code sheet}. */
-  public static Page of(TypeSheet sheet) {
-    return new TypePage(sheet).page();
+  /**
+   * Returns the page of the type in {@code file}.
+   *
+   * @param alternatives types that come near it, nearest first
+   * @param idle how an amplifier's stages idle with each of them
+   */
+  public static Page of(DataFile file, List<Alternative> alternatives, Optional<StagesIdle> idle) {
+    return new TypePage(file, alternatives, idle).page();
   }
 
   private Page page() {
     List<Block> blocks = new ArrayList<>();
     blocks.add(new Paragraph(type.summary()));
     blocks.add(new KeyFigures(new TypeFacts(type).withOtherNames()));
-    blocks.add(Table.of("Pins, seen from below", PIN_COLUMNS, pins()));
+    if (type.pins().isEmpty()) {
+      blocks.add(new Heading("Pins, seen from below"));
+      blocks.add(new Paragraph("Pins not confirmed: use electrodes."));
+    } else {
+      blocks.add(Table.of("Pins, seen from below", PIN_COLUMNS, pins()));
+    }
+    if (!alternatives.isEmpty()) {
+      blocks.add(Table.of("Where it is not at hand", ALTERNATIVE_COLUMNS, alternativeRows()));
+    }
+    idle.ifPresent(stages -> blocks.add(idle(stages)));
     if (!sheet.rows().isEmpty()) {
       blocks.add(Table.of("How the law meets the published figures", LAW_COLUMNS, law()));
     }
@@ -58,6 +91,32 @@ public final class TypePage {
   private static Table.Row pin(Map.Entry<Integer, PinUse> pin) {
     String label = pin.getKey() == 0 ? "cap" : Integer.toString(pin.getKey());
     return new Table.Row(label, PinWords.of(pin.getValue()));
+  }
+
+  private List<Table.Row> alternativeRows() {
+    return alternatives.stream()
+        .map(a -> new Table.Row(a.type().name(), String.join("; ", a.changes())))
+        .toList();
+  }
+
+  private static Table idle(StagesIdle stages) {
+    List<Table.Row> rows = new ArrayList<>();
+    String before = "";
+    for (StageIdle stage : stages.sections()) {
+      rows.add(
+          new Table.Row(
+              stage.type().equals(before) ? "" : stage.type(),
+              stage.section(),
+              Quantity.amps(stage.plateAmps()),
+              Quantity.volts(stage.plateVolts()),
+              Share.of(stage.plateWatts(), stage.plateWattsMax())));
+      before = stage.type();
+    }
+    List<String> notes = List.of("Fitted electrode for electrode, its heater fed as it should be.");
+    return new Table(
+        "Idling in " + stages.netlist(),
+        IDLE_COLUMNS,
+        List.of(new Table.Group("", "", rows, notes)));
   }
 
   private List<Table.Row> law() {

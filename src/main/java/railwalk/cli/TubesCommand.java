@@ -8,6 +8,7 @@ import picocli.CommandLine.Model.OptionSpec;
 import picocli.CommandLine.Model.PositionalParamSpec;
 import picocli.CommandLine.ParseResult;
 import railwalk.app.CannotDo;
+import railwalk.app.SocketJob;
 import railwalk.app.TubeFilter;
 import railwalk.app.TubesJob;
 import railwalk.render.pdf.Paper;
@@ -45,6 +46,21 @@ final class TubesCommand implements Command {
                             + ".")
                     .build())
             .addOption(
+                OptionSpec.builder("--in")
+                    .paramLabel("NETLIST")
+                    .type(Path.class)
+                    .description(
+                        "Show how this amplifier idles with each of the types that could stand in.")
+                    .build())
+            .addOption(
+                OptionSpec.builder("--socket")
+                    .paramLabel("NETLIST")
+                    .type(Path.class)
+                    .description(
+                        "List types that go with the wires of a socket in this amplifier: name the"
+                            + " tube (V2), or the wires (1=p1 2=g1 3=k1), in place of a type.")
+                    .build())
+            .addOption(
                 OptionSpec.builder("-o", "--output")
                     .paramLabel("FILE")
                     .type(Path.class)
@@ -78,17 +94,30 @@ final class TubesCommand implements Command {
   public int run(ParseResult given, Console console) throws CannotDo {
     List<String> types = given.matchedPositionalValue(0, List.of());
     Optional<Path> output = Optional.ofNullable(given.matchedOptionValue("-o", null));
+    Optional<Path> netlist = Optional.ofNullable(given.matchedOptionValue("--in", null));
     Optional<Path> all = Optional.ofNullable(given.matchedOptionValue("--all", null));
     TubeFilter filter =
         new TubeFilter(
             Optional.ofNullable(given.matchedOptionValue("--base", null)),
             Optional.ofNullable(given.matchedOptionValue("--heater", null)),
             Optional.ofNullable(given.matchedOptionValue("--kind", null)));
+    Optional<Path> socket = Optional.ofNullable(given.matchedOptionValue("--socket", null));
     boolean filtered =
         filter.base().isPresent() || filter.heater().isPresent() || filter.kind().isPresent();
+    if (socket.isPresent()) {
+      if (all.isPresent() || output.isPresent() || netlist.isPresent()) {
+        throw new CannotDo("--socket makes a list: leave out --in, --all and -o");
+      }
+      Progress.Job<String> search = () -> SocketJob.of(socket.get(), types, filter);
+      console.out().print(Progress.during(console, "solving …", search));
+      return Main.DONE;
+    }
     if (!types.isEmpty() && (filtered || all.isPresent())) {
       throw new CannotDo(
           "either name types, or list them with --base, --heater, --kind, or print all with --all");
+    }
+    if (netlist.isPresent() && (types.isEmpty() || output.isPresent())) {
+      throw new CannotDo("--in goes with the name of a type to replace, and without -o");
     }
     Paper paper = PaperOption.given(given);
     if (all.isPresent()) {
@@ -102,7 +131,9 @@ final class TubesCommand implements Command {
       console.out().print(TubesJob.list(filter));
     } else {
       for (String type : types) {
-        console.out().print(TubesJob.show(type));
+        console
+            .out()
+            .print(Progress.during(console, "solving …", () -> TubesJob.show(type, netlist)));
       }
     }
     return Main.DONE;
