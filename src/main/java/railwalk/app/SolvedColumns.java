@@ -20,11 +20,16 @@ import railwalk.walk.Walk;
 final class SolvedColumns {
   private SolvedColumns() {}
 
+  /** Returns the amplifier as its netlist stands, solved. */
+  static Column first(TracedAmplifier amplifier) throws CannotDo {
+    return column("", amplifier.circuit(), amplifier.origins());
+  }
+
   /** Returns all columns of {@code amplifier}; refuses where one would not settle. */
   static List<Column> of(TracedAmplifier amplifier) throws CannotDo {
     Circuit circuit = amplifier.circuit();
     List<Column> columns = new ArrayList<>();
-    columns.add(column("", circuit, amplifier.origins()));
+    columns.add(first(amplifier));
     for (State state : circuit.states()) {
       columns.add(column(state.name(), circuit.inState(state), amplifier.origins()));
     }

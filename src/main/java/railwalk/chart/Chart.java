@@ -7,7 +7,7 @@ import java.util.List;
  * and add nothing.
  *
  * @param title of the amplifier, as its netlist gives it
- * @param fileName of the netlist
+ * @param subject what the document is: "Voltage chart of weirside.cir"
  * @param conditionsLine the conditions in one line, for the head of every sheet
  * @param standingCaution one sentence for the foot of every sheet
  * @param pages in reading order
@@ -16,7 +16,7 @@ import java.util.List;
  */
 public record Chart(
     String title,
-    String fileName,
+    String subject,
     String conditionsLine,
     String standingCaution,
     List<Page> pages,

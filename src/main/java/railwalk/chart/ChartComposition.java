@@ -47,7 +47,7 @@ final class ChartComposition {
     pages.add(new NotesPage(input, findings).page());
     return new Chart(
         circuit.title(),
-        input.fileName(),
+        "Voltage chart of " + input.fileName(),
         conditions.inOneLine(),
         Cautions.standing(),
         pages,

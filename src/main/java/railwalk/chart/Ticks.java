@@ -30,6 +30,14 @@ final class Ticks {
     return reach < 0 ? new Plot.Axis(title, -end, 0, step) : new Plot.Axis(title, 0, end, step);
   }
 
+  /** Returns an axis from a round number below {@code low} to one above {@code high}. */
+  static Plot.Axis around(String title, double low, double high, int most) {
+    double step = step(high - low, most);
+    double from = Math.floor(low / step + SLACK) * step;
+    double to = Math.ceil(high / step - SLACK) * step;
+    return new Plot.Axis(title, from, to, step);
+  }
+
   /** Returns the multiples of {@code step} from {@code from} to {@code to}. */
   static List<Double> between(double from, double to, double step) {
     List<Double> ticks = new ArrayList<>();

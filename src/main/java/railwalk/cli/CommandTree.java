@@ -15,6 +15,7 @@ final class CommandTree {
           new ChartCommand(),
           new CheckCommand(),
           new WalkCommand(),
+          new SettleCommand(),
           new TubesCommand(),
           new FitCommand(),
           new CompletionCommand());

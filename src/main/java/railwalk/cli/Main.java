@@ -78,7 +78,7 @@ public final class Main {
     err.println(command + ": " + misspelt.getMessage());
     if (misspelt instanceof UnmatchedArgumentException unmatched
         && !unmatched.getSuggestions().isEmpty()) {
-      err.println("did you mean " + String.join(", ", unmatched.getSuggestions()) + "?");
+      err.println("did you mean " + unmatched.getSuggestions().get(0) + "?");
     }
     err.println("'" + command + " --help' lists what it takes");
     return COULD_NOT;

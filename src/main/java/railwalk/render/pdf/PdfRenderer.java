@@ -17,7 +17,7 @@ public final class PdfRenderer {
   /** Returns the document. */
   public byte[] render(Chart chart, Paper paper) {
     Faces faces = Faces.load();
-    PdfFile file = new PdfFile(chart.title(), "Voltage chart of " + chart.fileName(), PRODUCT);
+    PdfFile file = new PdfFile(chart.title(), chart.subject(), PRODUCT);
     return file.bytes(layOut(chart, paper, faces), faces, paper);
   }
 
@@ -121,9 +121,7 @@ public final class PdfRenderer {
           }
           y += -leading + Style.TITLE * 0.3 + Style.HEADING + 3;
           pen.text(
-              faces
-                  .breaker(Ink.Face.REGULAR, Style.HEADING)
-                  .clipped("Voltage chart of " + chart.fileName(), width),
+              faces.breaker(Ink.Face.REGULAR, Style.HEADING).clipped(chart.subject(), width),
               Ink.Face.REGULAR,
               Style.HEADING,
               left,

@@ -11,7 +11,7 @@ public final class TextRenderer {
     Sheet sheet = new Sheet();
     sheet.rule('=');
     sheet.paragraph(chart.title(), 0);
-    sheet.paragraph("Voltage chart of " + chart.fileName(), 0);
+    sheet.paragraph(chart.subject(), 0);
     sheet.paragraph(chart.conditionsLine(), 0);
     sheet.rule('=');
     for (Page page : chart.pages()) {

@@ -1,0 +1,58 @@
+package railwalk.cli;
+
+import java.nio.file.Path;
+import java.util.Optional;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Model.OptionSpec;
+import picocli.CommandLine.ParseResult;
+import railwalk.app.BenchConditions;
+import railwalk.app.CannotDo;
+import railwalk.app.SettleJob;
+import railwalk.render.pdf.Paper;
+
+/** Steps a netlist through time until it settles. */
+final class SettleCommand implements Command {
+  @Override
+  public CommandSpec spec() {
+    CommandSpec spec =
+        CommandTree.named("settle", this)
+            .addPositional(
+                CommandTree.argument("NETLIST", "1", "The amplifier as traced.", Path.class))
+            .addOption(
+                OptionSpec.builder("-o", "--output")
+                    .paramLabel("FILE")
+                    .type(Path.class)
+                    .description("Write a PDF with curves to this file as well.")
+                    .build())
+            .addOption(
+                OptionSpec.builder("--line")
+                    .paramLabel("VOLTS")
+                    .type(String.class)
+                    .description("Line volts in place of the netlist's.")
+                    .build())
+            .addOption(PaperOption.spec());
+    spec.usageMessage()
+        .description(
+            "Step the whole netlist through time, no average taken, until one line period is like"
+                + " the next: means, ripple, winding and rectifier currents, inverse volts.");
+    return spec;
+  }
+
+  @Override
+  public int run(ParseResult given, Console console) throws CannotDo {
+    Path netlist = given.matchedPositionalValue(0, Path.of(""));
+    Optional<Path> output = Optional.ofNullable(given.matchedOptionValue("-o", null));
+    Paper paper = PaperOption.given(given);
+    BenchConditions conditions =
+        new BenchConditions(
+            Optional.ofNullable(given.matchedOptionValue("--line", null)), Optional.empty());
+    SettleJob job = Progress.during(console, "stepping …", () -> SettleJob.of(netlist, conditions));
+    if (output.isPresent()) {
+      Path target = console.folder().resolve(output.get());
+      job.write(target, paper);
+      console.err().println("wrote " + target);
+    }
+    console.out().print(job.print());
+    return Main.DONE;
+  }
+}
