@@ -46,7 +46,7 @@ record TracedAmplifier(
       throw new CannotDo(file + " is a folder, not a netlist");
     }
     try {
-      return NetlistReader.read(file, Catalogue.standard());
+      return NetlistReader.read(file, Catalogue.standard(), new GivenTubes());
     } catch (IOException failure) {
       throw new CannotDo("cannot read " + file + ": " + WholeFile.reason(failure));
     }

@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
 import java.util.stream.Collectors;
@@ -93,12 +94,13 @@ public final class DataFile {
   }
 
   /**
-   * Returns the file read from {@code text}.
+   * Returns the file read from {@code text}; {@link #type} and {@link #points} read further into
+   * it.
    *
    * @param others finds the file of the type that a {@code like} line names, or throws
    * @throws DataFileException when the text contradicts itself, with the place
    */
-  static DataFile read(SourceText text, Function<String, DataFile> others) {
+  public static DataFile read(SourceText text, Function<String, DataFile> others) {
     List<DataLine> own = DataLine.of(text);
     Map<String, List<DataLine>> lines = new LinkedHashMap<>();
     for (DataLine line : own) {
@@ -150,6 +152,17 @@ public final class DataFile {
   public boolean borrowsLaw() {
     return lines.containsKey("like")
         && own.stream().noneMatch(l -> l.key().equals("fit") || l.key().equals("point"));
+  }
+
+  /** Returns the file of the type that the {@code like} line names. */
+  public Optional<DataFile> like() {
+    List<DataLine> like = all("like");
+    return like.isEmpty() ? Optional.empty() : Optional.of(others.apply(like.get(0).word(0)));
+  }
+
+  /** Returns whether the law of a section is still to be fitted to the points. */
+  public boolean wantsFit() {
+    return all("fit").isEmpty() && !likeSections().isEmpty();
   }
 
   /** Returns where figures come from: the sources' texts by their ids. */

@@ -40,6 +40,7 @@ final class DataLine {
           Map.entry("dc", Measure.CURRENT),
           Map.entry("minimum", Measure.CURRENT),
           Map.entry("maximum", Measure.CURRENT),
+          Map.entry("gm", Measure.CONDUCTANCE),
           Map.entry("platewatts", Measure.POWER),
           Map.entry("screenwatts", Measure.POWER),
           Map.entry("cathode", Measure.RESISTANCE),

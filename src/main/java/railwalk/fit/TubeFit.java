@@ -51,7 +51,8 @@ public final class TubeFit {
     return new Refit(String.join("\n", file.with(lines).text().lines()), sheet);
   }
 
-  private static String constants(String word, List<PublishedPoint> points) {
+  /** Returns the {@code name=value} words of a fit line for sections of kind {@code word}. */
+  static String constants(String word, List<PublishedPoint> points) {
     if (word.equals("rectifier") || word.equals("diode")) {
       StringBuilder words = new StringBuilder();
       Curve.append(words, "perveance", PerveanceFit.perveance(word, points));

@@ -14,6 +14,7 @@ import railwalk.source.SourceText;
  * @param subcircuits by name, lower case
  * @param models {@code .model} lines by the model's name, lower case
  * @param orders {@code .order} lines by the tube type's name, lower case
+ * @param types tube types that the netlist gives, in file order
  * @param globals names of nodes that sub-circuits share, lower case
  * @param files every text read, in order of reading
  */
@@ -25,5 +26,20 @@ record Deck(
     Map<String, Subcircuit> subcircuits,
     Map<String, Card> models,
     Map<String, Card> orders,
+    List<TypeSource> types,
     List<String> globals,
-    List<SourceText> files) {}
+    List<SourceText> files) {
+
+  /** Where tube types come from. */
+  sealed interface TypeSource {
+    /** A {@code .tube} line. */
+    record Line(Card card) implements TypeSource {}
+
+    /**
+     * A file of types.
+     *
+     * @param word the netlist's word that names it
+     */
+    record File(SourceText file, Word word) implements TypeSource {}
+  }
+}

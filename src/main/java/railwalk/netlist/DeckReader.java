@@ -39,7 +39,9 @@ final class DeckReader {
           ".subckt",
           ".ends",
           ".include",
-          ".order");
+          ".order",
+          ".tube",
+          ".tubes");
 
   /** Dot words of SPICE-style netlists that ask for an analysis or an output: passed over. */
   private static final Set<String> ANALYSIS =
@@ -83,6 +85,7 @@ final class DeckReader {
   private final Map<String, Subcircuit> subcircuits = new LinkedHashMap<>();
   private final Map<String, Card> models = new HashMap<>();
   private final Map<String, Card> orders = new HashMap<>();
+  private final List<Deck.TypeSource> types = new ArrayList<>();
   private final List<String> globals = new ArrayList<>();
   private final List<SourceText> files = new ArrayList<>();
   private final List<SourceFile> open = new ArrayList<>();
@@ -122,7 +125,7 @@ final class DeckReader {
           String.join(", ", passedOver.keySet()));
     }
     return new Deck(
-        title, parts, settings, parameters, subcircuits, models, orders, globals, files);
+        title, parts, settings, parameters, subcircuits, models, orders, types, globals, files);
   }
 
   private void take(SourceFile file, int firstLine) {
@@ -172,7 +175,8 @@ final class DeckReader {
       case ".model" -> named(card, models);
       case ".order" -> named(card, orders);
       case ".global" -> card.words().forEach(w -> globals.add(w.text().toLowerCase(Locale.ROOT)));
-      case ".tube", ".tubes" -> report.add(Problem.TUBE_LINE, card.head().span(), word);
+      case ".tube" -> types.add(new Deck.TypeSource.Line(card));
+      case ".tubes" -> include(card, file);
       case ".control" -> {
         commands = card;
         passedOver.putIfAbsent(word, card.head().span());
@@ -256,6 +260,11 @@ final class DeckReader {
         whole ? first.text() : words.stream().map(Word::text).collect(Collectors.joining(" "));
     Includes.Outcome outcome = includes.find(written, file);
     if (outcome instanceof Includes.Outcome.Found found) {
+      if (card.isDot(".tubes")) {
+        files.add(found.file().text());
+        types.add(new Deck.TypeSource.File(found.file().text(), first));
+        return;
+      }
       boolean circle = open.stream().anyMatch(o -> samePath(o, found.file()));
       if (circle || open.size() > DEEPEST_INCLUDE || files.size() > MOST_FILES) {
         report.add(Problem.INCLUDE_CIRCLE, first.span(), written);

@@ -20,30 +20,48 @@ public final class NetlistReader {
   private NetlistReader() {}
 
   /**
-   * Reads a netlist and the files it includes.
+   * Reads a netlist and the files it includes; types that it gives by points stay without a law.
    *
    * @throws IOException when {@code file} itself cannot be read
    */
   public static NetlistResult read(Path file, Catalogue catalogue) throws IOException {
+    return read(file, catalogue, LawFitter.NONE);
+  }
+
+  /**
+   * Reads a netlist and the files it includes.
+   *
+   * @param fitter makes the laws of types that the netlist gives
+   * @throws IOException when {@code file} itself cannot be read
+   */
+  public static NetlistResult read(Path file, Catalogue catalogue, LawFitter fitter)
+      throws IOException {
     String name = String.valueOf(file.getFileName());
     if (Files.size(file) > FileBytes.LARGEST_BYTES) {
       return refused(Problem.NOT_A_NETLIST, name, FAR_TOO_LARGE);
     }
     SourceText text = SourceText.of(name, FileBytes.decode(Files.readAllBytes(file)));
-    return read(new SourceFile(text, file.toRealPath()), Includes.of(file), catalogue);
+    return read(new SourceFile(text, file.toRealPath()), Includes.of(file), catalogue, fitter);
   }
 
   /** Reads netlist text that stands alone: an include in it is noted and passed over. */
   public static NetlistResult readText(String fileName, String text, Catalogue catalogue) {
+    return readText(fileName, text, catalogue, LawFitter.NONE);
+  }
+
+  /** Reads netlist text that stands alone, with what makes the laws of types that it gives. */
+  public static NetlistResult readText(
+      String fileName, String text, Catalogue catalogue, LawFitter fitter) {
     if (text.length() > FileBytes.LARGEST_BYTES) {
       return refused(Problem.NOT_A_NETLIST, fileName, FAR_TOO_LARGE);
     }
     String plain = text.startsWith("\ufeff") ? text.substring(1) : text;
     SourceText source = SourceText.of(fileName, plain);
-    return read(new SourceFile(source, null), Includes.none(), catalogue);
+    return read(new SourceFile(source, null), Includes.none(), catalogue, fitter);
   }
 
-  private static NetlistResult read(SourceFile file, Includes includes, Catalogue catalogue) {
+  private static NetlistResult read(
+      SourceFile file, Includes includes, Catalogue catalogue, LawFitter fitter) {
     String name = file.text().fileName();
     Optional<String> foreign = FileBytes.foreignKind(String.join("\n", file.text().lines()));
     if (foreign.isPresent()) {
@@ -57,7 +75,8 @@ public final class NetlistReader {
     }
     Report report = new Report();
     Deck deck = DeckReader.read(file, includes, report);
-    CircuitAssembler.Assembled assembled = CircuitAssembler.assemble(deck, catalogue, report);
+    Catalogue types = GivenTypes.before(catalogue, deck, fitter, report);
+    CircuitAssembler.Assembled assembled = CircuitAssembler.assemble(deck, types, report);
     return new NetlistResult(
         assembled.circuit(), assembled.origins(), assembled.report().inOrder(deck.files()));
   }

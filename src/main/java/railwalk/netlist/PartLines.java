@@ -191,7 +191,8 @@ final class PartLines {
     Subcircuit subcircuit = subcircuit(last);
     Optional<TubeType> type = draft.catalogue().find(last.text());
     boolean modelOfType = subcircuit != null && ElectrodeOrder.looksLikeTube(subcircuit);
-    if (type.isPresent() && (subcircuit == null || isExactly(type.get(), last) || modelOfType)) {
+    if (type.isPresent()
+        && (subcircuit == null || GivenTypes.isExactly(type.get(), last.text()) || modelOfType)) {
       TubeByPosition.read(part, type.get(), last);
       return;
     }
@@ -205,11 +206,6 @@ final class PartLines {
       return;
     }
     unknownType(last);
-  }
-
-  private static boolean isExactly(TubeType type, Word word) {
-    return type.name().equalsIgnoreCase(word.text())
-        || type.aliases().stream().anyMatch(alias -> alias.equalsIgnoreCase(word.text()));
   }
 
   private @Nullable Subcircuit subcircuit(Word name) {
@@ -239,6 +235,9 @@ final class PartLines {
   }
 
   private void unknownType(Word word) {
+    if (draft.catalogue() instanceof GivenTypes given && given.isGiven(word.text())) {
+      return;
+    }
     Set<String> names = draft.deck().subcircuits().keySet();
     List<String> near = new ArrayList<>(draft.catalogue().near(word.text()));
     near.addAll(NearNames.near(word.text(), names));

@@ -297,10 +297,38 @@ enum Problem {
       WARNING,
       "this block of commands is never ended, so all that follows is passed over",
       ".endc closes it"),
-  TUBE_LINE(
+  TUBE_KEY(ERROR, "%1$s means nothing on a .tube line", "%2$s"),
+  TUBE_KEY_TWICE(ERROR, "%1$s is given twice", ""),
+  TUBE_WORD(ERROR, "%1$s=%2$s: there is no such word", "one of %3$s"),
+  TUBE_SIGN(ERROR, "%1$s: %2$s of a tube type is above zero here", "grid volts alone go below"),
+  TUBE_TWICE(ERROR, "type %1$s is given on line %2$d already", ""),
+  TUBE_REPLACES(NOTE, "%1$s as given here takes the place of the catalogue's", ""),
+  TUBE_LIKE(ERROR, "there is no type %1$s that this one could be like", "%2$s"),
+  TUBE_EMPTY(
       ERROR,
-      "%1$s: types come from the catalogue alone",
-      "use a type that it has, or a stand-in: UNKNOWN plate=… cathode=… draws plate=…"),
+      "nothing is said of %1$s that a law could be made of",
+      "a type that it is like, or a point: plate=250 grid=-2 current=1.2mA"),
+  TUBE_BASE(ERROR, "no type of the catalogue has the base %1$s", "%2$s"),
+  TUBE_BASE_MISSING(
+      ERROR,
+      "%1$s: what base has it?",
+      "base=9A, a kind of socket such as base=octal, or like= a type of the same base"),
+  TUBE_PINS_BY_BASE(NOTE, "pins of %1$s by the base %2$s, as the %3$s has them", ""),
+  TUBE_PINS_OPEN(
+      NOTE,
+      "the pins of %1$s are not known, so it can be wired by electrode alone",
+      "1=plate 2=grid 3=cathode on its .tube line"),
+  TUBE_HEATER(ERROR, "%1$s is no heater", "volts and amperes: heater=6.3V,0.3A"),
+  TUBE_DATA(ERROR, "%1$s: %2$s", "%3$s"),
+  TUBE_FIT_POOR(
+      WARNING,
+      "the law of %1$s misses a current given for it by %2$d %%",
+      "points of one tube, and their units right?"),
+  TUBES_FILE(
+      ERROR,
+      "%1$s stands before the first type line",
+      "a file of types is read as the catalogue's own are: type NAME, then its lines"),
+  TUBES_FILE_EMPTY(ERROR, "there is no type in %1$s", "type NAME begins one"),
   SETTING_TWICE(WARNING, "%1$s stands on line %2$d already", "the last one counts"),
   SETTING_EMPTY(ERROR, "%1$s: something is missing", "%2$s"),
   LINE_NOT_STATED(

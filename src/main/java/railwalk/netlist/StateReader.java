@@ -157,6 +157,9 @@ final class StateReader {
     }
     Optional<TubeType> type = draft.catalogue().find(value.text());
     if (type.isEmpty()) {
+      if (draft.catalogue() instanceof GivenTypes given && given.isGiven(value.text())) {
+        return null;
+      }
       draft
           .report()
           .add(

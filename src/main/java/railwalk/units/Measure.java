@@ -7,6 +7,7 @@ public enum Measure {
   INDUCTANCE("an inductance", "10H", "henry"),
   VOLTAGE("a voltage", "450V", "volt"),
   CURRENT("a current", "150mA", "ampere"),
+  CONDUCTANCE("a conductance", "1.6mS", "siemens"),
   POWER("a power", "1/2W", "watt"),
   FREQUENCY("a frequency", "60Hz", "hertz"),
   SHARE("a share or percentage", "40%", "per cent"),

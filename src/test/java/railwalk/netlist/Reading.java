@@ -7,17 +7,27 @@ import railwalk.circuit.Circuit;
 import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.device.Catalogue;
+import railwalk.device.DataFile;
+import railwalk.fit.GivenTubeFit;
+import railwalk.fit.TypeSheet;
 import railwalk.source.Diagnostic;
 import railwalk.source.DiagnosticPrinter;
 
 /** Short ways to read a netlist in a test. */
 final class Reading {
+  /** Fits types that a netlist gives, as the program does. */
+  static final LawFitter FITTER =
+      file -> {
+        DataFile fitted = GivenTubeFit.fitted(file);
+        return new LawFitter.Fitted(fitted, TypeSheet.of(fitted).worstErrorShare());
+      };
+
   private Reading() {}
 
   /** Returns what comes of these lines below a title. */
   static NetlistResult read(String... lines) {
     return NetlistReader.readText(
-        "test.cir", "* test\n" + String.join("\n", lines) + "\n", Catalogue.standard());
+        "test.cir", "* test\n" + String.join("\n", lines) + "\n", Catalogue.standard(), FITTER);
   }
 
   /** Returns the circuit of these lines; there must be no error. */
