@@ -171,20 +171,29 @@ final class ConditionsPage {
   }
 
   private String bandText(Spread spread) {
-    String tubes =
-        Double.isNaN(spread.tube())
-            ? "each {tube} type’s own limits"
-            : "{tube} current ±" + Quantity.percent(spread.tube());
+    String tubes = spread.usedTubes() ? "used {tubes} −35 % to +20 %" : newTubes(spread);
+    String resistors =
+        spread.carbonResistors()
+            ? "carbon-composition resistors −"
+                + Quantity.percent(spread.resistor() - Spread.CARBON_DRIFT)
+                + " to +"
+                + Quantity.percent(spread.resistor() + Spread.CARBON_DRIFT)
+            : "resistors ±" + Quantity.percent(spread.resistor());
     return wording.say(
-        "nine healthy amplifiers in ten fall between: first order, ±1.645 standard deviations, with"
-            + " resistors ±"
-            + Quantity.percent(spread.resistor())
+        "nine healthy amplifiers in ten fall between: first order, ±1.645 standard deviations, with "
+            + resistors
             + " where no tolerance is given, "
             + tubes
             + ", windings ±"
             + Quantity.percent(spread.winding())
             + ", {line} ±"
             + Quantity.percent(spread.line()));
+  }
+
+  private static String newTubes(Spread spread) {
+    return Double.isNaN(spread.tube())
+        ? "each {tube} type’s own limits"
+        : "{tube} current ±" + Quantity.percent(spread.tube());
   }
 
   private static KeyFigures.Entry plain(String label, String text) {

@@ -24,9 +24,11 @@ import railwalk.source.SourceText;
  * base     9A noval                    base code and kind of socket
  * heater   12.6V 0.15A tap=6.3V        further lines: other rated connections; direct, joined
  * section  A triode                    id (none when it is the only one) and
- *                                      triode, pentode, beam, rectifier, regulator or diode
+ *                                      triode, pentode, beam, rectifier, vapour (a mercury-vapour
+ *                                      rectifier), regulator or diode
  * pin      1 A plate                   number or cap, section id (none when all share it),
- *                                      electrode, or empty, internal, shield, sleeve
+ *                                      electrode, or empty, internal, shield, sleeve; pins with
+ *                                      "jumper internal" are joined inside
  * pins     none                        no source for the pins is known: electrodes only
  * strap    4 8                         pins to be wired together at the socket, since it is not
  *                                      known whether they are joined inside

@@ -31,6 +31,7 @@ final class DataLine {
           Map.entry("rms", Measure.VOLTAGE),
           Map.entry("inverse", Measure.VOLTAGE),
           Map.entry("strike", Measure.VOLTAGE),
+          Map.entry("drop", Measure.VOLTAGE),
           Map.entry("operating", Measure.VOLTAGE),
           Map.entry("regulation", Measure.VOLTAGE),
           Map.entry("current", Measure.CURRENT),

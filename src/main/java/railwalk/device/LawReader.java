@@ -20,7 +20,8 @@ final class LawReader {
           "gridperveance",
           "gridstart",
           "gridslope",
-          "perveance");
+          "perveance",
+          "drop");
 
   private final DataFile file;
 
@@ -34,6 +35,7 @@ final class LawReader {
       case "triode" -> triode(fit(line, id, word));
       case "pentode", "beam" -> pentode(fit(line, id, word));
       case "regulator" -> gas(file.one("gas"));
+      case "vapour" -> new VapourLaw(constant(fit(line, id, word), "drop"));
       default -> new RectifierLaw(constant(fit(line, id, word), "perveance"));
     };
   }

@@ -13,6 +13,7 @@ import java.util.TreeMap;
  */
 final class PinReader {
   private static final String CAP = "cap";
+  private static final String JUMPER = "jumper";
 
   private static final Map<String, PinUse.Role> ROLES =
       Map.of(
@@ -36,7 +37,8 @@ final class PinReader {
       line.allow(Set.of());
       int number = line.word(0).equals(CAP) ? 0 : (int) line.figure(0);
       String id = line.size() > 2 ? line.word(1) : "";
-      if (!id.isEmpty() && !file.sectionIds().contains(id)) {
+      boolean jumper = id.equals(JUMPER) && line.word(2).equals("internal");
+      if (!id.isEmpty() && !jumper && !file.sectionIds().contains(id)) {
         throw line.error(1, "no section " + id, "");
       }
       PinUse use = pinUse(line, id, line.word(line.size() > 2 ? 2 : 1));

@@ -123,13 +123,13 @@ final class TypeReader {
     return switch (word) {
       case "triode" -> SectionKind.TRIODE;
       case "pentode", "beam" -> SectionKind.PENTODE;
-      case "rectifier" -> SectionKind.RECTIFIER;
+      case "rectifier", "vapour" -> SectionKind.RECTIFIER;
       case "regulator" -> SectionKind.REGULATOR;
       case "diode" -> SectionKind.DIODE;
       default ->
           throw line.error(
               "no such kind of section: " + word,
-              "one of triode, pentode, beam, rectifier, regulator, diode");
+              "one of triode, pentode, beam, rectifier, vapour, regulator, diode");
     };
   }
 

@@ -3,6 +3,7 @@ package railwalk.fit;
 import java.util.List;
 import railwalk.device.PublishedPoint;
 import railwalk.device.RectifierLaw;
+import railwalk.device.VapourLaw;
 
 /**
  * The one constant of a three-halves-power diode from its published drops: the weighted mean of ln
@@ -19,6 +20,9 @@ final class PerveanceFit {
 
   private static final double PRIOR_WIDTH = 3;
 
+  /** Drop of a mercury arc: common practice. */
+  private static final double USUAL_ARC_VOLTS = 15;
+
   private PerveanceFit() {}
 
   /** Returns the published drop beside the law's at the same current. */
@@ -26,6 +30,25 @@ final class PerveanceFit {
     double drop = Math.pow(point.published().plateAmps() / law.perveance(), 2.0 / 3);
     double tolerance = DROP / Comparer.weight(point);
     return new Comparison(point, FigureKind.DROP, point.setup().plateVolts(), drop, tolerance);
+  }
+
+  /** Returns the published drop of a mercury-vapour plate beside the law's. */
+  static Comparison compare(VapourLaw law, PublishedPoint point) {
+    double drop = law.volts(point.published().plateAmps());
+    double tolerance = DROP / Comparer.weight(point);
+    return new Comparison(point, FigureKind.DROP, point.setup().plateVolts(), drop, tolerance);
+  }
+
+  /** Returns the weighted mean of the published drops of a mercury-vapour plate, volt. */
+  static double arcDrop(List<PublishedPoint> points) {
+    double weights = 0;
+    double sum = 0;
+    for (PublishedPoint point : points) {
+      double weight = Comparer.weight(point) * Comparer.weight(point);
+      weights += weight;
+      sum += weight * point.setup().plateVolts();
+    }
+    return weights == 0 ? USUAL_ARC_VOLTS : sum / weights;
   }
 
   /** Returns K, ampere per volt^1.5. */

@@ -53,6 +53,11 @@ public final class TubeFit {
 
   /** Returns the {@code name=value} words of a fit line for sections of kind {@code word}. */
   static String constants(String word, List<PublishedPoint> points) {
+    if (word.equals("vapour")) {
+      StringBuilder words = new StringBuilder();
+      Curve.append(words, "drop", PerveanceFit.arcDrop(points));
+      return words.toString();
+    }
     if (word.equals("rectifier") || word.equals("diode")) {
       StringBuilder words = new StringBuilder();
       Curve.append(words, "perveance", PerveanceFit.perveance(word, points));

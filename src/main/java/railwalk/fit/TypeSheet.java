@@ -9,6 +9,7 @@ import railwalk.device.RectifierLaw;
 import railwalk.device.SectionLaw;
 import railwalk.device.SectionType;
 import railwalk.device.TubeType;
+import railwalk.device.VapourLaw;
 
 /**
  * One type as a sheet: pins, ratings and heater through {@code type}, and every published figure
@@ -45,6 +46,9 @@ public record TypeSheet(TubeType type, List<Comparison> rows, List<String> sourc
     }
     if (law instanceof RectifierLaw rectifier) {
       return points.stream().map(p -> PerveanceFit.compare(rectifier, p)).toList();
+    }
+    if (law instanceof VapourLaw vapour) {
+      return points.stream().map(p -> PerveanceFit.compare(vapour, p)).toList();
     }
     return List.of();
   }

@@ -259,6 +259,14 @@ enum Problem {
   SUPPRESSOR_TIED(NOTE, "suppressor not listed, so taken as tied to the cathode: %1$s", ""),
   ELECTRODE_OPEN(WARNING, "%1$s: nothing is wired to the %2$s%3$s", ""),
   TIE_POINT_IN_USE(WARNING, "pin %1$d of the %2$s is no free tie point: it leads to %3$s", ""),
+  PIN_CAUTION(
+      WARNING,
+      "%1$s is wired by pin; of the %2$s mind this: %3$s",
+      "compare the socket's wiring with the pins on the chart"),
+  PIN_STRAP(
+      WARNING,
+      "%1$s: it is not known whether pins %2$s of the %3$s are joined inside",
+      "wire them together at the socket, and list them all"),
   NO_SECTION(WARNING, "%1$s does nothing: no plate or grid of the %2$s is wired", ""),
   BOTTLE_OF_TWO_TYPES(ERROR, "%1$s is %2$s on line %3$d and %4$s here", ""),
   STAND_IN(
@@ -339,11 +347,17 @@ enum Problem {
   TRANSFORMER_TWICE(ERROR, "there are two transformers %1$s", ""),
   METER_SPEC(ERROR, "%1$s describes no meter", "10M, or 20k/V and its ranges"),
   SPREAD_LIMIT(ERROR, "%1$s is no limit", "per cent are wanted: 10%%"),
+  SPREAD_WORD(ERROR, "%1$s is no kind of spread", "%2$s or %3$s"),
+  SPREAD_BOTH(
+      ERROR,
+      "used tubes and limits for new ones in one line",
+      "tubes=used, or tube= and its per cent"),
   WORDS_UNKNOWN(ERROR, "there are no %1$s words", "british or american"),
   STATE_EMPTY(WARNING, "state %1$s changes nothing", "S1=open V3=out V5=GZ34 P1=0.2 line=108"),
   STATE_LINE(ERROR, "a state sets other line volts, but the netlist states none", ".line 120 60"),
   STATE_OF_PART(
       ERROR, "a state cannot set %1$s", "switches, tubes, controls and the line can be set"),
+  STATE_LOOK_ALIKE(WARNING, "%1$s is another tube than %2$s (the %3$s: %4$s)", ""),
   STATE_SOCKET(ERROR, "%1$s (%2$s) does not go into the socket of %3$s (%4$s)", "");
 
   private final Severity severity;

@@ -237,8 +237,23 @@ final class Settings {
     double tube = limit(part, "tube", spread.tube());
     double winding = limit(part, "winding", spread.winding());
     double line = limit(part, "line", spread.line());
+    Word tubes = part.option("tubes");
+    Word resistors = part.option("resistors");
     part.done();
-    spread = new Spread(resistor, tube, winding, line);
+    boolean used = isChosen(tubes, "used", "new");
+    boolean carbon = isChosen(resistors, "carbon", "film");
+    if (tubes != null && used && !Double.isNaN(tube)) {
+      draft.report().add(Problem.SPREAD_BOTH, tubes.span());
+    }
+    spread = new Spread(resistor, tube, winding, line, used, carbon);
+  }
+
+  /** Returns whether {@code word} is the first of the two that may stand there; reports others. */
+  private boolean isChosen(@Nullable Word word, String first, String other) {
+    if (word != null && !word.is(first) && !word.is(other)) {
+      draft.report().add(Problem.SPREAD_WORD, word.span(), word.text(), first, other);
+    }
+    return word != null && word.is(first);
   }
 
   private double limit(PartCard part, String key, double usual) {

@@ -178,6 +178,29 @@ final class StateReader {
               Problem.STATE_SOCKET, value.span(), type.get().name(), family, bottle.name(), socket);
       return null;
     }
+    TubeType.LookAlike other = lookAlike(bottle.type(), type.get());
+    other = other == null ? lookAlike(type.get(), bottle.type()) : other;
+    if (other != null) {
+      draft
+          .report()
+          .add(
+              Problem.STATE_LOOK_ALIKE,
+              value.span(),
+              type.get().name(),
+              bottle.type().name(),
+              other.type(),
+              other.difference());
+    }
     return new StateChange.TubeFitted(bottle.name(), type.get());
+  }
+
+  /** Returns what the data of {@code type} say of {@code other}; null when nothing. */
+  private static TubeType.@Nullable LookAlike lookAlike(TubeType type, TubeType other) {
+    for (TubeType.LookAlike known : type.care().lookAlikes()) {
+      if (GivenTypes.isExactly(other, known.type())) {
+        return known;
+      }
+    }
+    return null;
   }
 }

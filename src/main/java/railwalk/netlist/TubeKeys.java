@@ -28,6 +28,7 @@ final class TubeKeys {
     KINDS.put("pentode", SectionKind.PENTODE);
     KINDS.put("beam", SectionKind.PENTODE);
     KINDS.put("rectifier", SectionKind.RECTIFIER);
+    KINDS.put("vapour", SectionKind.RECTIFIER);
     KINDS.put("regulator", SectionKind.REGULATOR);
     for (String word : List.of("like", "base", "heater", "spread", "system")) {
       key(word, Group.TYPE, null);
@@ -96,6 +97,12 @@ final class TubeKeys {
 
   private static void key(String name, Group group, @Nullable Measure measure) {
     KEYS.put(name, new Key(name, group, measure, List.of()));
+  }
+
+  /** Returns whether sections of {@code kind} amplify. */
+  static boolean amplifies(String kind) {
+    SectionKind known = KINDS.get(kind);
+    return known == SectionKind.TRIODE || known == SectionKind.PENTODE;
   }
 
   /** Sorts {@code option} in; what is wrong with it is reported to {@code line}. */

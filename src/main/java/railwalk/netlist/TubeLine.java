@@ -152,7 +152,7 @@ final class TubeLine {
     }
     if (like == null) {
       type.line("summary", span).word(kind + " of this netlist", span);
-      if (!kind.equals("rectifier") && !kind.equals("regulator") && keys.word("spread") == null) {
+      if (TubeKeys.amplifies(kind) && keys.word("spread") == null) {
         type.line("spread", span).word(USUAL_SPREAD, span);
       }
     }

@@ -154,6 +154,9 @@ final class TubeRack {
               ? Socket.byPins(entry.name, entry.type, entry.pins, inside)
               : Socket.byLeads(entry.name, entry.type, entry.wiring, entry.leads, inside);
       bottles.add(fitting.bottle());
+      if (entry.wiring == Bottle.Wiring.BY_PIN) {
+        mind(entry);
+      }
       for (Element element : fitting.elements()) {
         String section = element.name().substring(entry.name.length());
         int place = entry.sectionPlaces.getOrDefault(section, entry.place);
@@ -161,6 +164,24 @@ final class TubeRack {
       }
       if (!entry.spoilt) {
         fitting.remarks().forEach(remark -> report(entry, remark));
+      }
+    }
+  }
+
+  /** Says what the type's data would have people mind who wire it by pin. */
+  private void mind(Entry entry) {
+    for (String caution : entry.type.care().cautions()) {
+      draft.report().add(Problem.PIN_CAUTION, entry.span, entry.name, entry.type.name(), caution);
+    }
+    for (List<Integer> strap : entry.type.care().straps()) {
+      int wired = 0;
+      StringBuilder pins = new StringBuilder();
+      for (int pin : strap) {
+        wired += entry.pins.containsKey(pin) ? 1 : 0;
+        pins.append(pins.length() == 0 ? "" : ", ").append(pin);
+      }
+      if (wired > 0 && wired < strap.size()) {
+        draft.report().add(Problem.PIN_STRAP, entry.span, entry.name, pins, entry.type.name());
       }
     }
   }
