@@ -100,6 +100,9 @@ class SocketTest {
   @Test
   void everyTypeOfTheCatalogueFitsItsOwnSocketWithoutARemark() {
     for (TubeType type : Catalogue.standard().types()) {
+      if (type.pins().isEmpty()) {
+        continue;
+      }
       SortedMap<Integer, Node> pins = new TreeMap<>();
       type.pins()
           .forEach(
