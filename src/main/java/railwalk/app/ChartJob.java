@@ -2,6 +2,7 @@ package railwalk.app;
 
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.List;
 import railwalk.chart.Chart;
 import railwalk.chart.ChartBuilder;
 import railwalk.chart.ChartInput;
@@ -24,10 +25,24 @@ public final class ChartJob {
 
   /** Makes the chart of {@code netlist} under the bench's conditions. */
   public static ChartJob of(Path netlist, BenchConditions conditions) throws CannotDo {
+    return of(netlist, conditions, false);
+  }
+
+  /**
+   * Makes the chart of {@code netlist} under the bench's conditions.
+   *
+   * @param lineSweep whether it has a page with the main points at 90 to 110 % of the line
+   */
+  public static ChartJob of(Path netlist, BenchConditions conditions, boolean lineSweep)
+      throws CannotDo {
     TracedAmplifier traced = TracedAmplifier.read(netlist).allKnown();
     TracedAmplifier amplifier = traced.with(conditions.applyTo(traced.circuit()));
     ChartInput input =
-        new ChartInput(amplifier.fileName(), SolvedColumns.of(amplifier), amplifier.diagnostics());
+        new ChartInput(
+            amplifier.fileName(),
+            SolvedColumns.of(amplifier),
+            amplifier.diagnostics(),
+            lineSweep ? LineSweep.of(amplifier.circuit()) : List.of());
     return new ChartJob(new ChartBuilder().build(input));
   }
 

@@ -44,6 +44,9 @@ final class ChartComposition {
     if (!input.states().isEmpty()) {
       pages.add(new StatesPage(input, figures, wording).page());
     }
+    if (!input.otherLines().isEmpty()) {
+      pages.add(new LinePage(first, input.otherLines(), wording).page());
+    }
     pages.add(new NotesPage(input, findings).page());
     return new Chart(
         circuit.title(),

@@ -49,6 +49,10 @@ final class ChartCommand implements Command {
                     .description(
                         "Meter in place of the netlist's: 10M, or 20k/V, or \"20k/V 50 250 500\".")
                     .build())
+            .addOption(
+                OptionSpec.builder("--line-sweep")
+                    .description("Add a page with the main points at 90 to 110 % of the line.")
+                    .build())
             .addOption(PaperOption.spec());
     spec.usageMessage()
         .description(
@@ -71,7 +75,9 @@ final class ChartCommand implements Command {
     if (format.isEmpty() && output.isPresent()) {
       refuseOtherSuffix(output.get());
     }
-    ChartJob job = Progress.during(console, "solving …", () -> ChartJob.of(netlist, conditions));
+    boolean lineSweep = given.hasMatchedOption("--line-sweep");
+    ChartJob job =
+        Progress.during(console, "solving …", () -> ChartJob.of(netlist, conditions, lineSweep));
     if (output.isPresent() || format.orElse(ChartFormat.PDF) == ChartFormat.PDF) {
       Path target = console.folder().resolve(output.orElse(Path.of(ChartJob.pdfName(netlist))));
       job.write(target, format.orElse(ChartFormat.PDF), paper);
