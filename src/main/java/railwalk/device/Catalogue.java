@@ -10,6 +10,11 @@ public interface Catalogue {
     return ResourceCatalogue.Holder.STANDARD;
   }
 
+  /** Returns the names of all types, sorted; aliases are not among them. */
+  default List<String> names() {
+    return types().stream().map(TubeType::name).toList();
+  }
+
   /** Returns all types, sorted by name. */
   List<TubeType> types();
 

@@ -146,6 +146,11 @@ final class DataLine {
     return text.line(number).substring(words.get(index).column - 1).strip();
   }
 
+  /** Returns all that follows the key, as it was written. */
+  String rest() {
+    return text.line(number).strip().substring(key.text.length()).strip();
+  }
+
   /** Returns the names of the options, in the line's order. */
   Set<String> optionNames() {
     return options.keySet();

@@ -54,6 +54,12 @@ final class FigureCheck {
 
   private void checkResiduals() {
     List<DataLine> points = file.all("point");
+    Set<String> told = new HashSet<>();
+    for (DataLine line : points) {
+      if (!told.add(line.rest())) {
+        throw line.error("the very same point stands above", "");
+      }
+    }
     List<DataLine> residuals = file.all("residual");
     Set<Integer> seen = new HashSet<>();
     for (DataLine line : residuals) {

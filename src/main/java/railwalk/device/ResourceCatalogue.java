@@ -18,6 +18,9 @@ import railwalk.source.SourceText;
 final class ResourceCatalogue implements Catalogue {
   private static final String INDEX = "index";
 
+  /** Key of the index lines that list names of other tubes. */
+  private static final String NOT = "not";
+
   private final List<String> names;
   private final Map<String, List<String>> aliases = new HashMap<>();
   private final TypeNames typeNames = new TypeNames();
@@ -26,11 +29,20 @@ final class ResourceCatalogue implements Catalogue {
   ResourceCatalogue() {
     List<DataLine> index = DataLine.of(text(INDEX));
     for (DataLine line : index) {
+      if (line.key().equals(NOT)) {
+        line.words().forEach(typeNames::exclude);
+        continue;
+      }
       typeNames.put(line.key(), line.key());
       aliases.put(line.key(), line.words());
       line.words().forEach(alias -> typeNames.put(alias, line.key()));
     }
-    names = index.stream().map(DataLine::key).sorted().toList();
+    names = aliases.keySet().stream().sorted().toList();
+  }
+
+  @Override
+  public List<String> names() {
+    return names;
   }
 
   @Override

@@ -1,6 +1,7 @@
 package railwalk.device;
 
 import java.util.Comparator;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
@@ -17,6 +18,12 @@ final class TypeNames {
           "GTY", "WGT", "WGTA", "WXT");
 
   private final Map<String, String> typeByName = new LinkedHashMap<>();
+  private final Set<String> others = new HashSet<>();
+
+  /** Keeps {@code name} from being taken for an issue of the type that its stem names. */
+  void exclude(String name) {
+    others.add(name.toUpperCase(Locale.ROOT));
+  }
 
   /** Adds {@code name} as a name of {@code type}. */
   void put(String name, String type) {
@@ -36,6 +43,9 @@ final class TypeNames {
     String untagged = (underscore > 0 ? name.substring(0, underscore) : name).replace("-", "");
     if (typeByName.containsKey(name)) {
       return Optional.of(typeByName.get(name));
+    }
+    if (others.contains(untagged)) {
+      return Optional.empty();
     }
     for (int cut = untagged.length(); cut > 0; cut--) {
       String type = typeByName.get(untagged.substring(0, cut));
@@ -67,21 +77,34 @@ final class TypeNames {
         .toList();
   }
 
-  /** Returns how many letters must be put in, taken out or exchanged (Levenshtein 1966). */
+  /**
+   * Returns how many letters must be put in, taken out, exchanged for another or with their
+   * neighbour (F. J. Damerau, Communications of the ACM 7/3, 1964).
+   */
   private static int distance(String a, String b) {
-    int[] row = new int[b.length() + 1];
+    int[] before = new int[b.length() + 1];
+    int[] last = new int[b.length() + 1];
     for (int j = 0; j <= b.length(); j++) {
-      row[j] = j;
+      last[j] = j;
     }
     for (int i = 1; i <= a.length(); i++) {
-      int diagonal = row[0];
+      int[] row = new int[b.length() + 1];
       row[0] = i;
       for (int j = 1; j <= b.length(); j++) {
-        int exchange = diagonal + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
-        diagonal = row[j];
-        row[j] = Math.min(exchange, 1 + Math.min(row[j], row[j - 1]));
+        int exchange = last[j - 1] + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
+        row[j] = Math.min(exchange, 1 + Math.min(row[j - 1], last[j]));
+        boolean swapped =
+            i > 1
+                && j > 1
+                && a.charAt(i - 1) == b.charAt(j - 2)
+                && a.charAt(i - 2) == b.charAt(j - 1);
+        if (swapped) {
+          row[j] = Math.min(row[j], before[j - 2] + 1);
+        }
       }
+      before = last;
+      last = row;
     }
-    return row[b.length()];
+    return last[b.length()];
   }
 }

@@ -139,7 +139,7 @@ final class TypeReader {
     boolean direct = false;
     boolean joined = false;
     for (DataLine line : file.all("heater")) {
-      line.allow(Set.of("tap"));
+      line.allow(Set.of("tap", "source"));
       connections.add(new Heater.Connection(line.figure(0), line.figure(1)));
       tapVolts = line.figure("tap", tapVolts);
       for (int i = 2; i < line.size(); i++) {

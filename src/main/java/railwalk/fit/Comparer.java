@@ -15,7 +15,7 @@ final class Comparer {
   private static final double CUT_OFF_SHARE = 0.05;
 
   private static final double CURRENT = 0.02;
-  private static final double CATHODE_CURRENT = 0.04;
+  private static final double CATHODE_CURRENT = 0.008;
   private static final double SCREEN_CURRENT = 0.08;
   private static final double BIAS = 0.05;
   private static final double SLOPE = 0.08;

@@ -59,6 +59,7 @@ record Curve(String word, List<Constant> constants, Function<double[], Amplifier
   private static final Curve PENTODE =
       screenGrid(
           "pentode",
+          shift("contact", 0.2, 0.5),
           scale("lambda", 30, 1),
           scale("screenshare", 0.1, 0.6),
           scale("screenrise", 0.05, 0.6));
@@ -66,12 +67,13 @@ record Curve(String word, List<Constant> constants, Function<double[], Amplifier
   private static final Curve BEAM =
       screenGrid(
           "beam",
+          shift("contact", 0.2, 0.3),
           scale("lambda", 20, 0.7),
           scale("screenshare", 0.02, 0.6),
           scale("screenrise", 0.2, 0.6));
 
   private static Curve screenGrid(
-      String word, Constant lambda, Constant screenShare, Constant screenRise) {
+      String word, Constant contact, Constant lambda, Constant screenShare, Constant screenRise) {
     return new Curve(
         word,
         List.of(
@@ -80,7 +82,7 @@ record Curve(String word, List<Constant> constants, Function<double[], Amplifier
             scale("kg", 1000, 3),
             scale("kp", 4, 0.4),
             scale("kvb", 300, 0.7),
-            shift("contact", 0.2, 0.3),
+            contact,
             lambda,
             scale("knee", 0.07, 0.2),
             screenShare,

@@ -5,5 +5,6 @@ package railwalk.fit;
  *
  * @param dataFile the type's data file with the new constants in place of the old
  * @param sheet how well they meet the points
+ * @param borrowed whether law and points are another type's, and the file stays as it is
  */
-public record Refit(String dataFile, TypeSheet sheet) {}
+public record Refit(String dataFile, TypeSheet sheet, boolean borrowed) {}

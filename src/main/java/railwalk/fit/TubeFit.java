@@ -36,7 +36,7 @@ public final class TubeFit {
 
   private static Refit refit(DataFile file) {
     if (file.borrowsLaw()) {
-      return new Refit(String.join("\n", file.text().lines()), TypeSheet.of(file));
+      return new Refit(String.join("\n", file.text().lines()), TypeSheet.of(file), true);
     }
     List<String> lines = new ArrayList<>();
     List<LikeSections> groups = file.likeSections();
@@ -48,7 +48,7 @@ public final class TubeFit {
     DataFile fitted = file.with(lines);
     TypeSheet sheet = TypeSheet.of(fitted);
     lines.addAll(residuals(fitted, sheet));
-    return new Refit(String.join("\n", file.with(lines).text().lines()), sheet);
+    return new Refit(String.join("\n", file.with(lines).text().lines()), sheet, false);
   }
 
   /** Returns the {@code name=value} words of a fit line for sections of kind {@code word}. */

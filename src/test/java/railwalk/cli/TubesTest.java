@@ -4,8 +4,11 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 import railwalk.device.Catalogue;
 import railwalk.device.TubeType;
 
@@ -122,12 +125,24 @@ class TubesTest {
 
   /** Nothing in the catalogue is typed in: fitting again gives the very file. */
   @Test
-  void fitReproducesTheDataFile() throws IOException {
-    Run run = Run.of("fit", "ECC83");
+  void fitReproducesTheDataFile(@TempDir Path folder) throws IOException {
+    Run run = Run.of("fit", "ECC83", "ECL82", "--write", folder.toString());
     assertThat(run.code()).isZero();
-    try (var file = Catalogue.class.getResourceAsStream("12AX7.tube")) {
-      assertThat(file).isNotNull();
-      assertThat(run.out()).isEqualTo(new String(file.readAllBytes(), StandardCharsets.UTF_8));
+    assertThat(run.out()).startsWith("12AX7: worst current").contains("ECL82: worst current");
+    for (String name : List.of("12AX7.tube", "ECL82.tube")) {
+      try (var file = Catalogue.class.getResourceAsStream(name)) {
+        assertThat(file).isNotNull();
+        assertThat(Files.readString(folder.resolve(name)))
+            .isEqualTo(new String(file.readAllBytes(), StandardCharsets.UTF_8));
+      }
     }
+  }
+
+  @Test
+  void fitWantsTypesOrAll() {
+    assertThat(Run.of("fit").err()).contains("--all");
+    assertThat(Run.of("fit", "12AX7", "--all").code()).isEqualTo(2);
+    assertThat(Run.of("fit", "12AX8").err()).contains("unknown tube type 12AX8");
+    assertThat(Run.of("fit", "12AX7", "--write", "no/such/folder").err()).contains("no folder");
   }
 }

@@ -1,8 +1,11 @@
 package railwalk.device;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.fail;
 
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Random;
 import java.util.function.DoubleUnaryOperator;
 import java.util.stream.Stream;
@@ -28,26 +31,34 @@ class AmplifierLawTest {
     }
   }
 
+  /** Every law of the catalogue once: unlike sections each, like ones and borrowed laws once. */
   static Stream<Named> laws() {
-    return Catalogue.standard().types().stream()
-        .flatMap(
-            t ->
-                t.sections().stream()
-                    .limit(1)
-                    .filter(s -> s.law() instanceof AmplifierLaw)
-                    .map(s -> new Named(t.name(), (AmplifierLaw) s.law())));
+    Map<AmplifierLaw, Named> laws = new LinkedHashMap<>();
+    for (TubeType type : Catalogue.standard().types()) {
+      for (SectionType section : type.sections()) {
+        if (section.law() instanceof AmplifierLaw law) {
+          laws.putIfAbsent(law, new Named((type.name() + " " + section.id()).strip(), law));
+        }
+      }
+    }
+    return laws.values().stream();
   }
 
+  /** 1e-5 of the slope or 1e-10 S, whichever is larger; 1e-3 within 1 mV of no plate volts. */
   @ParameterizedTest
   @MethodSource("laws")
   void derivativesAgreeWithCentralDifferences(Named named) {
     Random random = new Random(20_260_101);
     SectionCurrents at = new SectionCurrents();
     double worst = 0;
+    String where = "";
     for (int i = 0; i < TRIALS; i++) {
       Volts v = volts(random);
+      if (i % 50 == 0) {
+        v = new Volts(4e-3 * (random.nextDouble() - 0.5), v.screen, v.grid);
+      }
+      boolean nearCorner = Math.abs(v.plate) <= 1e-3;
       named.law.evaluate(v.plate, v.screen, v.grid, at);
-      double scale = at.plateAmps + at.screenAmps + at.gridAmps;
       List<double[]> pairs =
           List.of(
               slopes(named.law, v, at.plateByPlateSiemens, c -> c.plateAmps, 0),
@@ -60,12 +71,16 @@ class AmplifierLawTest {
               slopes(named.law, v, at.gridByScreenSiemens, c -> c.gridAmps, 1),
               slopes(named.law, v, at.gridByGridSiemens, c -> c.gridAmps, 2));
       for (double[] pair : pairs) {
-        double error = Math.abs(pair[0] - pair[1]) / (1e-12 + 0.01 * scale + Math.abs(pair[0]));
-        worst = Math.max(worst, error);
-        assertThat(error).as("%s at %s", named.name, v).isLessThan(1e-6);
+        double allowed = Math.max((nearCorner ? 1e-3 : 1e-5) * Math.abs(pair[0]), 1e-10);
+        double error = Math.abs(pair[0] - pair[1]) / allowed;
+        if (!(error <= worst)) {
+          worst = error;
+          where = v + ": " + pair[0] + " against " + pair[1];
+        }
       }
     }
-    System.out.printf("%-7s derivatives: worst %.1e of the slope%n", named.name, worst);
+    System.out.printf("%-9s derivatives: worst %.2g of what is allowed%n", named.name, worst);
+    assertThat(worst).as("%s at %s", named.name, where).isLessThanOrEqualTo(1);
   }
 
   @ParameterizedTest
@@ -77,18 +92,29 @@ class AmplifierLawTest {
     for (int i = 0; i < TRIALS * 5; i++) {
       Volts v = volts(random);
       named.law.evaluate(v.plate, v.screen, v.grid, at);
-      assertThat(List.of(at.plateAmps, at.screenAmps, at.gridAmps))
-          .as("%s at %s", named.name, v)
-          .allMatch(a -> a >= 0 && a < 5);
+      require(isCurrent(at.plateAmps), named, "plate current", v);
+      require(isCurrent(at.screenAmps), named, "screen current", v);
+      require(isCurrent(at.gridAmps), named, "grid current", v);
       double step = Math.pow(10, -3 * random.nextDouble());
       named.law.evaluate(v.plate + step, v.screen, v.grid, next);
-      assertThat(next.plateAmps).as("plate, %s", v).isGreaterThanOrEqualTo(at.plateAmps);
+      require(next.plateAmps >= at.plateAmps, named, "rising with the plate", v);
       named.law.evaluate(v.plate, v.screen, v.grid + step, next);
-      assertThat(next.plateAmps).as("grid, %s", v).isGreaterThanOrEqualTo(at.plateAmps);
-      assertThat(next.gridAmps).as("grid, %s", v).isGreaterThanOrEqualTo(at.gridAmps);
+      require(next.plateAmps >= at.plateAmps, named, "rising with the grid", v);
+      require(next.gridAmps >= at.gridAmps, named, "grid current rising", v);
     }
     named.law.evaluate(-0.5, 200, 0, at);
     assertThat(at.plateAmps).isZero();
+  }
+
+  /** Finite, not negative, and not out of this world: a 6AS7G at 1,200 V passes tens of amperes. */
+  private static boolean isCurrent(double amps) {
+    return amps >= 0 && amps < 100;
+  }
+
+  private static void require(boolean holds, Named named, String what, Volts at) {
+    if (!holds) {
+      fail("%s: %s at %s", named.name, what, at);
+    }
   }
 
   @ParameterizedTest
@@ -121,8 +147,8 @@ class AmplifierLawTest {
       named.law.evaluate(
           plate.applyAsDouble(b), screen.applyAsDouble(b), grid.applyAsDouble(b), right);
     }
-    // The currents grow like v^1.2 and faster from v = 0 on, so 1e-12 V away slopes of at most
-    // 1e-2 siemens per volt^0.2 have shrunk below 1e-4.
+    // The currents grow like v^1.13 and faster from v = 0 on, so 1e-13 V away slopes of 1e-3 to
+    // 1e-2 siemens have shrunk to a few 1e-6.
     assertThat(left.plateByPlateSiemens).isCloseTo(right.plateByPlateSiemens, within());
     assertThat(left.plateByScreenSiemens).isCloseTo(right.plateByScreenSiemens, within());
     assertThat(left.plateByGridSiemens).isCloseTo(right.plateByGridSiemens, within());
@@ -133,7 +159,7 @@ class AmplifierLawTest {
   }
 
   private static Offset<Double> within() {
-    return Offset.offset(1e-6);
+    return Offset.offset(1e-5);
   }
 
   @Test
@@ -143,8 +169,9 @@ class AmplifierLawTest {
       named.law.evaluate(250, 100, 0, at);
       double above = at.screenAmps;
       double total = at.plateAmps + at.screenAmps;
-      double last = above;
-      for (double plate = 50; plate >= 0; plate -= 5) {
+      named.law.evaluate(50, 100, 0, at);
+      double last = at.screenAmps;
+      for (double plate = 45; plate >= 0; plate -= 5) {
         named.law.evaluate(plate, 100, 0, at);
         assertThat(at.screenAmps).as("%s at %g V", named.name, plate).isGreaterThan(last);
         last = at.screenAmps;
@@ -190,8 +217,10 @@ class AmplifierLawTest {
 
   private static double[] slopes(
       AmplifierLaw law, Volts v, double analytic, Current current, int electrode) {
-    double coarse = difference(law, v, current, electrode, 2e-3);
-    double fine = difference(law, v, current, electrode, 1e-3);
+    // Steps that do not reach across the corner of the formula at no plate volts.
+    double near = Math.abs(v.plate) < 1e-2 ? 0.1 * Math.abs(v.plate) : 1e-3;
+    double coarse = difference(law, v, current, electrode, 2 * near);
+    double fine = difference(law, v, current, electrode, near);
     return new double[] {analytic, (4 * fine - coarse) / 3};
   }
 
