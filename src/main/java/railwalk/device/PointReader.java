@@ -62,6 +62,9 @@ final class PointReader {
 
   /** Returns the sections that the point speaks of. */
   private LikeSections group(DataLine line) {
+    if (groups.isEmpty()) {
+      throw line.error("a regulator has no points", "gas strike=… operating=…");
+    }
     if (!line.has("section")) {
       if (groups.stream().filter(LikeSections::amplify).count() > 1) {
         throw line.error("the type has unlike sections: which one is meant?", "section=…");
