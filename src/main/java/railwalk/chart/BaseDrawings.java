@@ -9,9 +9,9 @@ import railwalk.device.TubeType;
 
 /**
  * Makes the drawing of a type's base. Where pins stand is common practice: octal and loctal eight
- * around a key, miniature seven of eight places, noval nine of ten, rimlock eight beside a bead.
- * Older bases have the filament or heater on the first and the last pin, which are the two thick
- * ones, at the bottom; with five pins all are alike.
+ * around a key, miniature seven of eight places, noval and novar nine of ten, rimlock eight beside
+ * a bead, any other in a ring with a gap. Older bases have the filament or heater on the first and
+ * the last pin, which are the two thick ones, at the bottom; with five pins all are alike.
  */
 final class BaseDrawings {
   private static final double FULL_TURN = 360;
@@ -41,10 +41,10 @@ final class BaseDrawings {
     PinUse cap = type.pins().get(0);
     return Optional.of(
         new BaseDrawing(
-            "Base " + type.base() + " (" + type.family() + "), seen from below",
+            "Base " + TypeFacts.base(type) + ", seen from below",
             ring.mark(),
             contacts,
-            cap == null ? "" : PinWords.of(cap)));
+            cap == null ? "" : PinWords.of(type, cap)));
   }
 
   private static BaseDrawing.Contact contact(TubeType type, Ring ring, int pin) {
@@ -55,7 +55,7 @@ final class BaseDrawings {
         FULL_TURN * (pin - 1 + ring.start()) / ring.places(),
         ring.mark() == BaseDrawing.Mark.THICK_PINS && ends && ring.pins() != ALL_ALIKE,
         use != null,
-        use == null ? "" : PinWords.of(use),
+        use == null ? "" : PinWords.of(type, use),
         use != null && use.role() != PinUse.Role.EMPTY);
   }
 
@@ -71,9 +71,12 @@ final class BaseDrawings {
     if (family.startsWith("miniature")) {
       return new Ring(8, 7, 1, BaseDrawing.Mark.GAP);
     }
-    if (family.startsWith("noval")) {
+    if (family.startsWith("nova") || family.startsWith("magnoval")) {
       return new Ring(10, 9, 1, BaseDrawing.Mark.GAP);
     }
-    return new Ring(highest, highest, 0.5, BaseDrawing.Mark.THICK_PINS);
+    if (family.startsWith("ux") || family.startsWith("uy") || family.endsWith("-pin")) {
+      return new Ring(highest, highest, 0.5, BaseDrawing.Mark.THICK_PINS);
+    }
+    return new Ring(highest + 1, highest, 1, BaseDrawing.Mark.GAP);
   }
 }

@@ -32,7 +32,7 @@ public final class CataloguePage {
     return new Table.Row(
         type.name(),
         String.join(", ", type.aliases()),
-        type.base(),
+        TypeFacts.baseCode(type),
         type.heater().connections().stream().findFirst().map(CataloguePage::heater).orElse(""),
         type.summary());
   }

@@ -26,6 +26,9 @@ final class CurveField {
 
   private static final double PAST_POINTS = 1.7;
 
+  /** A rating far above all published points, as for a push-pull pair, would crowd the curves. */
+  private static final double PLATE_PAST_POINTS = 1.6;
+
   /** Plate volts, as a share of the rated ones, where the watts limit is still on the plot. */
   private static final double WATTS_LIMIT_AT = 0.66;
 
@@ -149,8 +152,12 @@ final class CurveField {
   private double plateReach() {
     double rated = section.ratings().plateVoltsMax();
     double published = places.stream().mapToDouble(PointPlace::plateVolts).max().orElse(0);
-    double reach = PAST_RATING * Math.max(Double.isNaN(rated) ? 0 : rated, published);
-    return reach > 0 ? reach : USUAL_PLATE_VOLTS;
+    if (!(published > 0)) {
+      return Double.isNaN(rated) ? USUAL_PLATE_VOLTS : PAST_RATING * rated;
+    }
+    double fromRating = Double.isNaN(rated) ? 0 : PAST_RATING * rated;
+    double usual = Math.max(PLATE_PAST_POINTS * published, PAST_RATING * USUAL_PLATE_VOLTS);
+    return Math.max(PAST_RATING * published, Math.min(fromRating, usual));
   }
 
   private double currentReach() {

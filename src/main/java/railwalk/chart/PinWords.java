@@ -2,20 +2,27 @@ package railwalk.chart;
 
 import railwalk.device.Electrode;
 import railwalk.device.PinUse;
+import railwalk.device.TubeType;
 
 /** What a pin leads to, in a few words. */
 final class PinWords {
   private PinWords() {}
 
   /** Returns the words for a drawing or a list: "plate A", "heater", "leave free". */
-  static String of(PinUse use) {
+  static String of(TubeType type, PinUse use) {
     String letter = use.section().isEmpty() ? "" : " " + use.section();
-    return leadsTo(use) + letter;
+    return leadsTo(type, use) + letter;
   }
 
-  private static String leadsTo(PinUse use) {
+  private static String leadsTo(TubeType type, PinUse use) {
+    Electrode electrode = use.electrode();
     return switch (use.role()) {
-      case ELECTRODE -> use.electrode() == null ? "" : electrode(use.electrode());
+      case ELECTRODE ->
+          electrode == null
+              ? ""
+              : electrode.isHeater() && type.heater().directlyHeated()
+                  ? electrode(electrode).replace("heater", "filament")
+                  : electrode(electrode);
       case EMPTY -> "nothing";
       case INTERNAL -> "leave free";
       case SHIELD -> "shield";

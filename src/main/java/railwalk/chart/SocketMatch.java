@@ -94,7 +94,7 @@ public record SocketMatch(
         Look look = wiring.look(pin);
         double weight = weight(electrode, look);
         if (weight > 0) {
-          doubt(weight, PinWords.of(use) + " (" + pinName(pin) + ") " + look.words());
+          doubt(weight, PinWords.of(type, use) + " (" + pinName(pin) + ") " + look.words());
         } else if (weight < 0) {
           agreeing++;
         }
@@ -198,7 +198,11 @@ public record SocketMatch(
         if (!twice) {
           doubt(
               SPEAKS_AGAINST,
-              "nothing on " + PinWords.of(pin.getValue()) + " (" + pinName(pin.getKey()) + ")");
+              "nothing on "
+                  + PinWords.of(type, pin.getValue())
+                  + " ("
+                  + pinName(pin.getKey())
+                  + ")");
         }
       }
     }

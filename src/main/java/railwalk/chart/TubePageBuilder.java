@@ -68,8 +68,7 @@ public final class TubePageBuilder {
     Optional<BaseDrawing> drawing = BaseDrawings.of(type);
     return drawing.isPresent()
         ? drawing.get()
-        : new Paragraph(
-            "Base " + type.base() + ", " + type.family() + ": pins not confirmed: use electrodes.");
+        : new Paragraph("Base " + TypeFacts.base(type) + ": pins not confirmed: use electrodes.");
   }
 
   private List<Block> figures(List<Plot> plots) {

@@ -14,6 +14,9 @@ import railwalk.units.Quantity;
 
 /** A type's other names, base, heater, limits and spread as labelled lines. */
 final class TypeFacts {
+  /** Stands in a data file for a base code that no source gives. */
+  private static final String UNKNOWN = "unknown";
+
   private final TubeType type;
 
   TypeFacts(TubeType type) {
@@ -30,10 +33,20 @@ final class TypeFacts {
     return entries;
   }
 
+  /** Returns the base in words: "9A, noval"; the kind of socket alone where the code is unknown. */
+  static String base(TubeType type) {
+    return type.base().equals(UNKNOWN) ? type.family() : type.base() + ", " + type.family();
+  }
+
+  /** Returns the base's code, or the kind of socket where that is unknown. */
+  static String baseCode(TubeType type) {
+    return type.base().equals(UNKNOWN) ? type.family() : type.base();
+  }
+
   /** Returns them in reading order. */
   List<KeyFigures.Entry> entries() {
     List<KeyFigures.Entry> entries = new ArrayList<>();
-    entries.add(entry("Base", type.base() + ", " + type.family()));
+    entries.add(entry("Base", base(type)));
     if (!type.heater().connections().isEmpty()) {
       String kind = type.heater().directlyHeated() ? "Filament" : "Heater";
       entries.add(

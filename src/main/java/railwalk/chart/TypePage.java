@@ -85,12 +85,12 @@ public final class TypePage {
   }
 
   private List<Table.Row> pins() {
-    return type.pins().entrySet().stream().map(TypePage::pin).toList();
+    return type.pins().entrySet().stream().map(this::pin).toList();
   }
 
-  private static Table.Row pin(Map.Entry<Integer, PinUse> pin) {
+  private Table.Row pin(Map.Entry<Integer, PinUse> pin) {
     String label = pin.getKey() == 0 ? "cap" : Integer.toString(pin.getKey());
-    return new Table.Row(label, PinWords.of(pin.getValue()));
+    return new Table.Row(label, PinWords.of(type, pin.getValue()));
   }
 
   private List<Table.Row> alternativeRows() {
