@@ -13,12 +13,12 @@ import railwalk.device.GasLaw;
 import railwalk.device.Heater;
 import railwalk.device.LikeSections;
 import railwalk.device.Ratings;
-import railwalk.device.RectifierLaw;
 import railwalk.device.RectifierRatings;
 import railwalk.device.SectionCurrents;
 import railwalk.device.SectionKind;
 import railwalk.device.SectionType;
 import railwalk.device.TubeType;
+import railwalk.device.TwoPoleLaw;
 import railwalk.fit.TypeSheet;
 import railwalk.units.Quantity;
 
@@ -201,7 +201,7 @@ public final class Alternatives {
     }
 
     private double drop(SectionType section, double amps) {
-      return Math.pow(amps / ((RectifierLaw) section.law()).perveance(), 2.0 / 3);
+      return PlateDrop.volts((TwoPoleLaw) section.law(), amps);
     }
 
     boolean regulator(SectionType main, SectionType own) {

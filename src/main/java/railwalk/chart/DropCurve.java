@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 import railwalk.chart.Plot.Spot;
 import railwalk.device.PublishedPoint;
-import railwalk.device.RectifierLaw;
 import railwalk.device.SectionType;
+import railwalk.device.TwoPoleLaw;
 
 /** The current of one rectifier plate over the volts across it, with the published drops. */
 final class DropCurve {
@@ -16,19 +16,19 @@ final class DropCurve {
   private DropCurve() {}
 
   static Plot of(SectionType section, List<NumberedPoint> points) {
-    double perveance = ((RectifierLaw) section.law()).perveance();
+    TwoPoleLaw law = (TwoPoleLaw) section.law();
     double published =
         points.stream().mapToDouble(p -> p.point().published().plateAmps()).max().orElse(0);
     double rated = section.rectifierRatings().dcAmpsMax();
     double amps = PAST_POINTS * Math.max(Double.isNaN(rated) ? 0 : rated, published);
     Plot.Axis y =
         Ticks.axis("current, mA", 1000 * (amps > 0 ? amps : USUAL_AMPS), CurveField.TICKS);
-    double reach = HEADROOM * Math.pow(y.to() / 1000 / perveance, 2.0 / 3);
+    double reach = HEADROOM * PlateDrop.volts(law, y.to() / 1000);
     Plot.Axis x = Ticks.axis("volts across one plate", reach, CurveField.TICKS);
     List<Spot> spots = new ArrayList<>();
     for (int i = 0; i <= CurveField.STEPS; i++) {
       double milliamps = y.to() * i / CurveField.STEPS;
-      spots.add(new Spot(Math.pow(milliamps / 1000 / perveance, 2.0 / 3), milliamps));
+      spots.add(new Spot(i == 0 ? 0 : PlateDrop.volts(law, milliamps / 1000), milliamps));
     }
     List<Plot.Mark> marks = new ArrayList<>();
     for (NumberedPoint numbered : points) {

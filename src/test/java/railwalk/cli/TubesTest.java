@@ -41,8 +41,8 @@ class TubesTest {
   void showsTheSheetsPinsAndLimits() {
     Run run = Run.of("tubes", "6v6gt");
     assertThat(run.out())
-        .contains("Heater  6.3 V 450 mA")
-        .containsPattern("plate 315 V; plate 12 W; screen 285 V; screen 2 W")
+        .containsPattern("Heater +6\\.3 V 450 mA")
+        .containsPattern("plate 315 V;\\s+plate 12 W;\\s+screen 285 V;\\s+screen 2 W")
         .containsPattern("\n +3  plate\n +4  screen\n +5  grid\n")
         .containsPattern("\n +8  cathode\n");
   }
