@@ -3,6 +3,7 @@ package railwalk.chart;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.function.DoubleFunction;
 import java.util.stream.Collectors;
 import railwalk.device.GasLaw;
@@ -62,10 +63,26 @@ final class TypeFacts {
         .forEach((ratings, sections) -> add(entries, ratings, sections));
     type.care().straps().forEach(strap -> entries.add(entry("At the socket", strap(strap))));
     type.care().cautions().forEach(caution -> entries.add(entry("Mind", caution)));
-    type.care()
-        .lookAlikes()
-        .forEach(other -> entries.add(entry("Not " + other.type(), other.difference())));
+    addLookAlikes(entries);
     return entries;
+  }
+
+  /** Adds the types not to be taken for it, those with the same difference together. */
+  private void addLookAlikes(List<KeyFigures.Entry> entries) {
+    Map<String, List<String>> typesByDifference = new LinkedHashMap<>();
+    for (TubeType.LookAlike other : type.care().lookAlikes()) {
+      typesByDifference
+          .computeIfAbsent(other.difference(), d -> new ArrayList<>())
+          .add(other.type());
+    }
+    typesByDifference.forEach(
+        (difference, types) -> {
+          boolean one = types.size() == 1;
+          entries.add(
+              entry(
+                  one ? "Not " + types.get(0) : "Not the same",
+                  one ? difference : String.join(", ", types) + ": " + difference));
+        });
   }
 
   private static String strap(List<Integer> pins) {

@@ -24,7 +24,7 @@ final class CoupledSolver {
    * its square where the sweep carried its derivatives, and itself times the last gain where
    * derivatives of an earlier sweep served.
    */
-  private static final double SETTLED_SHARE = 2e-10;
+  private static final double SETTLED_SHARE = 2e-11;
 
   /** From corrections of this size on, periods are run at full accuracy. */
   private static final double NEAR_SHARE = 1e-2;

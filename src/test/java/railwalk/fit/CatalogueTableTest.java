@@ -16,11 +16,11 @@ import railwalk.device.SectionType;
 import railwalk.device.TubeType;
 
 /**
- * The table of the catalogue in {@code CATALOGUE.md} is what the data files say. Written again with
- * {@code -Dcatalogue.write=true}.
+ * The table of the catalogue in {@code charts/tubes/CATALOGUE.md} is what the data files say.
+ * Written again with {@code -Dcatalogue.write=true}.
  */
 class CatalogueTableTest {
-  private static final Path TABLE = Path.of("CATALOGUE.md");
+  private static final Path TABLE = Path.of("charts/tubes/CATALOGUE.md");
   private static final Catalogue CATALOGUE = Catalogue.standard();
 
   @Test
