@@ -2,6 +2,7 @@ package railwalk.device;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -45,6 +46,32 @@ class GridLawTest {
   @ValueSource(strings = {"12AX7", "12AU7", "6V6GT", "EL84", "EL34", "KT88", "50C5", "EF86"})
   void aGridFedThroughAMegohmStaysNearItsCathode(String type) {
     assertThat(settle(law(type), 100, 1e6)).isBetween(0.0, 2.0);
+  }
+
+  /**
+   * A shorted coupling capacitor: 200 V behind the 100 kilohm of the stage before. The grid takes
+   * the current and stays a few volts above its cathode, whatever the type.
+   */
+  @Test
+  void aShortedCouplingCapacitorLeavesAnyGridNearItsCathode() {
+    double lowest = Double.POSITIVE_INFINITY;
+    double highest = 0;
+    int count = 0;
+    for (TubeType type : Catalogue.standard().types()) {
+      for (SectionType section : type.sections()) {
+        if (section.law() instanceof AmplifierLaw law) {
+          double volts = settle(law, 200, 100e3);
+          assertThat(volts).as(type.name()).isBetween(0.2, 6.0);
+          lowest = Math.min(lowest, volts);
+          highest = Math.max(highest, volts);
+          count++;
+        }
+      }
+    }
+    System.out.printf(
+        "%d sections fed with 200 V through 100 kohm: grid %.2f to %.2f V%n",
+        count, lowest, highest);
+    assertThat(count).isGreaterThan(150);
   }
 
   private static AmplifierLaw law(String type) {
