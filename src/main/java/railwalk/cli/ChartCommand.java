@@ -17,9 +17,14 @@ import railwalk.render.pdf.Paper;
 /** Prints the voltage chart of a netlist. */
 final class ChartCommand implements Command {
   @Override
+  public String name() {
+    return "chart";
+  }
+
+  @Override
   public CommandSpec spec() {
     CommandSpec spec =
-        CommandTree.named("chart", this)
+        CommandTree.named(name(), this)
             .addPositional(
                 CommandTree.argument("NETLIST", "1", "The amplifier as traced.", Path.class))
             .addOption(
@@ -51,7 +56,7 @@ final class ChartCommand implements Command {
                     .build())
             .addOption(
                 OptionSpec.builder("--line-sweep")
-                    .description("Add a page with the main points at 90 to 110 % of the line.")
+                    .description("Add a page with the main points at 90 to 110 %% of the line.")
                     .build())
             .addOption(PaperOption.spec());
     spec.usageMessage()

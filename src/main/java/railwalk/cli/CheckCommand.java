@@ -9,9 +9,14 @@ import railwalk.app.CheckJob;
 /** Prints diagnostics and findings only. */
 final class CheckCommand implements Command {
   @Override
+  public String name() {
+    return "check";
+  }
+
+  @Override
   public CommandSpec spec() {
     CommandSpec spec =
-        CommandTree.named("check", this)
+        CommandTree.named(name(), this)
             .addPositional(
                 CommandTree.argument("NETLIST", "1", "The amplifier as traced.", Path.class));
     spec.usageMessage()

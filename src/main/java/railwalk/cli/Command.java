@@ -6,6 +6,9 @@ import railwalk.app.CannotDo;
 
 /** One command: how it is spelled and what it does. The work itself is done in {@code app}. */
 interface Command {
+  /** Returns the word it is called by. */
+  String name();
+
   /** Returns name, options and help text. */
   CommandSpec spec();
 

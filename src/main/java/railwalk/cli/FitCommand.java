@@ -14,9 +14,14 @@ final class FitCommand implements Command {
   private static final String WRITE = "--write";
 
   @Override
+  public String name() {
+    return "fit";
+  }
+
+  @Override
   public CommandSpec spec() {
     CommandSpec spec =
-        CommandTree.named("fit", this)
+        CommandTree.named(name(), this)
             .addPositional(
                 CommandTree.argument("TYPE", "0..*", "Tube types to fit.", List.class).toBuilder()
                     .index("0..*")

@@ -40,7 +40,7 @@ public final class Main {
 
   static int run(String[] args, Console console) {
     try {
-      ParseResult given = CommandTree.build().parseArgs(args);
+      ParseResult given = CommandTree.build(args).parseArgs(args);
       while (given.hasSubcommand()) {
         given = given.subcommand();
       }

@@ -13,9 +13,14 @@ import railwalk.render.pdf.Paper;
 /** Steps a netlist through time until it settles. */
 final class SettleCommand implements Command {
   @Override
+  public String name() {
+    return "settle";
+  }
+
+  @Override
   public CommandSpec spec() {
     CommandSpec spec =
-        CommandTree.named("settle", this)
+        CommandTree.named(name(), this)
             .addPositional(
                 CommandTree.argument("NETLIST", "1", "The amplifier as traced.", Path.class))
             .addOption(

@@ -16,9 +16,14 @@ import railwalk.render.pdf.Paper;
 /** Lists the tube types, shows some, or prints their pages. */
 final class TubesCommand implements Command {
   @Override
+  public String name() {
+    return "tubes";
+  }
+
+  @Override
   public CommandSpec spec() {
     CommandSpec spec =
-        CommandTree.named("tubes", this)
+        CommandTree.named(name(), this)
             .addPositional(
                 PositionalParamSpec.builder()
                     .paramLabel("TYPE")

@@ -10,9 +10,14 @@ import railwalk.app.WalkJob;
 /** Prints the DC paths with the arithmetic. */
 final class WalkCommand implements Command {
   @Override
+  public String name() {
+    return "walk";
+  }
+
+  @Override
   public CommandSpec spec() {
     CommandSpec spec =
-        CommandTree.named("walk", this)
+        CommandTree.named(name(), this)
             .addPositional(
                 CommandTree.argument("NETLIST", "1", "The amplifier as traced.", Path.class))
             .addPositional(

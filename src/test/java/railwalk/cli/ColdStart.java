@@ -48,7 +48,7 @@ final class ColdStart {
 
   private void run(Path file) throws Exception {
     phase("virtual machine", () -> "");
-    phase("command line", () -> CommandTree.build().parseArgs("chart", file.toString()));
+    phase("command line", () -> CommandTree.build("chart").parseArgs("chart", file.toString()));
     NetlistResult result = phase("read", () -> NetlistReader.read(file, Catalogue.standard()));
     List<Circuit> circuits = new ArrayList<>();
     Circuit first = result.circuit().orElseThrow();

@@ -64,4 +64,9 @@ class LineSweepTest {
     assertThat(run.code()).isEqualTo(Main.COULD_NOT);
     assertThat(run.err()).contains("--line-sweep needs a .line");
   }
+
+  @Test
+  void helpSaysPerCentOnce() {
+    assertThat(Run.of("chart", "--help").out()).contains("110 %").doesNotContain("%%");
+  }
 }
