@@ -19,11 +19,19 @@ import railwalk.circuit.Winding;
  * solver treats all arrangements alike.
  */
 final class Arrangement {
+  private static final String HALF_WAVE = "half-wave";
+  private static final String DOUBLER = "voltage doubler";
+
   private Arrangement() {}
 
   /** Returns the arrangement of the parts that feed {@code outputs}, one phrase for each output. */
   static List<String> of(Circuit circuit, List<Element> alternating, List<Node> outputs) {
     return outputs.stream().map(n -> name(circuit, alternating, n)).toList();
+  }
+
+  /** Returns whether an output so arranged is charged once in a period of the line, not twice. */
+  static boolean chargesOnce(String arrangement) {
+    return arrangement.startsWith(HALF_WAVE) || arrangement.startsWith(DOUBLER);
   }
 
   private record Path(Node anode, Node cathode) {}
@@ -76,7 +84,7 @@ final class Arrangement {
     if (driven.size() >= 2) {
       kind = returned >= 2 ? "bridge" : "full-wave, centre tap";
     } else {
-      kind = returned >= 1 ? "voltage doubler" : "half-wave";
+      kind = returned >= 1 ? DOUBLER : HALF_WAVE;
     }
     return kind + (choke ? ", choke input" : "") + (negative ? ", negative" : "");
   }

@@ -159,8 +159,11 @@ public final class RippleGroups {
     List<Node> outputs = outputs(flood, alternating);
     Set<Node> frontier = new LinkedHashSet<>(flood);
     frontier.retainAll(held);
+    List<String> arrangements = Arrangement.of(circuit, alternating, outputs);
     for (Node node : frontier) {
-      grow(node, 1, inside);
+      int output = outputs.indexOf(node);
+      boolean onceAPeriod = output >= 0 && Arrangement.chargesOnce(arrangements.get(output));
+      grow(node, 1, inside, onceAPeriod);
     }
     List<Element> elements = elementsWithin(inside);
     Set<Element> taken = new HashSet<>(elements);
@@ -173,8 +176,7 @@ public final class RippleGroups {
             .filter(n -> at.getOrDefault(n, List.of()).stream().anyMatch(e -> loads(e, taken)))
             .toList();
     List<Element> feeders = alternating.stream().filter(e -> feeds(e, outputs)).toList();
-    return new RippleGroup(
-        Arrangement.of(circuit, alternating, outputs), elements, nodes, ports, outputs, feeders);
+    return new RippleGroup(arrangements, elements, nodes, ports, outputs, feeders);
   }
 
   private List<Element> elementsWithin(Set<Node> inside) {
@@ -262,15 +264,15 @@ public final class RippleGroups {
   }
 
   /** Takes in the filter stages behind {@code node}, while {@code ripple} of it is still left. */
-  private void grow(Node node, double ripple, Set<Node> inside) {
+  private void grow(Node node, double ripple, Set<Node> inside, boolean onceAPeriod) {
     for (Element first : at.getOrDefault(node, List.of())) {
-      stage(node, first, inside)
+      stage(node, first, inside, onceAPeriod)
           .ifPresent(
               stage -> {
                 inside.addAll(stage.nodes());
                 double left = ripple * stage.ripplePassed();
                 if (left > RIPPLE_LEFT) {
-                  grow(stage.end(), left, inside);
+                  grow(stage.end(), left, inside, onceAPeriod);
                 }
               });
     }
@@ -279,7 +281,7 @@ public final class RippleGroups {
   /** A chain of series parts from a held node to the next one. */
   private record Stage(List<Node> nodes, Node end, double ripplePassed) {}
 
-  private Optional<Stage> stage(Node start, Element first, Set<Node> inside) {
+  private Optional<Stage> stage(Node start, Element first, Set<Node> inside, boolean onceAPeriod) {
     List<Node> passed = new ArrayList<>();
     double ohms = 0;
     double henries = 0;
@@ -301,7 +303,10 @@ public final class RippleGroups {
       here = next.get();
       passed.add(here);
       double farads = faradsToReference(here);
-      double passes = stageFactor(ohms, henries, farads);
+      double passes = stageFactor(ohms, henries, farads, 2);
+      if (onceAPeriod && henries > 0) {
+        passes = Math.max(passes, stageFactor(ohms, henries, farads, 1));
+      }
       if (farads >= HOLDING_FARADS || passes < SMOOTHING) {
         return Optional.of(new Stage(passed, here, passes));
       }
@@ -355,11 +360,12 @@ public final class RippleGroups {
   }
 
   /**
-   * Returns how much of the ripple at twice the line's frequency passes a stage: one over the
-   * magnitude of 1 + jωRC − ω²LC, at most 1.
+   * Returns how much of the ripple at a multiple of the line's frequency passes a stage: one over
+   * the magnitude of 1 + jωRC − ω²LC, at most 1. A choke may resonate at the line's own frequency,
+   * which is in the ripple of a reservoir that is charged once a period.
    */
-  private double stageFactor(double ohms, double henries, double farads) {
-    double omega = 4 * Math.PI * circuit.line().hertz();
+  private double stageFactor(double ohms, double henries, double farads, int multiple) {
+    double omega = multiple * 2 * Math.PI * circuit.line().hertz();
     double real = 1 - omega * omega * henries * farads;
     double imaginary = omega * ohms * farads;
     return Math.min(1, 1 / Math.hypot(real, imaginary));
