@@ -1,6 +1,7 @@
 package railwalk.cli;
 
 import java.nio.file.Path;
+import java.util.Locale;
 import java.util.Optional;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Model.OptionSpec;
@@ -47,6 +48,9 @@ final class SettleCommand implements Command {
   public int run(ParseResult given, Console console) throws CannotDo {
     Path netlist = given.matchedPositionalValue(0, Path.of(""));
     Optional<Path> output = Optional.ofNullable(given.matchedOptionValue("-o", null));
+    if (output.isPresent() && !output.get().toString().toLowerCase(Locale.ROOT).endsWith(".pdf")) {
+      throw new CannotDo("-o writes a PDF: " + output.get() + " does not end in .pdf");
+    }
     Paper paper = PaperOption.given(given);
     BenchConditions conditions =
         new BenchConditions(

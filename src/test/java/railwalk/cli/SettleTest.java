@@ -49,4 +49,12 @@ class SettleTest {
     assertThat(run.code()).isEqualTo(Main.COULD_NOT);
     assertThat(run.err()).contains("does not settle: node ", "oscillates");
   }
+
+  @Test
+  void writesNoPdfUnderAnotherName() {
+    Run run = Run.in(folder, "settle", "test-netlists/amps/first.cir", "-o", "scope.csv");
+    assertThat(run.code()).isEqualTo(Main.COULD_NOT);
+    assertThat(run.err()).contains("-o writes a PDF");
+    assertThat(folder.resolve("scope.csv")).doesNotExist();
+  }
 }
