@@ -35,8 +35,7 @@ public final class ChartJob {
    */
   public static ChartJob of(Path netlist, BenchConditions conditions, boolean lineSweep)
       throws CannotDo {
-    TracedAmplifier traced = TracedAmplifier.read(netlist).allKnown();
-    TracedAmplifier amplifier = traced.with(conditions.applyTo(traced.circuit()));
+    TracedAmplifier amplifier = TracedAmplifier.under(conditions, netlist);
     ChartInput input =
         new ChartInput(
             amplifier.fileName(),

@@ -21,8 +21,7 @@ public final class SettleJob {
 
   /** Returns the settled period of {@code netlist}; refuses where it does not settle. */
   public static SettleJob of(Path netlist, BenchConditions conditions) throws CannotDo {
-    TracedAmplifier traced = TracedAmplifier.read(netlist).allKnown();
-    TracedAmplifier amplifier = traced.with(conditions.applyTo(traced.circuit()));
+    TracedAmplifier amplifier = TracedAmplifier.under(conditions, netlist);
     ChartInput input =
         new ChartInput(
             amplifier.fileName(), List.of(SolvedColumns.first(amplifier)), amplifier.diagnostics());

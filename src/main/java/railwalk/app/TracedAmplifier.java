@@ -34,6 +34,12 @@ record TracedAmplifier(
     return of(file, result, circuit);
   }
 
+  /** Returns the amplifier at {@code file}, all its values known, under the bench's conditions. */
+  static TracedAmplifier under(BenchConditions conditions, Path file) throws CannotDo {
+    TracedAmplifier traced = read(file).allKnown();
+    return traced.with(conditions.applyTo(traced.circuit()));
+  }
+
   /** Returns what reading {@code file} came to when it came to a circuit. */
   static TracedAmplifier of(Path file, NetlistResult result, Circuit circuit) {
     return new TracedAmplifier(

@@ -41,12 +41,7 @@ final class ChartCommand implements Command {
                     .completionCandidates(ChartFormat.words())
                     .description("One format only: " + String.join(", ", ChartFormat.words()) + ".")
                     .build())
-            .addOption(
-                OptionSpec.builder("--line")
-                    .paramLabel("VOLTS")
-                    .type(String.class)
-                    .description("Line volts in place of the netlist's.")
-                    .build())
+            .addOption(LineOption.spec())
             .addOption(
                 OptionSpec.builder("--meter")
                     .paramLabel("SPEC")
@@ -75,7 +70,7 @@ final class ChartCommand implements Command {
     Paper paper = PaperOption.given(given);
     BenchConditions conditions =
         new BenchConditions(
-            Optional.ofNullable(given.matchedOptionValue("--line", null)),
+            LineOption.given(given),
             Optional.ofNullable(given.matchedOptionValue("--meter", null)));
     if (format.isEmpty() && output.isPresent()) {
       refuseOtherSuffix(output.get());

@@ -30,12 +30,7 @@ final class SettleCommand implements Command {
                     .type(Path.class)
                     .description("Write a PDF with curves to this file as well.")
                     .build())
-            .addOption(
-                OptionSpec.builder("--line")
-                    .paramLabel("VOLTS")
-                    .type(String.class)
-                    .description("Line volts in place of the netlist's.")
-                    .build())
+            .addOption(LineOption.spec())
             .addOption(PaperOption.spec());
     spec.usageMessage()
         .description(
@@ -52,9 +47,7 @@ final class SettleCommand implements Command {
       throw new CannotDo("-o writes a PDF: " + output.get() + " does not end in .pdf");
     }
     Paper paper = PaperOption.given(given);
-    BenchConditions conditions =
-        new BenchConditions(
-            Optional.ofNullable(given.matchedOptionValue("--line", null)), Optional.empty());
+    BenchConditions conditions = new BenchConditions(LineOption.given(given), Optional.empty());
     SettleJob job = Progress.during(console, "stepping …", () -> SettleJob.of(netlist, conditions));
     if (output.isPresent()) {
       Path target = console.folder().resolve(output.get());

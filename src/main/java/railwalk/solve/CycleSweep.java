@@ -130,9 +130,7 @@ final class CycleSweep {
   /** Takes the states out of a solved stage: their rates after the first, themselves after both. */
   private void advance(double[] history, double @Nullable [] rate, double[] state, double stage) {
     for (int s = 0; s < history.length; s++) {
-      Stores.Store store = net.stores.get(s);
-      double present =
-          store.isChoke() ? unknowns[store.branch()] : volts(unknowns, store.a(), store.b());
+      double present = net.stores.get(s).state(unknowns);
       if (rate != null) {
         rate[s] = (present - history[s]) / stage;
       } else {

@@ -132,21 +132,21 @@ public final class LineCycle {
     return greatest;
   }
 
+  /** By the trapezoidal rule, the period starting where it ends. */
   private double rmsVolts(Winding.Section section) {
-    double sum = 0;
+    double[] a = volts(section.a());
+    double[] b = volts(section.b());
+    double before = a[a.length - 1] - b[b.length - 1];
     double from = 0;
-    for (int k = 0; k < shown.seconds.size(); k++) {
-      double[] x = shown.unknowns.get(k);
-      double volts = DcNetwork.at(x, net.at(section.a())) - DcNetwork.at(x, net.at(section.b()));
-      double next = k + 1 < shown.seconds.size() ? shown.seconds.get(k + 1) : 1 / net.hertz;
-      double width = (next - from) / 2;
-      sum += width * volts * volts;
-      from = shown.seconds.get(k);
+    double sum = 0;
+    for (int k = 0; k < a.length; k++) {
+      double volts = a[k] - b[k];
+      double second = shown.seconds.get(k);
+      sum += (second - from) * (before * before + volts * volts) / 2;
+      before = volts;
+      from = second;
     }
-    double firstHalf = shown.seconds.get(0) / 2;
-    double[] end = shown.unknowns.get(shown.unknowns.size() - 1);
-    double atEnd = DcNetwork.at(end, net.at(section.a())) - DcNetwork.at(end, net.at(section.b()));
-    return Math.sqrt((sum + firstHalf * atEnd * atEnd) * net.hertz);
+    return Math.sqrt(sum * net.hertz);
   }
 
   /** Returns the loads of all rectifiers, plate by plate. */

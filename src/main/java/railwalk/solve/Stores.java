@@ -22,6 +22,11 @@ final class Stores {
       return branch >= 0;
     }
 
+    /** Returns its state in a solved network: volts across it, or a coil's current. */
+    double state(double[] unknowns) {
+      return isChoke() ? unknowns[branch] : DcNetwork.at(unknowns, a) - DcNetwork.at(unknowns, b);
+    }
+
     /** Adds its conductance (a coil: its resistance) over a stage to a network's values. */
     void addCompanion(double perStage, double[] values) {
       double companion = size * perStage;

@@ -1,6 +1,5 @@
 package railwalk.solve;
 
-import java.util.Arrays;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -116,7 +115,7 @@ final class TimeSweep {
           derivatives.stage(half, carried, share, stage, 1 / stage, rightSides -> {});
         }
         for (int s = 0; s < stores; s++) {
-          double present = present(net.stores.get(s));
+          double present = net.stores.get(s).state(unknowns);
           if (half == 0) {
             rate[s] = (present - history[s]) / stage;
           } else {
@@ -133,12 +132,6 @@ final class TimeSweep {
       endByStart = derivatives.endByColumn();
     }
     return true;
-  }
-
-  private double present(Stores.Store store) {
-    return store.isChoke()
-        ? unknowns[store.branch()]
-        : DcNetwork.at(unknowns, store.a()) - DcNetwork.at(unknowns, store.b());
   }
 
   private void prepareBase(double perStage) {
@@ -210,6 +203,5 @@ final class TimeSweep {
   /** Sets the first guess. */
   void start(double[] guess) {
     System.arraycopy(guess, 0, unknowns, 0, unknowns.length);
-    Arrays.fill(residual, 0);
   }
 }
