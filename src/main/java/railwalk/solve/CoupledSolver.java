@@ -221,17 +221,17 @@ final class CoupledSolver {
   }
 
   /**
-   * Returns by how much the current drawn at each port rises with that port's volts, the others
-   * held: the diagonal of L, where Y = dI/dE is found through the source resistances Z and Y⁻¹ =
-   * L⁻¹ + Z, so L = Y · (1 − Z·Y)⁻¹.
+   * Returns by how much the current drawn at each port (row) rises with the volts of each port
+   * (column), the others held: L, where Y = dI/dE is found through the source resistances Z and Y⁻¹
+   * = L⁻¹ + Z, so L = Y · (1 − Z·Y)⁻¹.
    */
-  private double[] loadSlopes(int group) {
+  private double[][] loadSlopes(int group) {
     List<DcNetwork.Port> ports = dc.ports.stream().filter(p -> p.group() == group).toList();
     int count = ports.size();
     double[] residual = new double[dc.size];
     double[] jacobian = dc.matrix.newValues();
     dc.evaluate(x, 1, 0, residual, jacobian);
-    double[] slopes = new double[count];
+    double[][] slopes = new double[count][count];
     if (!dc.matrix.lu().factor(jacobian)) {
       return slopes;
     }
@@ -259,7 +259,7 @@ final class CoupledSolver {
       return slopes;
     }
     for (int r = 0; r < count; r++) {
-      slopes[r] = lu.solve(y[r])[r];
+      slopes[r] = lu.solve(y[r]);
     }
     return slopes;
   }

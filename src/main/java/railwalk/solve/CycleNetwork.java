@@ -26,6 +26,9 @@ final class CycleNetwork {
   /** One rectifying path between two unknowns; {@code entry} is its first of four places. */
   record Path(int anode, int cathode, TwoPoleLaw law, Element element, int[] places) {}
 
+  /** Where the slope of the current drawn at one port by the volts of another one goes. */
+  record Slope(int drawn, int by, int place) {}
+
   /** Leak of a rectifier that is off: 1000 megohms, which ties a floating winding. */
   static final double LEAK_SIEMENS = 1e-9;
 
@@ -44,6 +47,7 @@ final class CycleNetwork {
   final List<Stores.Store> stores;
   final List<Windings.Emf> emfs;
   final int[] diagonal;
+  final List<Slope> slopes = new ArrayList<>();
   final Map<Element, Integer> branches;
   private final Windings windings;
 
@@ -66,8 +70,16 @@ final class CycleNetwork {
     for (int n = 0; n < nodeCount; n++) {
       diagonalNumbers[n] = stamps.entry(n, n, TIE_SIEMENS);
     }
+    for (Node drawn : group.ports()) {
+      for (Node by : group.ports()) {
+        if (!drawn.equals(by)) {
+          slopes.add(new Slope(at(drawn), at(by), stamps.entry(at(drawn), at(by), 0)));
+        }
+      }
+    }
     size = stamps.size();
     matrix = new SparseMatrix(stamps);
+    slopes.replaceAll(s -> new Slope(s.drawn, s.by, matrix.place(s.place)));
     constant = matrix.newValues();
     matrix.load(stamps, constant);
     source = stamps.rightHandSide();

@@ -45,7 +45,7 @@ record CycleReport(
       CycleSweep sweep,
       double[] states,
       double[] drawnAmps,
-      double[] drawnSiemens) {
+      double[][] drawnSiemens) {
     int storeCount = states.length;
     List<CycleColumn> columns = new ArrayList<>();
     for (int s = 0; s < storeCount; s++) {
@@ -72,7 +72,10 @@ record CycleReport(
     for (int r = 0; r < net.nodeCount; r++) {
       for (int c = 0; c < net.nodeCount; c++) {
         byDrawn[r][c] = free[c][r];
-        left[r][c] = (r == c ? 1 : 0) + free[c][r] * drawnSiemens[c];
+        left[r][c] = r == c ? 1 : 0;
+        for (int k = 0; k < net.nodeCount; k++) {
+          left[r][c] += free[k][r] * drawnSiemens[k][c];
+        }
       }
     }
     DenseLu lu = DenseLu.of(left);

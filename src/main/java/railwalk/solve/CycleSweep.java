@@ -74,7 +74,7 @@ final class CycleSweep {
    *
    * @param startStates capacitor volts and choke currents at its start
    * @param drawnAmps current drawn from each node by the outside, the part that stays
-   * @param drawnSiemens slope of that current with the node's volts
+   * @param drawnSiemens slopes of that current: by node, then by the node whose volts it follows
    * @param storeScale factor on every capacitor and choke (1 but for a quick first charge)
    * @param columns what to differentiate by
    * @param observer told of every stage; null when nobody wants to know
@@ -83,7 +83,7 @@ final class CycleSweep {
   boolean run(
       double[] startStates,
       double[] drawnAmps,
-      double[] drawnSiemens,
+      double[][] drawnSiemens,
       double storeScale,
       List<CycleColumn> columns,
       @Nullable Observer observer) {
@@ -143,10 +143,13 @@ final class CycleSweep {
     return (a < 0 ? 0 : x[a]) - (b < 0 ? 0 : x[b]);
   }
 
-  private void prepareBase(double[] drawnSiemens, double perStage) {
+  private void prepareBase(double[][] drawnSiemens, double perStage) {
     System.arraycopy(net.constant, 0, base, 0, base.length);
     for (int n = 0; n < net.nodeCount; n++) {
-      base[net.diagonal[n]] += drawnSiemens[n];
+      base[net.diagonal[n]] += drawnSiemens[n][n];
+    }
+    for (CycleNetwork.Slope slope : net.slopes) {
+      base[slope.place()] += drawnSiemens[slope.drawn()][slope.by()];
     }
     for (Stores.Store store : net.stores) {
       store.addCompanion(perStage, base);

@@ -13,8 +13,8 @@ import railwalk.circuit.Node;
  * (T. J. Aprille and T. N. Trick, "Steady-state analysis of nonlinear circuits with periodic
  * inputs", Proc. IEEE 60 (1972)).
  *
- * <p>A port's current follows the ripple: i(t) = I + G · (v(t) − V), I and V being means. G is set
- * by {@link #setSlopes}.
+ * <p>The ports' currents follow the ripple: i(t) = I + G · (v(t) − V), I and V being means by port
+ * and G a matrix. It is set by {@link #setSlopes}.
  */
 final class Supply {
   /** Steps a period: means then stand within 0.1 % on the hardest of the conduction-angle table. */
@@ -33,7 +33,7 @@ final class Supply {
   private final int[] portUnknowns;
   private final double[] states;
   private final double[] drawnAmps;
-  private final double[] drawnSiemens;
+  private final double[][] drawnSiemens;
   private final double[] meterSiemens;
   private final List<CycleColumn> columns = new ArrayList<>();
   private @Nullable PeriodMap map;
@@ -54,7 +54,7 @@ final class Supply {
     portUnknowns = ports.stream().mapToInt(net::at).toArray();
     states = new double[net.stores.size()];
     drawnAmps = new double[net.nodeCount];
-    drawnSiemens = new double[net.nodeCount];
+    drawnSiemens = new double[net.nodeCount][net.nodeCount];
     meterSiemens = new double[net.nodeCount];
     for (int s = 0; s < states.length; s++) {
       columns.add(new CycleColumn.StartState(s));
@@ -81,14 +81,18 @@ final class Supply {
   void reset() {
     Arrays.fill(states, 0);
     Arrays.fill(drawnAmps, 0);
-    Arrays.fill(drawnSiemens, 0);
+    for (double[] row : drawnSiemens) {
+      Arrays.fill(row, 0);
+    }
   }
 
   /** Takes over the states and currents of a neighbouring solution of the same shape. */
   void copyFrom(Supply other) {
     System.arraycopy(other.states, 0, states, 0, states.length);
     System.arraycopy(other.drawnAmps, 0, drawnAmps, 0, drawnAmps.length);
-    System.arraycopy(other.drawnSiemens, 0, drawnSiemens, 0, drawnSiemens.length);
+    for (int n = 0; n < drawnSiemens.length; n++) {
+      System.arraycopy(other.drawnSiemens[n], 0, drawnSiemens[n], 0, drawnSiemens.length);
+    }
     sweep = fine;
     System.arraycopy(other.sweep.means, 0, sweep.means, 0, sweep.means.length);
     System.arraycopy(other.sweep.endStates, 0, sweep.endStates, 0, sweep.endStates.length);
@@ -120,13 +124,19 @@ final class Supply {
     return portUnknowns.length;
   }
 
-  /** Sets how the current drawn at each port follows that port's ripple (siemens, not negative). */
-  void setSlopes(double[] siemens) {
+  /**
+   * Sets how the current drawn at each port (row) follows the ripple of each port (column),
+   * siemens; what falls as the port's own volts rise is left out.
+   */
+  void setSlopes(double[][] siemens) {
     for (int p = 0; p < portUnknowns.length; p++) {
-      int n = portUnknowns[p];
-      double changed = Math.max(0, siemens[p]);
-      drawnAmps[n] += (drawnSiemens[n] - changed) * sweep.means[n];
-      drawnSiemens[n] = changed;
+      int row = portUnknowns[p];
+      for (int q = 0; q < portUnknowns.length; q++) {
+        int column = portUnknowns[q];
+        double changed = p == q ? Math.max(0, siemens[p][q]) : siemens[p][q];
+        drawnAmps[row] += (drawnSiemens[row][column] - changed) * sweep.means[column];
+        drawnSiemens[row][column] = changed;
+      }
     }
   }
 
@@ -149,10 +159,11 @@ final class Supply {
     return map == null ? null : tangentBy(map);
   }
 
-  private double[] siemensAtNodes() {
-    double[] sum = new double[drawnSiemens.length];
+  private double[][] siemensAtNodes() {
+    double[][] sum = new double[drawnSiemens.length][];
     for (int n = 0; n < sum.length; n++) {
-      sum[n] = drawnSiemens[n] + meterSiemens[n];
+      sum[n] = drawnSiemens[n].clone();
+      sum[n][n] += meterSiemens[n];
     }
     return sum;
   }
@@ -211,9 +222,11 @@ final class Supply {
     }
     for (int r = 0; r < ports; r++) {
       for (int c = 0; c < ports; c++) {
-        int n = portUnknowns[c];
-        right[r] -= byDrawn[r][c] * drawnAmps[n];
-        left[r][c] = (r == c ? 1 : 0) + byDrawn[r][c] * drawnSiemens[n];
+        right[r] -= byDrawn[r][c] * drawnAmps[portUnknowns[c]];
+        left[r][c] = r == c ? 1 : 0;
+        for (int k = 0; k < ports; k++) {
+          left[r][c] += byDrawn[r][k] * drawnSiemens[portUnknowns[k]][portUnknowns[c]];
+        }
       }
     }
     DenseLu lu = DenseLu.of(left);
@@ -261,7 +274,10 @@ final class Supply {
     double[] change = last.stateByGap.clone();
     for (int p = 0; p < portUnknowns.length; p++) {
       int n = portUnknowns[p];
-      double drawn = portAmps[p] - drawnSiemens[n] * portVolts[p];
+      double drawn = portAmps[p];
+      for (int q = 0; q < portUnknowns.length; q++) {
+        drawn -= drawnSiemens[n][portUnknowns[q]] * portVolts[q];
+      }
       double more = drawn - last.drawnAmps[n];
       drawnAmps[n] = last.drawnAmps[n] + share * more;
       for (int s = 0; s < change.length; s++) {

@@ -8,10 +8,8 @@ import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
-import org.jspecify.annotations.Nullable;
 import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Capacitor;
 import railwalk.circuit.Circuit;
@@ -19,13 +17,8 @@ import railwalk.circuit.Coupling;
 import railwalk.circuit.Diode;
 import railwalk.circuit.Element;
 import railwalk.circuit.Filament;
-import railwalk.circuit.Fuse;
-import railwalk.circuit.Inductor;
-import railwalk.circuit.Lamp;
 import railwalk.circuit.Node;
 import railwalk.circuit.RectifierSection;
-import railwalk.circuit.Resistor;
-import railwalk.circuit.Switch;
 import railwalk.circuit.Winding;
 import railwalk.circuit.Wire;
 import railwalk.device.SectionKind;
@@ -39,17 +32,14 @@ import railwalk.device.SectionKind;
  * through rectifiers, windings and other large capacitors. It never passes a tube that amplifies,
  * nor the reference. Floods that meet, or whose windings share a transformer's primary, are one
  * group; a group without a rectifier is none. Then each reservoir takes in the filter stages behind
- * it, one by one, until what is left of the ripple can do no harm.
+ * it, one by one, until what is left of the ripple can do no harm by an estimate; once the ripple
+ * is known, {@link #grown} takes in what the estimate missed.
  */
 public final class RippleGroups {
-  /** A capacitor from this size up holds its node through a line period. */
-  private static final double HOLDING_FARADS = 0.5e-6;
-
-  /** Growth stops where a stage's ripple is this small a part of the reservoir's. */
-  private static final double RIPPLE_LEFT = 0.02;
-
-  /** A smaller capacitor ends a stage when it takes at least this much of the ripple away. */
-  private static final double SMOOTHING = 0.7;
+  /**
+   * Ripple of a reservoir (rms over mean volts) that groups are first laid out for; more is rare.
+   */
+  private static final double USUAL_RIPPLE = 0.15;
 
   /** Usual inductance of a filter choke where the netlist gives none (common practice). */
   public static final double USUAL_CHOKE_HENRIES = 5;
@@ -64,7 +54,7 @@ public final class RippleGroups {
     this.circuit = circuit;
     this.at = circuit.elementsByNode();
     for (Capacitor capacitor : circuit.elements(Capacitor.class)) {
-      if (capacitor.farads() >= HOLDING_FARADS) {
+      if (StageSearch.isHolding(capacitor)) {
         held.addAll(capacitor.nodes());
       }
     }
@@ -76,6 +66,49 @@ public final class RippleGroups {
   /** Returns the groups of {@code circuit}, in netlist order of their first part. */
   public static List<RippleGroup> of(Circuit circuit) {
     return new RippleGroups(circuit).find();
+  }
+
+  /**
+   * Returns {@code groups} with what must be inside by the ripple that was found at their ports:
+   * behind each that ripples more than {@link StageSearch#RIPPLE_LIMIT}, the next filter stages and
+   * the coils of known inductance; empty when there is nothing to take in.
+   *
+   * @param ripples by port: rms over mean volts
+   */
+  public static Optional<List<RippleGroup>> grown(
+      Circuit circuit, List<RippleGroup> groups, Map<Node, Double> ripples) {
+    return new RippleGroups(circuit).grow(groups, ripples);
+  }
+
+  private Optional<List<RippleGroup>> grow(List<RippleGroup> groups, Map<Node, Double> ripples) {
+    List<RippleGroup> result = new ArrayList<>(groups);
+    boolean anyGrown = false;
+    for (int g = 0; g < result.size(); g++) {
+      RippleGroup group = result.get(g);
+      Set<Node> inside = new LinkedHashSet<>(group.nodes());
+      inside.remove(circuit.reference());
+      Set<Node> elsewhere = new HashSet<>();
+      for (int other = 0; other < result.size(); other++) {
+        if (other != g) {
+          elsewhere.addAll(result.get(other).nodes());
+        }
+      }
+      boolean onceAPeriod = group.arrangements().stream().anyMatch(Arrangement::chargesOnce);
+      StageSearch search =
+          new StageSearch(circuit, at, amplifying, inside, elsewhere, onceAPeriod, true);
+      int before = inside.size();
+      for (Node port : group.ports()) {
+        double ripple = ripples.getOrDefault(port, 0.0);
+        if (ripple > StageSearch.RIPPLE_LIMIT) {
+          search.takeInBehind(port, ripple);
+        }
+      }
+      if (inside.size() > before) {
+        result.set(g, group(inside, group.arrangements(), group.outputs(), group.feeders()));
+        anyGrown = true;
+      }
+    }
+    return anyGrown ? Optional.of(result) : Optional.empty();
   }
 
   private List<RippleGroup> find() {
@@ -99,10 +132,41 @@ public final class RippleGroups {
       floods.add(flood);
       transformers.add(names);
     }
-    return floods.stream()
-        .map(this::group)
-        .sorted(Comparator.comparingInt(g -> circuit.elements().indexOf(g.elements().get(0))))
-        .toList();
+    List<RippleGroup> groups = new ArrayList<>();
+    for (Cut cut : mergedCuts(floods)) {
+      List<Element> feeders = cut.alternating.stream().filter(e -> feeds(e, cut.outputs)).toList();
+      groups.add(group(cut.inside, cut.arrangements, cut.outputs, feeders));
+    }
+    groups.sort(Comparator.comparingInt(g -> circuit.elements().indexOf(g.elements().get(0))));
+    return groups;
+  }
+
+  /** A flood and the nodes that it has grown to. */
+  private record Cut(
+      Set<Node> flood,
+      Set<Node> inside,
+      List<Element> alternating,
+      List<Node> outputs,
+      List<String> arrangements) {}
+
+  /** Returns what the floods grow to; those that grow into each other become one. */
+  private List<Cut> mergedCuts(List<Set<Node>> floods) {
+    List<Cut> cuts = new ArrayList<>();
+    for (Set<Node> flood : floods) {
+      Cut cut = cut(flood);
+      int i = cuts.size() - 1;
+      while (i >= 0) {
+        if (meet(cuts.get(i).inside, cut.inside)) {
+          Set<Node> both = new LinkedHashSet<>(cuts.remove(i).flood);
+          both.addAll(cut.flood);
+          cut = cut(both);
+          i = cuts.size();
+        }
+        i--;
+      }
+      cuts.add(cut);
+    }
+    return cuts;
   }
 
   private static <T> boolean meet(Set<T> a, Set<T> b) {
@@ -138,7 +202,7 @@ public final class RippleGroups {
         || isRectifier(element)
         || element instanceof Filament
         || element instanceof Wire
-        || (element instanceof Capacitor c && c.farads() >= HOLDING_FARADS);
+        || StageSearch.isHolding(element);
   }
 
   private static boolean isRectifier(Element element) {
@@ -153,18 +217,24 @@ public final class RippleGroups {
         .anyMatch(RippleGroups::isRectifier);
   }
 
-  private RippleGroup group(Set<Node> flood) {
+  private Cut cut(Set<Node> flood) {
     Set<Node> inside = new LinkedHashSet<>(flood);
     List<Element> alternating = elementsWithin(inside);
     List<Node> outputs = outputs(flood, alternating);
-    Set<Node> frontier = new LinkedHashSet<>(flood);
-    frontier.retainAll(held);
     List<String> arrangements = Arrangement.of(circuit, alternating, outputs);
-    for (Node node : frontier) {
-      int output = outputs.indexOf(node);
-      boolean onceAPeriod = output >= 0 && Arrangement.chargesOnce(arrangements.get(output));
-      grow(node, 1, inside, onceAPeriod);
+    for (Node node : flood) {
+      if (held.contains(node)) {
+        int output = outputs.indexOf(node);
+        boolean onceAPeriod = output >= 0 && Arrangement.chargesOnce(arrangements.get(output));
+        new StageSearch(circuit, at, amplifying, inside, Set.of(), onceAPeriod, false)
+            .takeInBehind(node, USUAL_RIPPLE);
+      }
     }
+    return new Cut(flood, inside, alternating, outputs, arrangements);
+  }
+
+  private RippleGroup group(
+      Set<Node> inside, List<String> arrangements, List<Node> outputs, List<Element> feeders) {
     List<Element> elements = elementsWithin(inside);
     Set<Element> taken = new HashSet<>(elements);
     Set<Node> touched = new HashSet<>();
@@ -175,7 +245,6 @@ public final class RippleGroups {
             .filter(n -> !n.equals(circuit.reference()))
             .filter(n -> at.getOrDefault(n, List.of()).stream().anyMatch(e -> loads(e, taken)))
             .toList();
-    List<Element> feeders = alternating.stream().filter(e -> feeds(e, outputs)).toList();
     return new RippleGroup(arrangements, elements, nodes, ports, outputs, feeders);
   }
 
@@ -261,113 +330,5 @@ public final class RippleGroups {
             n ->
                 at.getOrDefault(n, List.of()).stream()
                     .anyMatch(e -> isRectifier(e) || e instanceof Filament));
-  }
-
-  /** Takes in the filter stages behind {@code node}, while {@code ripple} of it is still left. */
-  private void grow(Node node, double ripple, Set<Node> inside, boolean onceAPeriod) {
-    for (Element first : at.getOrDefault(node, List.of())) {
-      stage(node, first, inside, onceAPeriod)
-          .ifPresent(
-              stage -> {
-                inside.addAll(stage.nodes());
-                double left = ripple * stage.ripplePassed();
-                if (left > RIPPLE_LEFT) {
-                  grow(stage.end(), left, inside, onceAPeriod);
-                }
-              });
-    }
-  }
-
-  /** A chain of series parts from a held node to the next one. */
-  private record Stage(List<Node> nodes, Node end, double ripplePassed) {}
-
-  private Optional<Stage> stage(Node start, Element first, Set<Node> inside, boolean onceAPeriod) {
-    List<Node> passed = new ArrayList<>();
-    double ohms = 0;
-    double henries = 0;
-    Node here = start;
-    Element part = first;
-    while (true) {
-      if (!isSeriesPart(part)) {
-        return Optional.empty();
-      }
-      ohms += seriesOhms(part);
-      henries += part instanceof Inductor l ? usualHenries(l) : 0;
-      Optional<Node> next = Conduction.across(part, here).findFirst();
-      if (next.isEmpty()
-          || inside.contains(next.get())
-          || passed.contains(next.get())
-          || next.get().equals(circuit.reference())) {
-        return Optional.empty();
-      }
-      here = next.get();
-      passed.add(here);
-      double farads = faradsToReference(here);
-      double passes = stageFactor(ohms, henries, farads, 2);
-      if (onceAPeriod && henries > 0) {
-        passes = Math.max(passes, stageFactor(ohms, henries, farads, 1));
-      }
-      if (farads >= HOLDING_FARADS || passes < SMOOTHING) {
-        return Optional.of(new Stage(passed, here, passes));
-      }
-      Element onward = onward(here, part);
-      if (onward == null) {
-        return Optional.empty();
-      }
-      part = onward;
-    }
-  }
-
-  /** Returns the one other part at a node that two series parts meet at; null at any other node. */
-  private @Nullable Element onward(Node node, Element from) {
-    List<Element> others =
-        at.getOrDefault(node, List.of()).stream()
-            .filter(e -> e != from && !(e instanceof Capacitor))
-            .toList();
-    return others.size() == 1 ? others.get(0) : null;
-  }
-
-  private static boolean isSeriesPart(Element element) {
-    return element instanceof Resistor
-        || element instanceof Inductor
-        || element instanceof Switch
-        || element instanceof Fuse
-        || element instanceof Lamp
-        || element instanceof Wire;
-  }
-
-  private static double seriesOhms(Element element) {
-    if (element instanceof Resistor r) {
-      return r.ohms();
-    }
-    if (element instanceof Inductor l && !Double.isNaN(l.dcOhms())) {
-      return l.dcOhms();
-    }
-    return element instanceof Lamp lamp ? lamp.ratedVolts() / lamp.ratedAmps() : 0;
-  }
-
-  private static double usualHenries(Inductor inductor) {
-    return Double.isNaN(inductor.henries()) ? USUAL_CHOKE_HENRIES : inductor.henries();
-  }
-
-  private double faradsToReference(Node node) {
-    return at.getOrDefault(node, List.of()).stream()
-        .map(e -> e instanceof Capacitor c ? c : null)
-        .filter(Objects::nonNull)
-        .filter(c -> c.nodes().contains(circuit.reference()))
-        .mapToDouble(Capacitor::farads)
-        .sum();
-  }
-
-  /**
-   * Returns how much of the ripple at a multiple of the line's frequency passes a stage: one over
-   * the magnitude of 1 + jωRC − ω²LC, at most 1. A choke may resonate at the line's own frequency,
-   * which is in the ripple of a reservoir that is charged once a period.
-   */
-  private double stageFactor(double ohms, double henries, double farads, int multiple) {
-    double omega = multiple * 2 * Math.PI * circuit.line().hertz();
-    double real = 1 - omega * omega * henries * farads;
-    double imaginary = omega * ohms * farads;
-    return Math.min(1, 1 / Math.hypot(real, imaginary));
   }
 }

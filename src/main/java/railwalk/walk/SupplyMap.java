@@ -30,6 +30,11 @@ public record SupplyMap(
     feeds = Map.copyOf(feeds);
   }
 
+  /** Returns this map with groups that hold more of the circuit, in the same order. */
+  public SupplyMap withGroups(List<RippleGroup> grown) {
+    return new SupplyMap(grown, supplyNodes, undefined, idleSections, feeds);
+  }
+
   /** Returns the supply node that {@code node} hangs from, itself when it is one. */
   public Optional<Node> supplyOf(Node node) {
     return Optional.ofNullable(feeds.get(node));

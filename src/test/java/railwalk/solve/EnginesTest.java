@@ -64,7 +64,7 @@ class EnginesTest {
     assertThat(worst).isLessThanOrEqualTo(1);
   }
 
-  private static List<Path> netlists() throws IOException {
+  static List<Path> netlists() throws IOException {
     return Stream.of("amps", "supplies")
         .map(Path.of("test-netlists")::resolve)
         .filter(Files::isDirectory)
