@@ -17,7 +17,7 @@ public interface OperatingPoint {
   /** Returns the circuit that was solved. */
   Circuit circuit();
 
-  /** Returns the walk it was solved by, its ripple groups as far grown as was needed. */
+  /** Returns the walk it was solved by. */
   SupplyMap map();
 
   /** Returns the mean volts of {@code node} against the reference; NaN without a DC path. */

@@ -21,10 +21,10 @@ public final class OperatingPointSolver {
 
   /**
    * Returns the operating point of {@code circuit}, or which node would not settle. Where the
-   * walk's ripple groups turn out to end too early they are grown, and the point's map holds them
-   * so.
+   * walk's ripple groups turn out to end too early they are grown and all is solved again.
    */
-  public static SolveOutcome solve(Circuit circuit, SupplyMap map) {
+  public static SolveOutcome solve(Circuit circuit, SupplyMap walk) {
+    SupplyMap map = walk;
     while (true) {
       CoupledSolver solver = new CoupledSolver(circuit, map, false);
       if (!(solver.startCold() && solver.settle())) {
@@ -33,7 +33,7 @@ public final class OperatingPointSolver {
           return new NotSolved(solver.failedNode(), solver.failure(), solver.trace().lines());
         }
       }
-      SolvedPoint point = new SolvedPoint(solver);
+      SolvedPoint point = new SolvedPoint(solver, walk);
       Optional<List<RippleGroup>> grown =
           RippleGroups.grown(circuit, map.groups(), portRipples(point));
       if (grown.isEmpty()) {

@@ -26,11 +26,18 @@ final class SolvedPoint implements OperatingPoint {
   private static final double SWINGING = 0.2;
 
   private final CoupledSolver solver;
+  private final SupplyMap walk;
   private final List<CycleReport> reports = new ArrayList<>();
   private final double[] sourceOhms;
 
-  SolvedPoint(CoupledSolver solver) {
+  /**
+   * Takes a settled solver.
+   *
+   * @param walk as it was found; the solver's own may have ripple groups that hold more
+   */
+  SolvedPoint(CoupledSolver solver, SupplyMap walk) {
     this.solver = solver;
+    this.walk = walk;
     solver.supplies.forEach(s -> reports.add(s.report()));
     sourceOhms = new double[circuit().nodes().size()];
     SparseLu lu = solver.factored();
@@ -55,7 +62,7 @@ final class SolvedPoint implements OperatingPoint {
 
   @Override
   public SupplyMap map() {
-    return solver.map();
+    return walk;
   }
 
   @Override
@@ -283,7 +290,7 @@ final class SolvedPoint implements OperatingPoint {
 
   /** Settles the supply again with the meter in: needed where it draws alternating current too. */
   private double withMeter(Node node, double meterOhms) {
-    CoupledSolver again = new CoupledSolver(circuit(), map(), false);
+    CoupledSolver again = new CoupledSolver(circuit(), solver.map(), false);
     again.startFrom(solver);
     Supply supply = again.supplyOf(node);
     if (supply == null) {

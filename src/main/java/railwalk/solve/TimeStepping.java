@@ -8,6 +8,7 @@ import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Capacitor;
 import railwalk.circuit.Element;
 import railwalk.circuit.Node;
+import railwalk.walk.SupplyMap;
 
 /**
  * The second engine: the whole netlist stepped through a line period, brought to where it repeats
@@ -42,9 +43,14 @@ public final class TimeStepping {
 
   private TimeStepping(OperatingPoint from) {
     this.from = from;
-    net = new TimeNetwork(from.circuit(), from.map());
+    net = new TimeNetwork(from.circuit(), mapOf(from));
     sweep = new TimeSweep(net);
     states = new double[net.stores.size()];
+  }
+
+  /** Returns the walk with the ripple groups that were solved, which say what filter chokes are. */
+  private static SupplyMap mapOf(OperatingPoint from) {
+    return from instanceof SolvedPoint point ? point.solver().map() : from.map();
   }
 
   /** Returns the settled period of the circuit that {@code averaged} is the operating point of. */
