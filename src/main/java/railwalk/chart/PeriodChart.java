@@ -12,6 +12,8 @@ import railwalk.circuit.Winding;
 import railwalk.device.RectifierRatings;
 import railwalk.solve.LineCycle;
 import railwalk.solve.OperatingPoint;
+import railwalk.solve.RectifierLoad;
+import railwalk.solve.WindingLoad;
 import railwalk.units.Quantity;
 import railwalk.walk.SupplyNode;
 
@@ -133,7 +135,7 @@ public final class PeriodChart {
             new Table.Column("Inverse V", Use.KEY_FIGURES),
             new Table.Column("Limit V", Use.FIGURES));
     List<Table.Row> rows = new ArrayList<>();
-    for (LineCycle.RectifierLoad load : cycle.rectifiers()) {
+    for (RectifierLoad load : cycle.rectifiers()) {
       Element part = load.rectifier();
       double peakLimit = Double.NaN;
       double inverseLimit = Double.NaN;
@@ -166,7 +168,7 @@ public final class PeriodChart {
             new Table.Column("Current rms", Use.FIGURES),
             new Table.Column("Peak", Use.FIGURES));
     List<Table.Row> rows = new ArrayList<>();
-    for (LineCycle.WindingLoad load : cycle.windings()) {
+    for (WindingLoad load : cycle.windings()) {
       Winding winding = load.winding();
       Winding.Section section = winding.sections().get(load.section());
       double scale = circuit.line().scale(winding.atLineVolts());

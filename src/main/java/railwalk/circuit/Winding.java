@@ -15,9 +15,15 @@ import java.util.List;
  *     line
  * @param transformer name of the transformer whose primary it shares; empty when none
  * @param wall whether this is the wall outlet itself (no isolation from the line)
+ * @param ratedAmps greatest current rms of a section; NaN when not given
  */
 public record Winding(
-    String name, List<Section> sections, double atLineVolts, String transformer, boolean wall)
+    String name,
+    List<Section> sections,
+    double atLineVolts,
+    String transformer,
+    boolean wall,
+    double ratedAmps)
     implements Element {
   @Override
   public List<Node> nodes() {
@@ -45,6 +51,12 @@ public record Winding(
   /** Keeps a copy of the sections. */
   public Winding {
     sections = List.copyOf(sections);
+  }
+
+  /** A winding without a current rating. */
+  public Winding(
+      String name, List<Section> sections, double atLineVolts, String transformer, boolean wall) {
+    this(name, sections, atLineVolts, transformer, wall, Double.NaN);
   }
 
   /** Returns the ends and taps in order. */

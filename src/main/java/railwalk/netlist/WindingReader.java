@@ -21,6 +21,9 @@ import railwalk.units.Measure;
  * {@code V + I · (R + Rp · (V / Vp)²)}: R the winding's resistance from the tap marked 0, Rp and Vp
  * resistance and volts of the primary of the transformer named by {@code on=}.
  *
+ * <p>{@code amps=} is the greatest current rms that the winding's wire is made for; {@code load=}
+ * says nothing of that, since a nameplate gives direct current for a high-voltage winding.
+ *
  * <p>The wall outlet is a winding called LINE, WALL or MAINS (with anything around it), or a plain
  * two-node one with neither {@code on=} nor {@code rdc=}, {@code at=}, {@code load=} whose volts
  * are within 5 % of the line's, or are usual line volts where there is no {@code .line}.
@@ -161,6 +164,7 @@ final class WindingReader {
     Word load = part.option("load");
     Word at = part.option("at");
     Word on = part.option("on");
+    Word rating = part.option("amps");
     Transformer transformer = transformer(on);
     boolean plain = resistances.isEmpty() && load == null && at == null && on == null;
     boolean wall = isWall(volts, plain, on != null, figures);
@@ -178,10 +182,13 @@ final class WindingReader {
       sections.add(new Winding.Section(nodes.get(i), nodes.get(i + 1), sectionVolts, ohms[i]));
     }
     double atVolts = at == null ? Double.NaN : part.readPositive(at, Measure.VOLTAGE);
+    double ratedAmps = rating == null ? Double.NaN : part.readPositive(rating, Measure.CURRENT);
     part.done();
     String transformerName = transformer == null ? "" : transformer.name();
     part.draft()
-        .add(new Winding(part.name(), sections, atVolts, transformerName, wall), part.span());
+        .add(
+            new Winding(part.name(), sections, atVolts, transformerName, wall, ratedAmps),
+            part.span());
   }
 
   private @Nullable Transformer transformer(@Nullable Word on) {

@@ -22,6 +22,7 @@ import railwalk.device.SectionKind;
  *     its plates)
  * @param watts heat by part, ripple included
  * @param rmsAmps by part
+ * @param loads what windings, rectifiers and filaments stand
  * @param outputPeakAmps by output: greatest current that came to it at any instant
  * @param outputMeanAmps by output: its mean
  * @param voltsByDrawn by node unknown and node unknown: volts over ampere drawn (negative ohms)
@@ -35,6 +36,7 @@ record CycleReport(
     Map<Element, Double> meanAmps,
     Map<Element, Double> watts,
     Map<Element, Double> rmsAmps,
+    CycleLoads loads,
     double[] outputPeakAmps,
     double[] outputMeanAmps,
     double[][] voltsByDrawn,
@@ -163,6 +165,7 @@ record CycleReport(
     private final double[] pathWatts;
     private final Map<Resistor, double[]> resistorSquares = new HashMap<>();
     private final double[] outputPeaks;
+    private final CycleLoads loads;
 
     Observation(CycleNetwork net) {
       this.net = net;
@@ -171,6 +174,7 @@ record CycleReport(
       pathSquares = new double[net.paths.size()];
       pathWatts = new double[net.paths.size()];
       outputPeaks = new double[net.group.outputs().size()];
+      loads = new CycleLoads(net);
       for (Element e : net.group.elements()) {
         if (e instanceof Resistor r) {
           resistorSquares.put(r, new double[1]);
@@ -180,6 +184,7 @@ record CycleReport(
 
     @Override
     public void stage(double share, double[] x, double[] pathAmps, double[] pathVolts) {
+      loads.stage(share, x, pathAmps, pathVolts);
       for (int n = 0; n < x.length; n++) {
         squares[n] += share * x[n] * x[n];
       }
@@ -276,6 +281,7 @@ record CycleReport(
           meanAmps,
           watts,
           rmsAmps,
+          loads,
           outputPeaks,
           outputMeans,
           voltsByDrawn,

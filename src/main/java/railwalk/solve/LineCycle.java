@@ -15,24 +15,6 @@ import railwalk.walk.SupplyMap;
  * Immutable to its readers.
  */
 public final class LineCycle {
-  /**
-   * What a winding carries and gives.
-   *
-   * @param section its place among the winding's sections, from 0
-   * @param rmsVolts between the section's ends, under load
-   */
-  public record WindingLoad(
-      Winding winding, int section, double rmsVolts, double rmsAmps, double peakAmps) {}
-
-  /**
-   * What a diode, or one plate of a rectifier tube, stands.
-   *
-   * @param plate its place among the tube's plates, from 0
-   * @param inverseVolts greatest volts against its way
-   */
-  public record RectifierLoad(
-      Element rectifier, int plate, double meanAmps, double peakAmps, double inverseVolts) {}
-
   private final TimeNetwork net;
   private final SupplyMap map;
   private final double[] means;

@@ -51,8 +51,20 @@ public interface OperatingPoint {
   /** Returns the rectifier groups' outputs. */
   List<SupplyPoint> supplies();
 
-  /** Returns the rms ripple at a node that is inside a ripple group; empty elsewhere. */
+  /**
+   * Returns the rms ripple at a node inside a ripple group or at a supply node behind one; empty
+   * elsewhere. Behind the group it is an estimate.
+   */
   Optional<Double> rippleVoltsRms(Node node);
+
+  /** Returns what windings and heaters give under load and what the rectifiers stand. */
+  AcLoads acLoads();
+
+  /**
+   * Returns the lowest and the highest volts of {@code node} over the period; the mean twice where
+   * it carries no ripple worth counting.
+   */
+  AcLoads.Range range(Node node);
 
   /**
    * Returns the resistance that a meter at {@code node} sees towards the reference (ohm): the slope

@@ -29,6 +29,7 @@ final class SolvedPoint implements OperatingPoint {
   private final SupplyMap walk;
   private final List<CycleReport> reports = new ArrayList<>();
   private final double[] sourceOhms;
+  private @Nullable AcLoads acLoads;
 
   /**
    * Takes a settled solver.
@@ -214,9 +215,27 @@ final class SolvedPoint implements OperatingPoint {
   @Override
   public Optional<Double> rippleVoltsRms(Node node) {
     CycleReport report = reportOf(node);
-    return report == null || report.net().at(node) < 0
+    if (report == null) {
+      return RippleBehind.rippleVoltsRms(this, node);
+    }
+    return report.net().at(node) < 0
         ? Optional.empty()
         : Optional.of(report.rippleRmsVolts()[report.net().at(node)]);
+  }
+
+  @Override
+  public AcLoads acLoads() {
+    synchronized (solver) {
+      if (acLoads == null) {
+        acLoads = AcLoads.of(this, reports);
+      }
+      return acLoads;
+    }
+  }
+
+  @Override
+  public AcLoads.Range range(Node node) {
+    return AcLoads.range(node, volts(node), reports);
   }
 
   @Override

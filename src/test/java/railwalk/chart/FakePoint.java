@@ -12,6 +12,7 @@ import railwalk.circuit.RectifierSection;
 import railwalk.circuit.RegulatorSection;
 import railwalk.circuit.Resistor;
 import railwalk.device.SectionCurrents;
+import railwalk.solve.AcLoads;
 import railwalk.solve.OperatingPoint;
 import railwalk.solve.SectionPoint;
 import railwalk.solve.SupplyPoint;
@@ -94,6 +95,16 @@ public record FakePoint(
     return map.groups().stream().anyMatch(g -> g.outputs().contains(node))
         ? Optional.of(4.7)
         : Optional.empty();
+  }
+
+  @Override
+  public AcLoads acLoads() {
+    return AcLoads.NONE;
+  }
+
+  @Override
+  public AcLoads.Range range(Node node) {
+    return new AcLoads.Range(volts(node), volts(node));
   }
 
   @Override
