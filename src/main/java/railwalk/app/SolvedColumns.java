@@ -11,6 +11,7 @@ import railwalk.netlist.Origins;
 import railwalk.solve.OperatingPoint;
 import railwalk.solve.OperatingPointSolver;
 import railwalk.solve.SolveOutcome;
+import railwalk.solve.Unloaded;
 import railwalk.source.Diagnostic;
 import railwalk.spread.FirstOrderBands;
 import railwalk.walk.SupplyMap;
@@ -36,11 +37,13 @@ final class SolvedColumns {
     return columns;
   }
 
+  /** Only the netlist as it stands is looked at before its tubes warm up. */
   private static Column column(String state, Circuit circuit, Origins origins) throws CannotDo {
     SupplyMap map = Walk.of(circuit);
     OperatingPoint point = solve(state, circuit, map);
-    List<Diagnostic> findings = placed(Findings.of(circuit, map, point), origins);
-    return new Column(state, point, FirstOrderBands.of(point), findings);
+    OperatingPoint unloaded = state.isEmpty() ? Unloaded.of(circuit).orElse(null) : null;
+    List<Diagnostic> findings = placed(Findings.of(circuit, map, point, unloaded), origins);
+    return new Column(state, point, FirstOrderBands.of(point), findings, unloaded);
   }
 
   /** Returns the operating point of {@code circuit}, or a refusal that names the node. */
@@ -66,6 +69,9 @@ final class SolvedColumns {
         finding.code(),
         finding.message(),
         finding.hint(),
-        origins.of(finding.elementName()).orElse(null));
+        origins
+            .of(finding.elementName())
+            .or(() -> origins.ofBottle(finding.elementName()))
+            .orElse(null));
   }
 }

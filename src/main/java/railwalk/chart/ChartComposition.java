@@ -41,6 +41,10 @@ final class ChartComposition {
     if (!drops.isEmpty()) {
       pages.add(new Page("Drops and what they tell of currents", drops));
     }
+    List<Block> loads = new LoadsPage(first, wording).blocks();
+    if (!loads.isEmpty()) {
+      pages.add(new Page("Supply parts and heaters against their limits", loads));
+    }
     if (!input.states().isEmpty()) {
       pages.add(new StatesPage(input, figures, wording).page());
     }

@@ -8,6 +8,7 @@ import java.util.List;
  * @param conditions under which they hold
  * @param points one for each node in netlist order, except the reference and what lies inside a
  *     tube
+ * @param alternating windings under load, then ripple at the supply nodes
  * @param tubes one for each section, tubes in V order
  * @param supplies one for each rectifier output
  * @param findings most urgent first
@@ -15,6 +16,7 @@ import java.util.List;
 public record Figures(
     Conditions conditions,
     List<Point> points,
+    List<Alternating> alternating,
     List<Tube> tubes,
     List<Supply> supplies,
     List<Finding> findings) {
@@ -49,6 +51,15 @@ public record Figures(
   }
 
   /**
+   * Volts that alternate.
+   *
+   * @param node a supply node, or the name of a winding
+   * @param kind "ac": from end to end of a winding under load; "ripple": what is left of a supply
+   *     node's volts when the mean is taken off
+   */
+  public record Alternating(String node, String kind, double rmsVolts) {}
+
+  /**
    * One section of a tube: volts against its cathode (filament middle), currents into the electrode
    * positive.
    *
@@ -80,6 +91,7 @@ public record Figures(
 
   public Figures {
     points = List.copyOf(points);
+    alternating = List.copyOf(alternating);
     tubes = List.copyOf(tubes);
     supplies = List.copyOf(supplies);
     findings = List.copyOf(findings);

@@ -18,14 +18,17 @@ import railwalk.circuit.Node;
 import railwalk.circuit.RectifierSection;
 import railwalk.circuit.RegulatorSection;
 import railwalk.circuit.StandIn;
+import railwalk.circuit.Winding;
 import railwalk.device.Electrode;
 import railwalk.device.SectionKind;
 import railwalk.device.SectionType;
+import railwalk.solve.AcLoads;
 import railwalk.solve.OperatingPoint;
 import railwalk.solve.SectionPoint;
 import railwalk.source.Diagnostic;
 import railwalk.source.SourceSpan;
 import railwalk.spread.Band;
+import railwalk.walk.SupplyNode;
 
 /** Gathers the {@link Figures} of one column. */
 final class FiguresBuilder {
@@ -54,6 +57,7 @@ final class FiguresBuilder {
             column.state(),
             circuit.reference().name()),
         points(),
+        alternating(),
         tubes(),
         point.supplies().stream()
             .map(
@@ -89,6 +93,19 @@ final class FiguresBuilder {
         band == null ? Double.NaN : band.highVolts(),
         Double.isNaN(volts) ? Double.NaN : point.meterVolts(node, circuit.meter().inputOhms(volts)),
         pins);
+  }
+
+  private List<Figures.Alternating> alternating() {
+    List<Figures.Alternating> found = new ArrayList<>();
+    AcLoads loads = point.acLoads();
+    for (Winding winding : circuit.elements(Winding.class)) {
+      found.add(new Figures.Alternating(winding.name(), "ac", loads.rmsVolts(winding)));
+    }
+    for (SupplyNode supply : column.map().supplyNodes()) {
+      double rms = point.rippleVoltsRms(supply.node()).orElse(Double.NaN);
+      found.add(new Figures.Alternating(supply.node().name(), "ripple", rms));
+    }
+    return found;
   }
 
   private List<Figures.Tube> tubes() {

@@ -88,11 +88,7 @@ final class LadderBuilder {
                     .filter(amps -> Math.abs(amps) > NOTABLE_AMPS)
                     .map(amps -> Quantity.amps(amps) + " used here")
                     .orElse(""),
-                column
-                    .point()
-                    .rippleVoltsRms(node)
-                    .map(volts -> "ripple " + Quantity.of(volts, "V") + " rms")
-                    .orElse(""))
+                cells.ripple(node).isEmpty() ? "" : "ripple " + cells.ripple(node) + " rms")
             .filter(line -> !line.isEmpty())
             .toList();
     return new Ladder.Stop(node.name(), Quantity.volts(column.point().volts(node)), lines, spans);

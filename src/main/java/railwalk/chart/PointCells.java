@@ -16,6 +16,9 @@ final class PointCells {
   /** Loading below this share is not worth a word: a meter's own error is larger. */
   private static final double NOTABLE_LOADING = 0.01;
 
+  /** Ripple below this is less than any reading at the bench shows. */
+  private static final double LEAST_RIPPLE_VOLTS = 10e-6;
+
   private final Column column;
   private final Map<String, Figures.Point> byNode = new HashMap<>();
   private final Map<Node, List<Element>> partsByNode;
@@ -62,6 +65,17 @@ final class PointCells {
     double read = meterVolts(node);
     return Math.abs(read - volts) > NOTABLE_LOADING * Math.abs(volts)
         && !Quantity.plainVolts(read).equals(Quantity.plainVolts(volts));
+  }
+
+  /** Returns the ripple rms with its unit: "3.18 V"; empty where it is not told. */
+  String ripple(Node node) {
+    double volts = column.point().rippleVoltsRms(node).orElse(Double.NaN);
+    if (Double.isNaN(volts)) {
+      return "";
+    }
+    return volts < LEAST_RIPPLE_VOLTS
+        ? "<" + Quantity.of(LEAST_RIPPLE_VOLTS, "V")
+        : Quantity.of(volts, "V");
   }
 
   /**

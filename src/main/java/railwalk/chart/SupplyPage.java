@@ -7,15 +7,13 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import railwalk.chart.Table.Use;
-import railwalk.circuit.Bottle;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Node;
 import railwalk.circuit.Winding;
 import railwalk.device.Electrode;
-import railwalk.device.RectifierRatings;
-import railwalk.device.SectionKind;
-import railwalk.device.SectionType;
+import railwalk.findings.WindingDuty;
 import railwalk.solve.SupplyPoint;
+import railwalk.solve.WindingLoad;
 import railwalk.units.Quantity;
 import railwalk.walk.SupplyNode;
 
@@ -48,7 +46,7 @@ final class SupplyPage {
     if (!column.point().supplies().isEmpty()) {
       blocks.add(rectifiers());
     }
-    if (!circuit.elements(Winding.class).isEmpty()) {
+    if (!column.point().acLoads().windings().isEmpty()) {
       blocks.add(windings());
     }
     return new Page("Supply", blocks);
@@ -84,7 +82,7 @@ final class SupplyPage {
     }
     row.add("");
     row.add(flow.fed(supply).map(Quantity::amps).orElse(""));
-    row.add(column.point().rippleVoltsRms(node).map(volts -> Quantity.of(volts, "V")).orElse(""));
+    row.add(cells.ripple(node));
     List<String> remarks = new ArrayList<>(cells.remarks(node));
     String fed = feeds(node);
     if (!fed.isEmpty()) {
@@ -145,7 +143,7 @@ final class SupplyPage {
             new Table.Column("Rectifier", Use.WORDS),
             new Table.Column("Arrangement", Use.WORDS),
             new Table.Column("DC out", Use.KEY_FIGURES),
-            new Table.Column("Peak", Use.FIGURES),
+            new Table.Column("Charging peak", Use.FIGURES),
             new Table.Column("Ripple rms", Use.FIGURES));
     List<Table.Row> rows = column.point().supplies().stream().map(this::row).toList();
     return Table.of("Rectifiers", columns, rows);
@@ -157,7 +155,6 @@ final class SupplyPage {
             .filter(g -> g.outputs().contains(supply.node()))
             .map(g -> RectifierFeed.of(circuit, g, supply.node()))
             .findFirst();
-    List<Bottle> tubes = feed.map(RectifierFeed::tubes).orElse(List.of());
     return new Table.Row(
         List.of(
             supply.node().name(),
@@ -166,52 +163,58 @@ final class SupplyPage {
             Quantity.amps(supply.dcAmps()),
             Quantity.amps(supply.peakAmps()),
             Quantity.of(supply.rippleVoltsRms(), "V")),
-        tubes.size() == 1 ? limits(tubes.get(0)) : "");
-  }
-
-  /** Returns the type's own limits, for one tube that makes the whole supply. */
-  private static String limits(Bottle tube) {
-    return tube.type().sections().stream()
-        .filter(s -> s.kind() == SectionKind.RECTIFIER)
-        .map(SectionType::rectifierRatings)
-        .findFirst()
-        .map(SupplyPage::limits)
-        .orElse("");
-  }
-
-  private static String limits(RectifierRatings ratings) {
-    List<String> limits = new ArrayList<>();
-    if (!Double.isNaN(ratings.dcAmpsMax())) {
-      limits.add("DC " + Quantity.amps(ratings.dcAmpsMax()));
-    }
-    if (!Double.isNaN(ratings.peakPlateAmpsMax())) {
-      limits.add("peak " + Quantity.amps(ratings.peakPlateAmpsMax()));
-    }
-    if (!Double.isNaN(ratings.firstCapacitorFaradsMax())) {
-      limits.add("first capacitor " + Quantity.of(ratings.firstCapacitorFaradsMax(), "F"));
-    }
-    return limits.isEmpty() ? "" : "limits of the type: " + String.join(", ", limits);
+        "");
   }
 
   private Table windings() {
-    List<Table.Column> columns =
-        List.of(
-            new Table.Column("Winding", Use.WORDS),
-            new Table.Column("Between", Use.WORDS),
-            new Table.Column("No load V AC", Use.KEY_FIGURES),
-            new Table.Column("Reading V AC", Use.WRITING));
+    List<WindingDuty> duties = WindingDuty.of(column.point());
+    boolean rated = duties.stream().anyMatch(d -> !Double.isNaN(d.winding().ratedAmps()));
+    List<Table.Column> columns = new ArrayList<>();
+    columns.add(new Table.Column("Winding", Use.WORDS));
+    columns.add(new Table.Column("Between", Use.WORDS));
+    columns.add(new Table.Column("No load V AC", Use.FIGURES));
+    columns.add(new Table.Column("Under load V AC", Use.KEY_FIGURES));
+    columns.add(new Table.Column("Reading V AC", Use.WRITING));
+    columns.add(new Table.Column("Current rms", Use.FIGURES));
+    if (rated) {
+      columns.add(new Table.Column("Rated", Use.FIGURES));
+    }
     List<Table.Row> rows = new ArrayList<>();
-    for (Winding winding : circuit.elements(Winding.class)) {
+    for (WindingLoad load : column.point().acLoads().windings()) {
+      Winding winding = load.winding();
+      Winding.Section section = winding.sections().get(load.section());
       double scale = circuit.line().scale(winding.atLineVolts());
-      for (Winding.Section section : winding.sections()) {
-        rows.add(
-            new Table.Row(
-                winding.name(),
-                section.a().name() + " and " + section.b().name(),
-                Quantity.plainVolts(section.openRmsVolts() * scale),
-                ""));
+      List<String> row = new ArrayList<>();
+      row.add(winding.name());
+      row.add(section.a().name() + " and " + section.b().name());
+      row.add(Quantity.plainVolts(section.openRmsVolts() * scale));
+      row.add(Quantity.plainVolts(load.rmsVolts()));
+      row.add("");
+      row.add(Quantity.amps(load.rmsAmps()));
+      if (rated) {
+        double amps = winding.ratedAmps();
+        row.add(Double.isNaN(amps) ? "" : Quantity.amps(amps));
+      }
+      boolean last = load.section() == winding.sections().size() - 1;
+      rows.add(new Table.Row(row, last ? heaters(winding, duties) : ""));
+    }
+    return Table.of("Windings, AC volts rms", columns, rows);
+  }
+
+  /** Returns what the heaters on a winding ask for: "heaters of V1 V2: 600 mA at rated volts". */
+  private static String heaters(Winding winding, List<WindingDuty> duties) {
+    for (WindingDuty duty : duties) {
+      if (duty.winding().equals(winding) && !duty.tubes().isEmpty()) {
+        return (duty.tubes().size() == 1 ? "heater of " : "heaters of ")
+            + String.join(" ", duty.tubes())
+            + ": "
+            + Quantity.amps(duty.heaterAmps())
+            + " at rated volts"
+            + (Double.isNaN(winding.ratedAmps())
+                ? ""
+                : " of " + Quantity.amps(winding.ratedAmps()));
       }
     }
-    return Table.of("Windings, AC volts rms with nothing connected", columns, rows);
+    return "";
   }
 }

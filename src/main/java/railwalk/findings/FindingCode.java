@@ -29,6 +29,10 @@ public enum FindingCode {
   CAPACITOR_NOWHERE("capacitor-nowhere", "check the node's name"),
   CAPACITOR_VOLTS(
       "capacitor-volts", "fit one whose rating also covers the volts before the {tubes} warm up"),
+  CAPACITOR_UNLOADED(
+      "capacitor-unloaded",
+      "electrolytics stand 10 to 15 % more than their rating for seconds only (common practice): fit"
+          + " one of higher rating, or a bleeder or a slower rectifier"),
   FIRST_CAPACITOR(
       "first-capacitor",
       "the limit depends on the resistance in series with each {plate}: more of that allows more"
@@ -37,6 +41,14 @@ public enum FindingCode {
   RECTIFIER_PEAK(
       "rectifier-peak", "a smaller reservoir, or resistance in each {plate} lead, brings it down"),
   RECTIFIER_INVERSE("rectifier-inverse", ""),
+  CHOKE_INPUT(
+      "choke-input",
+      "a bleeder that draws the rest, or a choke of more henries, holds the volts down"),
+  WINDING_CURRENT(
+      "winding-current", "a winding that carries too much runs hot: find what to take off"),
+  HEATER_VOLTS(
+      "heater-volts",
+      "the life of a {tube} shortens fast: a resistor in the heater lead brings it down"),
   PLATE_WATTS("plate-watts", ""),
   SCREEN_WATTS("screen-watts", ""),
   PLATE_VOLTS("plate-volts", ""),

@@ -27,7 +27,8 @@ public final class Findings {
           RectifierLoads::check,
           TubeLoads::check,
           GridLoads::check,
-          GasTubes::check);
+          GasTubes::check,
+          SupplyParts::check);
 
   private Findings() {}
 
@@ -38,13 +39,28 @@ public final class Findings {
    * @param point null when there is none: then only what the wiring shows is told
    */
   public static List<Finding> of(Circuit circuit, SupplyMap map, @Nullable OperatingPoint point) {
+    return of(circuit, map, point, null);
+  }
+
+  /**
+   * Returns the findings, in the same order.
+   *
+   * @param point null when there is none: then only what the wiring shows is told
+   * @param unloaded the amplifier on a high line before its tubes warm up; null to leave out what
+   *     it would show
+   */
+  public static List<Finding> of(
+      Circuit circuit,
+      SupplyMap map,
+      @Nullable OperatingPoint point,
+      @Nullable OperatingPoint unloaded) {
     Scene scene =
         new Scene(circuit, map, point, circuit.elementsByNode(), new DcPaths(map, circuit));
     Stream<Finding> wiring = WIRING.stream().flatMap(check -> check.apply(scene));
     Stream<Finding> loads =
         point == null
             ? Stream.empty()
-            : LOADS.stream().flatMap(check -> check.apply(new Solved(scene, point)));
+            : LOADS.stream().flatMap(check -> check.apply(new Solved(scene, point, unloaded)));
     return Stream.concat(wiring, loads).sorted(Comparator.comparing(Findings::rank)).toList();
   }
 

@@ -3,7 +3,9 @@ package railwalk.findings;
 import java.util.stream.Stream;
 import railwalk.circuit.Capacitor;
 import railwalk.circuit.Fuse;
+import railwalk.circuit.Line;
 import railwalk.circuit.Resistor;
+import railwalk.solve.OperatingPoint;
 import railwalk.units.Quantity;
 
 /** Capacitors, resistors and fuses against their ratings. */
@@ -14,7 +16,8 @@ final class PartLoads {
   private PartLoads() {}
 
   static Stream<Finding> check(Solved solved) {
-    return Stream.of(capacitors(solved), resistors(solved), fuses(solved)).flatMap(f -> f);
+    return Stream.of(capacitors(solved), unloaded(solved), resistors(solved), fuses(solved))
+        .flatMap(f -> f);
   }
 
   private static Stream<Finding> capacitors(Solved solved) {
@@ -31,6 +34,33 @@ final class PartLoads {
                         + Quantity.volts(volts(solved, capacitor))
                         + " DC across it and is rated "
                         + Quantity.volts(capacitor.ratedVolts())));
+  }
+
+  private static Stream<Finding> unloaded(Solved solved) {
+    OperatingPoint unloaded = solved.unloaded();
+    if (unloaded == null) {
+      return Stream.empty();
+    }
+    Line line = unloaded.circuit().line();
+    Scene scene = solved.scene();
+    String where =
+        scene.circuit().line().stated()
+            ? ", the {line} at " + Quantity.volts(line.volts()) + ","
+            : ", the {line} 10 % high,";
+    return CapacitorDuty.of(solved.point(), unloaded).stream()
+        .filter(duty -> duty.isOverUnloaded() && !duty.isOverRunning())
+        .map(
+            duty ->
+                FindingCode.CAPACITOR_UNLOADED.of(
+                    scene.words(),
+                    duty.capacitor().name(),
+                    duty.capacitor().name()
+                        + " rises to "
+                        + Quantity.volts(duty.unloadedVolts())
+                        + " before the {tubes} warm up"
+                        + where
+                        + " and is rated "
+                        + Quantity.volts(duty.capacitor().ratedVolts())));
   }
 
   private static double volts(Solved solved, Capacitor capacitor) {

@@ -3,85 +3,70 @@ package railwalk.findings;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Stream;
-import railwalk.circuit.Node;
+import railwalk.circuit.Diode;
 import railwalk.circuit.RectifierSection;
-import railwalk.device.RectifierRatings;
-import railwalk.solve.SupplyPoint;
-import railwalk.walk.RippleGroup;
 
-/** Rectifier tubes against the limits of their sheets. */
+/** Rectifiers against the limits of their sheets. */
 final class RectifierLoads {
+  private static final String SILICON_HINT =
+      "two in series, each with its own resistor across it, or a type that stands more";
+
   private RectifierLoads() {}
 
   static Stream<Finding> check(Solved solved) {
     List<Finding> findings = new ArrayList<>();
-    for (RippleGroup group : solved.scene().map().groups()) {
-      Swing swing = RectifierPath.swing(solved.scene(), group);
-      for (RectifierSection section : solved.scene().circuit().elements(RectifierSection.class)) {
-        if (group.elements().contains(section)) {
-          findings.addAll(check(solved, section, swing));
-        }
+    for (RectifierDuty duty : RectifierDuty.of(solved.point(), solved.unloaded())) {
+      if (duty.rectifier() instanceof RectifierSection section) {
+        check(solved, section, duty, findings);
+      } else {
+        check(solved, (Diode) duty.rectifier(), duty, findings);
       }
     }
     return findings.stream();
   }
 
-  private static List<Finding> check(Solved solved, RectifierSection section, Swing swing) {
-    RectifierRatings limits = section.type().rectifierRatings();
+  private static void check(
+      Solved solved, RectifierSection section, RectifierDuty duty, List<Finding> findings) {
+    String name = solved.scene().named(section.name(), section.bottle());
     String system = section.type().ratings().system();
-    List<Finding> findings = new ArrayList<>();
-    double dcAmps = Math.abs(solved.point().amps(section));
-    add(
-        findings,
-        solved,
-        section,
-        FindingCode.RECTIFIER_DC,
-        ": DC ",
-        new Excess(dcAmps, limits.dcAmpsMax(), "A", system));
-    Reservoir reservoir = Reservoir.at(solved.scene(), section.cathode());
-    double peakAmps =
-        solved.point().supplies().stream()
-            .filter(supply -> reservoir.nodes().contains(supply.node()))
-            .mapToDouble(SupplyPoint::peakAmps)
-            .max()
-            .orElse(0);
-    add(
-        findings,
-        solved,
-        section,
-        FindingCode.RECTIFIER_PEAK,
-        ": charging peaks ",
-        new Excess(peakAmps, limits.peakPlateAmpsMax(), "A", system));
-    add(
-        findings,
-        solved,
-        section,
-        FindingCode.RECTIFIER_INVERSE,
-        ": inverse peak ",
-        new Excess(
-            inverseVolts(solved, section, swing), limits.peakInverseVoltsMax(), "V", system));
-    return findings;
+    Excess mean = new Excess(duty.meanAmps(), duty.meanAmpsMax(), "A", system);
+    Excess peak = new Excess(duty.peakAmps(), duty.peakAmpsMax(), "A", system);
+    Excess inverse = new Excess(duty.inverseVolts(), duty.inverseVoltsMax(), "V", system);
+    if (mean.is()) {
+      findings.add(of(solved, FindingCode.RECTIFIER_DC, duty, name + ": DC " + mean.words()));
+    }
+    if (peak.is()) {
+      findings.add(
+          of(solved, FindingCode.RECTIFIER_PEAK, duty, name + ": charging peaks " + peak.words()));
+    }
+    if (inverse.is()) {
+      findings.add(
+          of(
+              solved,
+              FindingCode.RECTIFIER_INVERSE,
+              duty,
+              name + ": inverse peak " + inverse.words()));
+    }
   }
 
-  /** Returns the reservoir's volts plus the peak of the plate's own swing. */
-  private static double inverseVolts(Solved solved, RectifierSection section, Swing swing) {
-    double peak = 0;
-    for (Node plate : section.plates()) {
-      peak = Math.max(peak, Math.sqrt(2) * Math.abs(swing.rmsVolts().getOrDefault(plate, 0.0)));
+  private static void check(
+      Solved solved, Diode diode, RectifierDuty duty, List<Finding> findings) {
+    String name = diode.name() + " (" + diode.typeName() + ")";
+    Excess mean = new Excess(duty.meanAmps(), duty.meanAmpsMax(), "A", "absolute");
+    Excess inverse = new Excess(duty.inverseVolts(), duty.inverseVoltsMax(), "V", "absolute");
+    if (mean.is()) {
+      findings.add(of(solved, FindingCode.RECTIFIER_DC, duty, name + ": DC " + mean.words()));
     }
-    return peak == 0 ? 0 : peak + Math.abs(solved.point().volts(section.cathode()));
+    if (inverse.is()) {
+      String when =
+          duty.unloaded() ? ": inverse peak at no load on a high line " : ": inverse peak ";
+      findings.add(
+          FindingCode.RECTIFIER_INVERSE.of(
+              solved.scene().words(), diode.name(), name + when + inverse.words(), SILICON_HINT));
+    }
   }
 
-  private static void add(
-      List<Finding> findings,
-      Solved solved,
-      RectifierSection section,
-      FindingCode code,
-      String verb,
-      Excess excess) {
-    if (excess.is()) {
-      String name = solved.scene().named(section.name(), section.bottle());
-      findings.add(code.of(solved.scene().words(), section.name(), name + verb + excess.words()));
-    }
+  private static Finding of(Solved solved, FindingCode code, RectifierDuty duty, String message) {
+    return code.of(solved.scene().words(), duty.rectifier().name(), message);
   }
 }

@@ -54,27 +54,22 @@ final class RectifierWiring {
 
   private static Stream<Finding> firstCapacitors(Scene scene, RippleGroup group) {
     List<Finding> findings = new ArrayList<>();
-    for (RectifierSection section : scene.circuit().elements(RectifierSection.class)) {
-      double limit = section.type().rectifierRatings().firstCapacitorFaradsMax();
-      if (!group.elements().contains(section) || Double.isNaN(limit)) {
-        continue;
-      }
-      Reservoir reservoir = Reservoir.at(scene, section.cathode());
-      double farads = reservoir.farads(scene);
-      if (farads > limit * 1.001) {
+    for (FirstCapacitor first : FirstCapacitor.of(scene, group)) {
+      if (first.isOver()) {
+        RectifierSection section = first.section();
         String names =
-            reservoir.capacitors().stream().map(Capacitor::name).collect(Collectors.joining(" + "));
+            first.capacitors().stream().map(Capacitor::name).collect(Collectors.joining(" + "));
         findings.add(
             FindingCode.FIRST_CAPACITOR.of(
                 scene.words(),
-                reservoir.capacitors().get(0).name(),
+                first.capacitors().get(0).name(),
                 names
                     + " put "
-                    + Quantity.of(farads, "F")
+                    + Quantity.of(first.farads(), "F")
                     + " straight on the rectifier "
                     + scene.named(section.name(), section.bottle())
                     + ", usual limit "
-                    + Quantity.of(limit, "F")));
+                    + Quantity.of(first.faradsMax(), "F")));
       }
     }
     return findings.stream();

@@ -76,20 +76,26 @@ public record AcLoads(
     return sorted;
   }
 
-  /** Returns the volts rms from end to end of {@code winding} under load. */
+  /** Returns the volts rms from end to end of {@code winding} under load; NaN when not known. */
   public double rmsVolts(Winding winding) {
-    double sum = 0;
+    double sum = Double.NaN;
     for (WindingLoad load : windings) {
-      sum += load.winding().equals(winding) ? load.rmsVolts() : 0;
+      if (load.winding().equals(winding)) {
+        sum = load.rmsVolts() + (Double.isNaN(sum) ? 0 : sum);
+      }
     }
     return sum;
   }
 
-  /** Returns the current rms of the section of {@code winding} that carries most. */
+  /**
+   * Returns the current rms of the section of {@code winding} that carries most; NaN if unknown.
+   */
   public double rmsAmps(Winding winding) {
-    double most = 0;
+    double most = Double.NaN;
     for (WindingLoad load : windings) {
-      most = load.winding().equals(winding) ? Math.max(most, load.rmsAmps()) : most;
+      if (load.winding().equals(winding)) {
+        most = Double.isNaN(most) ? load.rmsAmps() : Math.max(most, load.rmsAmps());
+      }
     }
     return most;
   }

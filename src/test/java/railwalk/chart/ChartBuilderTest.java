@@ -49,6 +49,7 @@ class ChartBuilderTest {
             "Supply",
             "Tubes by pin",
             "Drops and what they tell of currents",
+            "Supply parts and heaters against their limits",
             "States side by side",
             "Findings and notes");
     assertThat(chart.pages().get(0).blocks())

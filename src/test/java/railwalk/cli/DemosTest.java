@@ -103,17 +103,44 @@ class DemosTest {
 
   @ParameterizedTest
   @MethodSource("demos")
-  void csvHasOneRowForEachPointOfTheJson(String name) throws IOException {
+  void csvHasOneRowForEachDcPointOfTheJson(String name) throws IOException {
     Run csv = Run.in(folder, "chart", netlist(name), "--as", "csv");
     Map<String, Object> json =
         JSON.std.mapFrom(Run.in(folder, "chart", netlist(name), "--as", "json").out());
-    int points = objects(json, "points").size();
+    long points = count(json, "dc");
     for (Map<String, Object> state : objects(json, "states")) {
-      points += objects(state, "points").size();
+      points += count(state, "dc");
     }
     List<String> lines = csv.out().lines().toList();
     assertThat(lines.get(0)).endsWith("node,pins,volts,low_volts,high_volts,meter_volts");
-    assertThat(lines).hasSize(points + 1);
+    assertThat(lines).hasSize((int) points + 1);
+  }
+
+  /** Every winding under load, every supply node's ripple, beside the DC points. */
+  @ParameterizedTest
+  @MethodSource("demos")
+  void jsonHasWindingsAndRipple(String name) throws IOException {
+    Map<String, Object> json =
+        JSON.std.mapFrom(Run.in(folder, "chart", netlist(name), "--as", "json").out());
+    List<Map<String, Object>> points = objects(json, "points");
+    for (String line : Files.readAllLines(Path.of(netlist(name)))) {
+      if (line.matches("V\\w+ .*RMS.*")) {
+        String winding = line.substring(0, line.indexOf(' '));
+        assertThat(points)
+            .filteredOn(p -> "ac".equals(p.get("kind")) && winding.equals(p.get("node")))
+            .singleElement()
+            .satisfies(p -> assertThat((Double) p.get("volts")).isPositive());
+      }
+    }
+    assertThat(count(json, "ac")).isPositive();
+    assertThat(points)
+        .filteredOn(p -> "ripple".equals(p.get("kind")))
+        .isNotEmpty()
+        .allSatisfy(p -> assertThat((Double) p.get("volts")).isNotNegative());
+  }
+
+  private static long count(Map<String, Object> column, String kind) {
+    return objects(column, "points").stream().filter(p -> kind.equals(p.get("kind"))).count();
   }
 
   @ParameterizedTest

@@ -7,7 +7,7 @@ import railwalk.chart.Chart;
 import railwalk.chart.Figures;
 
 /**
- * A chart's points as CSV after RFC 4180, at full precision: {@code
+ * A chart's DC points as CSV after RFC 4180, at full precision: {@code
  * node,pins,volts,low_volts,high_volts,meter_volts}, pins separated by blanks, unknown figures
  * empty. Where the amplifier has states a first column {@code state} says which, empty for the
  * netlist as it stands. Stateless.

@@ -53,6 +53,9 @@ public final class JsonRenderer {
       for (Figures.Point point : figures.points()) {
         point(point);
       }
+      for (Figures.Alternating alternating : figures.alternating()) {
+        alternating(alternating);
+      }
       json.writeEndArray();
       json.writeArrayFieldStart("tubes");
       for (Figures.Tube tube : figures.tubes()) {
@@ -93,6 +96,19 @@ public final class JsonRenderer {
       for (String pin : point.pins()) {
         json.writeString(pin);
       }
+      json.writeEndArray();
+      json.writeEndObject();
+    }
+
+    private void alternating(Figures.Alternating alternating) throws IOException {
+      json.writeStartObject();
+      json.writeStringField("node", alternating.node());
+      json.writeStringField("kind", alternating.kind());
+      number("volts", alternating.rmsVolts());
+      json.writeNullField("low_volts");
+      json.writeNullField("high_volts");
+      json.writeNullField("meter_volts");
+      json.writeArrayFieldStart("pins");
       json.writeEndArray();
       json.writeEndObject();
     }

@@ -41,7 +41,8 @@ class CsvRendererTest {
     Figures.Conditions conditions = new Figures.Conditions(Double.NaN, 60, "10M", "", "0");
     Figures.Point point =
         new Figures.Point("a,\"b\"", -0.0, Double.NaN, 1e-7, 2, List.of("V1.1", "V2.cap"));
-    Figures figures = new Figures(conditions, List.of(point), List.of(), List.of(), List.of());
+    Figures figures =
+        new Figures(conditions, List.of(point), List.of(), List.of(), List.of(), List.of());
     Chart chart = new Chart("t", "f", "", "", List.of(), List.of(figures));
     assertThat(RENDERER.render(chart).split("\r\n"))
         .containsExactly(

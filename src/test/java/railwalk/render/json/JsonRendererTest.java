@@ -85,8 +85,19 @@ class JsonRendererTest {
   }
 
   private static void checkPoints(List<Map<String, Object>> points, Figures figures) {
-    assertThat(points).hasSize(figures.points().size());
-    for (int i = 0; i < points.size(); i++) {
+    int dc = figures.points().size();
+    assertThat(points).hasSize(dc + figures.alternating().size());
+    for (int i = dc; i < points.size(); i++) {
+      Figures.Alternating expected = figures.alternating().get(i - dc);
+      assertThat(points.get(i).keySet()).containsExactlyElementsOf(POINT);
+      assertThat(points.get(i))
+          .containsEntry("node", expected.node())
+          .containsEntry("kind", expected.kind())
+          .containsEntry("volts", Double.isNaN(expected.rmsVolts()) ? null : expected.rmsVolts())
+          .containsEntry("low_volts", null)
+          .containsEntry("pins", List.of());
+    }
+    for (int i = 0; i < dc; i++) {
       Figures.Point expected = figures.points().get(i);
       Map<String, Object> point = points.get(i);
       assertThat(point.keySet()).containsExactlyElementsOf(POINT);
