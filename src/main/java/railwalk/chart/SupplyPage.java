@@ -19,6 +19,9 @@ import railwalk.walk.SupplyNode;
 
 /** The supply: its drawing, its nodes from the rectifier down, the rectifiers, the windings. */
 final class SupplyPage {
+  /** Below this a winding carries nothing: its load is not in the netlist. */
+  private static final double NOTABLE_AMPS = 1e-6;
+
   private final Column column;
   private final Circuit circuit;
   private final PointCells cells;
@@ -190,7 +193,7 @@ final class SupplyPage {
       row.add(Quantity.plainVolts(section.openRmsVolts() * scale));
       row.add(Quantity.plainVolts(load.rmsVolts()));
       row.add("");
-      row.add(Quantity.amps(load.rmsAmps()));
+      row.add(load.rmsAmps() < NOTABLE_AMPS ? "–" : Quantity.amps(load.rmsAmps()));
       if (rated) {
         double amps = winding.ratedAmps();
         row.add(Double.isNaN(amps) ? "" : Quantity.amps(amps));
