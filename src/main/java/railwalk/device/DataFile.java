@@ -22,7 +22,8 @@ import railwalk.source.SourceText;
  * alias    ECC83 7025                  names of the very same tube
  * summary  high-mu twin triode
  * base     9A noval                    base code and kind of socket
- * heater   12.6V 0.15A tap=6.3V        further lines: other rated connections; direct, joined
+ * heater   12.6V 0.15A tap=6.3V        further lines: other rated connections; direct, joined, slow
+ *                                      (a rectifier such as a damper), warmup= in seconds
  * section  A triode                    id (none when it is the only one) and
  *                                      triode, pentode, beam, rectifier, vapour (a mercury-vapour
  *                                      rectifier), regulator or diode

@@ -138,19 +138,25 @@ final class TypeReader {
     double tapVolts = Double.NaN;
     boolean direct = false;
     boolean joined = false;
+    boolean slow = false;
+    double warmUpSeconds = Double.NaN;
     for (DataLine line : file.all("heater")) {
-      line.allow(Set.of("tap", "source"));
+      line.allow(Set.of("tap", "warmup", "source"));
       connections.add(new Heater.Connection(line.figure(0), line.figure(1)));
       tapVolts = line.figure("tap", tapVolts);
+      if (line.has("warmup")) {
+        warmUpSeconds = positive(line, "warmup");
+      }
       for (int i = 2; i < line.size(); i++) {
         switch (line.word(i)) {
           case "direct" -> direct = true;
           case "joined" -> joined = true;
-          default -> throw line.error(i, "unknown word " + line.word(i), "direct or joined");
+          case "slow" -> slow = true;
+          default -> throw line.error(i, "unknown word " + line.word(i), "direct, joined or slow");
         }
       }
     }
-    return new Heater(connections, tapVolts, direct, joined);
+    return new Heater(connections, tapVolts, direct, joined, slow, warmUpSeconds);
   }
 
   private Ratings ratings(String id) {

@@ -35,6 +35,8 @@ final class Supply {
   private final double[] drawnAmps;
   private final double[][] drawnSiemens;
   private final double[] meterSiemens;
+  private final double[] lead;
+  private final double[] carried;
   private final List<CycleColumn> columns = new ArrayList<>();
   private @Nullable PeriodMap map;
   private @Nullable Start start;
@@ -56,6 +58,8 @@ final class Supply {
     drawnAmps = new double[net.nodeCount];
     drawnSiemens = new double[net.nodeCount][net.nodeCount];
     meterSiemens = new double[net.nodeCount];
+    lead = new double[states.length];
+    carried = new double[states.length];
     for (int s = 0; s < states.length; s++) {
       columns.add(new CycleColumn.StartState(s));
     }
@@ -98,6 +102,20 @@ final class Supply {
     System.arraycopy(other.sweep.endStates, 0, sweep.endStates, 0, sweep.endStates.length);
     map = other.map;
     start = other.start;
+  }
+
+  /**
+   * Has the states run on instead of coming to rest: over the period state s, at its start, is to
+   * gain {@code lead · s − carried}.
+   */
+  void runOn(double[] leadOfEach, double[] carriedOfEach) {
+    System.arraycopy(leadOfEach, 0, lead, 0, lead.length);
+    System.arraycopy(carriedOfEach, 0, carried, 0, carried.length);
+  }
+
+  /** Starts the period from {@code given} states. */
+  void startAt(double[] given) {
+    System.arraycopy(given, 0, states, 0, states.length);
   }
 
   /** Puts a meter from {@code node} to the reference. */
@@ -176,7 +194,7 @@ final class Supply {
   private Thevenin tangentBy(PeriodMap by) {
     double[] gap = new double[states.length];
     for (int i = 0; i < gap.length; i++) {
-      gap[i] = sweep.endStates[i] - states[i];
+      gap[i] = sweep.endStates[i] - states[i] - (lead[i] * states[i] - carried[i]);
     }
     double[] stateByGap = by.shooting.solve(gap);
     start = new Start(states.clone(), drawnAmps.clone(), stateByGap);
@@ -188,7 +206,7 @@ final class Supply {
     double[][] shooting = new double[n][n];
     for (int i = 0; i < n; i++) {
       for (int j = 0; j < n; j++) {
-        shooting[i][j] = (i == j ? 1 : 0) - sweep.endByColumn[j][i];
+        shooting[i][j] = (i == j ? 1 + lead[i] : 0) - sweep.endByColumn[j][i];
       }
     }
     DenseLu lu = DenseLu.of(shooting);
