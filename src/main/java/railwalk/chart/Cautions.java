@@ -29,15 +29,24 @@ final class Cautions {
   private final Column first;
   private final Circuit circuit;
   private final Wording wording;
+  private final String highest;
 
   /**
    * @param findings on the netlist as it stands, most urgent first
    */
   Cautions(Column first, List<Diagnostic> findings, Wording wording) {
+    this(first, findings, wording, highestOf(first));
+  }
+
+  /**
+   * @param highest a sentence on the highest volts that the pages show
+   */
+  Cautions(Column first, List<Diagnostic> findings, Wording wording, String highest) {
     this.first = first;
     this.findings = findings;
     this.circuit = first.circuit();
     this.wording = wording;
+    this.highest = highest;
   }
 
   /** Returns one sentence for the foot of every sheet. */
@@ -98,27 +107,32 @@ final class Cautions {
     return new Caution(Caution.Weight.PLAIN, "Before you measure", points);
   }
 
-  private String highVolts() {
+  private static String highestOf(Column first) {
     Optional<Node> highest =
         Stream.concat(
-                first.map().supplyNodes().stream().map(SupplyNode::node), circuit.nodes().stream())
+                first.map().supplyNodes().stream().map(SupplyNode::node),
+                first.circuit().nodes().stream())
             .filter(n -> !Double.isNaN(first.point().volts(n)))
             .max(Comparator.comparingLong(n -> Math.round(Math.abs(first.point().volts(n)))));
-    String here =
-        highest
-            .map(
-                n ->
-                    " The highest on this chart is "
-                        + Quantity.volts(first.point().volts(n))
-                        + " at "
-                        + n.name()
-                        + "; it rises when {tubes} are out.")
-            .orElse("");
-    return wording.say(
-        "These volts kill. More than 300 V DC is ordinary under such a chassis, 500 V common in"
-            + " larger amplifiers, 700 V and more does occur, and a few tens of milliamperes through"
-            + " the chest are enough."
-            + here);
+    return highest
+        .map(
+            n ->
+                "The highest on this chart is "
+                    + Quantity.volts(first.point().volts(n))
+                    + " at "
+                    + n.name()
+                    + "; it rises when {tubes} are out.")
+        .orElse("");
+  }
+
+  private String highVolts() {
+    return wording
+        .say(
+            "These volts kill. More than 300 V DC is ordinary under such a chassis, 500 V common in"
+                + " larger amplifiers, 700 V and more does occur, and a few tens of milliamperes"
+                + " through the chest are enough. "
+                + highest)
+        .strip();
   }
 
   private Optional<String> tappedWinding() {

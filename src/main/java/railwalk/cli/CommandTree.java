@@ -16,6 +16,7 @@ final class CommandTree {
           new CheckCommand(),
           new WalkCommand(),
           new SettleCommand(),
+          new WarmUpCommand(),
           new TubesCommand(),
           new FitCommand(),
           new CompletionCommand());
