@@ -11,6 +11,7 @@ import railwalk.circuit.Circuit;
 import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.device.WarmUpTimes;
+import railwalk.walk.SupplyMap;
 
 /**
  * The averaged engine as one step in time after another uses it: two solvers, the one at rest at
@@ -37,11 +38,12 @@ final class WarmUpNetwork {
 
   WarmUpNetwork(OperatingPoint running, WarmUpTimes times, boolean hot) {
     circuit = running.circuit();
-    parts = new WarmUpParts(running, times, hot);
+    SupplyMap map = running instanceof SolvedPoint p ? p.solver().map() : running.map();
+    parts = new WarmUpParts(running, map.groups(), times, hot);
     periodSeconds = 1 / circuit.line().hertz();
     Circuit layout = parts.layout();
-    last = new CoupledSolver(layout, running.map(), false);
-    next = new CoupledSolver(layout, running.map(), false);
+    last = new CoupledSolver(layout, map, false);
+    next = new CoupledSolver(layout, map, false);
     outside = parts.stores().size();
     int count = outside;
     for (Supply supply : last.supplies) {
@@ -225,7 +227,7 @@ final class WarmUpNetwork {
           sweep.run(
               new double[net.stores.size()],
               none,
-              none,
+              new double[net.nodeCount][net.nodeCount],
               1,
               List.of(),
               (share, unknowns, pathAmps, pathVolts) -> {

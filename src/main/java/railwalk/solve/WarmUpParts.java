@@ -58,19 +58,20 @@ final class WarmUpParts {
   private final boolean hot;
 
   /**
+   * @param groups as the running point was solved by
    * @param hot whether all cathodes are hot from the start
    */
-  WarmUpParts(OperatingPoint running, WarmUpTimes times, boolean hot) {
+  WarmUpParts(OperatingPoint running, List<RippleGroup> groups, WarmUpTimes times, boolean hot) {
     this.circuit = running.circuit();
     this.times = times;
     this.hot = hot;
     Set<Element> inGroups = new HashSet<>();
     Set<Node> hidden = new HashSet<>();
-    for (RippleGroup group : running.map().groups()) {
+    for (RippleGroup group : groups) {
       inGroups.addAll(group.elements());
       hidden.addAll(group.nodes());
     }
-    running.map().groups().forEach(group -> group.ports().forEach(hidden::remove));
+    groups.forEach(group -> group.ports().forEach(hidden::remove));
     hidden.remove(circuit.reference());
     List<CurrentSource> sources = new ArrayList<>();
     List<Integer> held = new ArrayList<>();
