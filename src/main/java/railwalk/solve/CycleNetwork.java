@@ -24,7 +24,15 @@ import railwalk.walk.RippleGroups;
  */
 final class CycleNetwork {
   /** One rectifying path between two unknowns; {@code entry} is its first of four places. */
-  record Path(int anode, int cathode, TwoPoleLaw law, Element element, int[] places) {}
+  record Path(int anode, int cathode, TwoPoleLaw law, Element element, int[] places) {
+    /** Adds a conductance along the path. */
+    void add(double siemens, double[] values) {
+      values[places[0]] += siemens;
+      values[places[1]] -= siemens;
+      values[places[2]] -= siemens;
+      values[places[3]] += siemens;
+    }
+  }
 
   /** Where the slope of the current drawn at one port by the volts of another one goes. */
   record Slope(int drawn, int by, int place) {}

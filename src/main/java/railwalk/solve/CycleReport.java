@@ -65,7 +65,7 @@ record CycleReport(
       }
     }
     Observation seen = new Observation(net);
-    if (!sweep.run(states, drawnAmps, drawnSiemens, 1, columns, seen)) {
+    if (!sweep.look(states, drawnAmps, drawnSiemens, columns, seen)) {
       throw new IllegalStateException("a settled period did not run again");
     }
     double[][] free = closedLoop(sweep, storeCount, columns.size());

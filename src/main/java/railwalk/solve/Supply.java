@@ -1,6 +1,5 @@
 package railwalk.solve;
 
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
@@ -20,10 +19,10 @@ final class Supply {
   /** Steps a period: means then stand within 0.1 % on the hardest of the conduction-angle table. */
   private static final int STEPS = 72;
 
-  /** Steps a period while the states are still far off. */
+  /** Steps a period while the states are still far off, and for the first charge. */
   private static final int COARSE_STEPS = 24;
 
-  private static final int CHARGE_STEPS = 24;
+  /** Size of the stores for the first charge. */
   private static final double CHARGE_SCALE = 1.0 / 20;
 
   final CycleNetwork net;
@@ -37,7 +36,6 @@ final class Supply {
   private final double[] meterSiemens;
   private final double[] lead;
   private final double[] carried;
-  private final List<CycleColumn> columns = new ArrayList<>();
   private @Nullable PeriodMap map;
   private @Nullable Start start;
 
@@ -60,24 +58,17 @@ final class Supply {
     meterSiemens = new double[net.nodeCount];
     lead = new double[states.length];
     carried = new double[states.length];
-    for (int s = 0; s < states.length; s++) {
-      columns.add(new CycleColumn.StartState(s));
-    }
-    for (int unknown : portUnknowns) {
-      columns.add(new CycleColumn.Drawn(unknown));
-    }
   }
 
   /** Charges the reservoirs quickly, as a first guess: a few periods with small capacitors. */
   boolean charge() {
-    CycleSweep quick = new CycleSweep(net, CHARGE_STEPS);
     for (int period = 0; period < 3; period++) {
-      if (!quick.run(states, drawnAmps, drawnSiemens, CHARGE_SCALE, List.of(), null)) {
+      if (!coarse.run(states, drawnAmps, drawnSiemens, CHARGE_SCALE, false)) {
         return false;
       }
-      System.arraycopy(quick.endStates, 0, states, 0, states.length);
+      System.arraycopy(coarse.endStates, 0, states, 0, states.length);
     }
-    System.arraycopy(quick.means, 0, sweep.means, 0, sweep.means.length);
+    System.arraycopy(coarse.means, 0, sweep.means, 0, sweep.means.length);
     return true;
   }
 
@@ -167,8 +158,7 @@ final class Supply {
   @Nullable Thevenin tangent(boolean near, boolean chord) {
     sweep = near ? fine : coarse;
     boolean derive = !chord || map == null;
-    List<CycleColumn> wanted = derive ? columns : List.of();
-    if (!sweep.run(states, drawnAmps, siemensAtNodes(), 1, wanted, null)) {
+    if (!sweep.run(states, drawnAmps, siemensAtNodes(), 1, derive)) {
       return null;
     }
     if (derive) {

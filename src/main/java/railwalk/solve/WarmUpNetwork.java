@@ -224,11 +224,10 @@ final class WarmUpNetwork {
       CycleSweep sweep = new CycleSweep(net, FIRST_STEPS);
       double[] none = new double[net.nodeCount];
       boolean settled =
-          sweep.run(
+          sweep.look(
               new double[net.stores.size()],
               none,
               new double[net.nodeCount][net.nodeCount],
-              1,
               List.of(),
               (share, unknowns, pathAmps, pathVolts) -> {
                 for (int p = 0; p < peaks.length; p++) {
