@@ -28,7 +28,7 @@ class ArchitectureTest {
           List.of("units", "source"),
           List.of("device"),
           List.of("circuit"),
-          List.of("netlist", "walk"),
+          List.of("netlist", "walk", "readings"),
           List.of("solve"),
           List.of("spread", "findings", "fit"),
           List.of("chart"),
