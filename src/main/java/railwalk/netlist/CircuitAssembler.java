@@ -13,6 +13,7 @@ import railwalk.circuit.RegulatorSection;
 import railwalk.circuit.State;
 import railwalk.circuit.Winding;
 import railwalk.device.Catalogue;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 
 /** Makes a circuit of a sorted deck. */

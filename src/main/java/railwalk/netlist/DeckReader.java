@@ -10,6 +10,7 @@ import java.util.Set;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 import railwalk.source.SourceText;
 

@@ -1,9 +1,12 @@
 package railwalk.netlist;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import railwalk.device.Electrode;
+import railwalk.device.ElectrodeNames;
 import railwalk.device.SectionKind;
 import railwalk.device.SectionType;
 import railwalk.device.TubeType;
@@ -32,8 +35,8 @@ final class ElectrodeOrder {
     return subcircuit.ports().stream()
         .allMatch(
             port ->
-                ElectrodeWords.electrode(port.text()).isPresent()
-                    || ElectrodeWords.pin(port.text()).isPresent());
+                ElectrodeNames.electrode(port.text()).isPresent()
+                    || ElectrodeNames.pin(port.text()).isPresent());
   }
 
   /** Returns the order that the netlist gives for {@code typeWord}; null when it gives none. */
@@ -42,11 +45,24 @@ final class ElectrodeOrder {
     for (String name : List.of(typeWord.text(), type.name())) {
       Card order = deck.orders().get(name.toLowerCase(Locale.ROOT));
       if (order != null) {
-        return ElectrodeWords.order(order.words().subList(1, order.words().size()));
+        return order(order.words().subList(1, order.words().size()));
       }
     }
     Subcircuit header = deck.subcircuits().get(typeWord.text().toLowerCase(Locale.ROOT));
-    return header == null ? null : ElectrodeWords.order(header.ports());
+    return header == null ? null : order(header.ports());
+  }
+
+  /** Returns the electrodes in the order of {@code words}; null when a word names none. */
+  private static @Nullable List<Electrode> order(List<Word> words) {
+    List<Electrode> order = new ArrayList<>();
+    for (Word word : words) {
+      Optional<Electrode> electrode = ElectrodeNames.electrode(word.text());
+      if (electrode.isEmpty()) {
+        return null;
+      }
+      order.add(electrode.get());
+    }
+    return order.isEmpty() ? null : order;
   }
 
   /** Returns the usual order for {@code count} nodes; extra ones at the end are heater nodes. */

@@ -8,6 +8,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 import railwalk.circuit.Node;
+import railwalk.source.NearNames;
 
 /** Puts a sub-circuit's lines where it is used. */
 final class Expansion {

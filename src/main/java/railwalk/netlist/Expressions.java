@@ -11,6 +11,7 @@ import org.antlr.v4.runtime.Token;
 import org.antlr.v4.runtime.misc.ParseCancellationException;
 import org.jspecify.annotations.Nullable;
 import railwalk.source.Diagnostic;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 import railwalk.units.Measure;
 import railwalk.units.ValueReader;

@@ -13,6 +13,7 @@ import railwalk.device.DataFile;
 import railwalk.device.DataFileException;
 import railwalk.device.TubeType;
 import railwalk.source.Diagnostic;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 
 /**

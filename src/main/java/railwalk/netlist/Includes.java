@@ -6,6 +6,7 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
+import railwalk.source.FileBytes;
 import railwalk.source.SourceText;
 
 /**

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import railwalk.device.Catalogue;
+import railwalk.source.FileBytes;
 import railwalk.source.SourceText;
 
 /**

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Node;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 import railwalk.units.Measure;
 import railwalk.units.ValueReader;

@@ -8,8 +8,10 @@ import java.util.Optional;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import railwalk.circuit.ControlledSource;
+import railwalk.device.ElectrodeNames;
 import railwalk.device.GasLaw;
 import railwalk.device.TubeType;
+import railwalk.source.NearNames;
 
 /** Sends each line of a part to the reader of its kind. */
 final class PartLines {
@@ -136,8 +138,8 @@ final class PartLines {
         card.options().stream()
             .anyMatch(
                 option ->
-                    ElectrodeWords.pin(option.key().text()).isPresent()
-                        || ElectrodeWords.electrode(option.key().text()).isPresent());
+                    ElectrodeNames.pin(option.key().text()).isPresent()
+                        || ElectrodeNames.electrode(option.key().text()).isPresent());
     return keyed || draft.catalogue().find(words.get(0).text()).isPresent();
   }
 

@@ -11,6 +11,7 @@ import railwalk.circuit.Inductor;
 import railwalk.circuit.Node;
 import railwalk.circuit.Resistor;
 import railwalk.circuit.Wire;
+import railwalk.source.NearNames;
 import railwalk.units.Measure;
 import railwalk.units.ValueReader;
 import railwalk.units.ValueReading;

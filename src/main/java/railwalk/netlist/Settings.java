@@ -12,6 +12,8 @@ import railwalk.circuit.Meter;
 import railwalk.circuit.Spread;
 import railwalk.circuit.Transformer;
 import railwalk.circuit.Words;
+import railwalk.device.ElectrodeNames;
+import railwalk.source.NearNames;
 import railwalk.units.Measure;
 
 /** Reads the dot lines that set something for the whole netlist. */
@@ -103,14 +105,14 @@ final class Settings {
                 ".order 6V6GT plate screen grid cathode");
       }
       for (Word word : words) {
-        if (ElectrodeWords.electrode(word.text()).isEmpty()) {
+        if (ElectrodeNames.electrode(word.text()).isEmpty()) {
           draft
               .report()
               .add(
                   Problem.ELECTRODE_UNKNOWN,
                   word.span(),
                   word.text(),
-                  NearNames.hint(word.text(), ElectrodeWords.all()));
+                  NearNames.hint(word.text(), ElectrodeNames.all()));
         }
       }
     }

@@ -8,6 +8,7 @@ import railwalk.circuit.ControlledSource;
 import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.circuit.VoltageSource;
+import railwalk.source.NearNames;
 import railwalk.units.Measure;
 
 /** Reads V lines (fixed sources; windings go on to {@link WindingReader}) and E, F, G, H lines. */

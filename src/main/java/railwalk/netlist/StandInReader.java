@@ -7,6 +7,8 @@ import java.util.Optional;
 import railwalk.circuit.Node;
 import railwalk.circuit.StandIn;
 import railwalk.device.Electrode;
+import railwalk.device.ElectrodeNames;
+import railwalk.source.NearNames;
 import railwalk.units.Measure;
 
 /**
@@ -60,13 +62,13 @@ final class StandInReader {
   }
 
   private static Optional<Electrode> electrode(PartCard part, Word key) {
-    if (ElectrodeWords.pin(key.text()).isPresent()) {
+    if (ElectrodeNames.pin(key.text()).isPresent()) {
       part.report().add(Problem.STAND_IN_PIN, key.span(), key.text());
       return Optional.empty();
     }
-    Optional<Electrode> electrode = ElectrodeWords.electrode(key.text());
+    Optional<Electrode> electrode = ElectrodeNames.electrode(key.text());
     if (electrode.isEmpty()) {
-      List<String> words = ElectrodeWords.all();
+      List<String> words = ElectrodeNames.all();
       part.report()
           .add(
               Problem.ELECTRODE_UNKNOWN, key.span(), key.text(), NearNames.hint(key.text(), words));

@@ -18,6 +18,7 @@ import railwalk.circuit.State;
 import railwalk.circuit.StateChange;
 import railwalk.circuit.Switch;
 import railwalk.device.TubeType;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 import railwalk.units.Measure;
 

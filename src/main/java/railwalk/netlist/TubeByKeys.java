@@ -7,8 +7,10 @@ import railwalk.circuit.Lead;
 import railwalk.circuit.Node;
 import railwalk.circuit.Socket;
 import railwalk.device.Electrode;
+import railwalk.device.ElectrodeNames;
 import railwalk.device.SectionType;
 import railwalk.device.TubeType;
+import railwalk.source.NearNames;
 
 /**
  * Reads a tube wired by socket pin ({@code XV1 12AX7 1=p1 …}) or by electrode ({@code XV3 6V6GT
@@ -70,12 +72,12 @@ final class TubeByKeys {
   }
 
   private static boolean isPin(Word key) {
-    return ElectrodeWords.pin(key.text()).isPresent();
+    return ElectrodeNames.pin(key.text()).isPresent();
   }
 
   private boolean isMeant(Field.Option option) {
     Word key = option.key();
-    if (isPin(key) || ElectrodeWords.electrode(key.text()).isPresent()) {
+    if (isPin(key) || ElectrodeNames.electrode(key.text()).isPresent()) {
       return true;
     }
     part.report()
@@ -83,13 +85,13 @@ final class TubeByKeys {
             Problem.ELECTRODE_UNKNOWN,
             key.span(),
             key.text(),
-            NearNames.hint(key.text(), ElectrodeWords.all()));
+            NearNames.hint(key.text(), ElectrodeNames.all()));
     return false;
   }
 
   private boolean wirePin(TubeRack.Entry entry, Word key, Node node) {
-    int pin = ElectrodeWords.pin(key.text()).orElseThrow();
-    String name = ElectrodeWords.pinName(pin);
+    int pin = ElectrodeNames.pin(key.text()).orElseThrow();
+    String name = ElectrodeNames.pinName(pin);
     if (!Socket.hasPin(type, pin)) {
       String pins = Socket.pinsInWords(type);
       part.report().add(Problem.NO_SUCH_PIN, key.span(), type.name(), name, pins);
@@ -103,7 +105,7 @@ final class TubeByKeys {
   }
 
   private boolean wireElectrode(TubeRack.Entry entry, Word key, Node node) {
-    Optional<Electrode> named = ElectrodeWords.electrode(key.text());
+    Optional<Electrode> named = ElectrodeNames.electrode(key.text());
     Electrode electrode = named.orElseThrow();
     if (electrode.isHeater()) {
       if (!type.pins().isEmpty() && type.pinsOf("", electrode).isEmpty()) {

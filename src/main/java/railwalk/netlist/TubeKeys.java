@@ -7,8 +7,10 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
+import railwalk.device.ElectrodeNames;
 import railwalk.device.SectionKind;
 import railwalk.device.SectionType;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 import railwalk.units.Measure;
 
@@ -109,7 +111,7 @@ final class TubeKeys {
   void take(Field.Option option, TubeLine line) {
     Word word = option.key();
     String written = word.text().toLowerCase(Locale.ROOT);
-    if (ElectrodeWords.pin(written).isPresent()) {
+    if (ElectrodeNames.pin(written).isPresent()) {
       pin(option, line);
       return;
     }

@@ -7,11 +7,13 @@ import java.util.Locale;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import railwalk.device.Electrode;
+import railwalk.device.ElectrodeNames;
 import railwalk.device.GasLaw;
 import railwalk.device.PinUse;
 import railwalk.device.SectionKind;
 import railwalk.device.SectionType;
 import railwalk.device.TubeType;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 
 /**
@@ -317,7 +319,7 @@ final class TubeLine {
     int point = written.indexOf('.');
     String electrode = point > 0 ? written.substring(point + 1) : written;
     String word =
-        ElectrodeWords.electrode(electrode)
+        ElectrodeNames.electrode(electrode)
             .map(Electrode::word)
             .orElse(electrode.toLowerCase(Locale.ROOT));
     type.line("pin", span(pin)).word(pin.key().text().toLowerCase(Locale.ROOT), pin.key().span());

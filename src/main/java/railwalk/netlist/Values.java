@@ -1,6 +1,7 @@
 package railwalk.netlist;
 
 import java.util.Locale;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 import railwalk.units.Measure;
 import railwalk.units.ValueReader;

@@ -10,6 +10,7 @@ import railwalk.circuit.Line;
 import railwalk.circuit.Node;
 import railwalk.circuit.Transformer;
 import railwalk.circuit.Winding;
+import railwalk.source.NearNames;
 import railwalk.source.SourceSpan;
 import railwalk.units.Measure;
 

@@ -18,6 +18,7 @@ import railwalk.circuit.Meter;
 import railwalk.circuit.Resistor;
 import railwalk.circuit.Words;
 import railwalk.device.Catalogue;
+import railwalk.source.FileBytes;
 import railwalk.source.SourceSpan;
 
 class LinesAndNodesTest {
@@ -170,15 +171,6 @@ class LinesAndNodesTest {
             .map(SourceSpan::line)
             .toList();
     assertThat(lines).isSorted().hasSizeGreaterThanOrEqualTo(4);
-  }
-
-  @Test
-  void nearNamesAreThoseAMistakeAway() {
-    assertThat(NearNames.near("rlaek", List.of("rleak", "rload", "zz"))).containsExactly("rleak");
-    assertThat(NearNames.distance("12AX8", "12AX7")).isEqualTo(1);
-    assertThat(NearNames.distance("ab", "ba")).isEqualTo(1);
-    assertThat(NearNames.distance("", "abc")).isEqualTo(3);
-    assertThat(NearNames.hint("x", List.of())).isEmpty();
   }
 
   @ParameterizedTest

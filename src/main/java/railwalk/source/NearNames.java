@@ -1,4 +1,4 @@
-package railwalk.netlist;
+package railwalk.source;
 
 import java.util.Collection;
 import java.util.Comparator;
@@ -6,23 +6,23 @@ import java.util.List;
 import java.util.Locale;
 
 /** Names that a mistyped one may have meant. */
-final class NearNames {
+public final class NearNames {
   private static final int MOST = 3;
 
   private NearNames() {}
 
   /** Returns {@code did you mean A, B?} or an empty string when nothing is near. */
-  static String hint(String name, Collection<String> known) {
+  public static String hint(String name, Collection<String> known) {
     return question(near(name, known));
   }
 
   /** Returns {@code did you mean A, B?} or an empty string for no names. */
-  static String question(List<String> names) {
+  public static String question(List<String> names) {
     return names.isEmpty() ? "" : "did you mean " + String.join(", ", names) + "?";
   }
 
   /** Returns up to three of {@code known} within a mistake or two of {@code name}, best first. */
-  static List<String> near(String name, Collection<String> known) {
+  public static List<String> near(String name, Collection<String> known) {
     String wanted = name.toLowerCase(Locale.ROOT);
     int allowed = wanted.length() <= 3 ? 1 : 2;
     return known.stream()

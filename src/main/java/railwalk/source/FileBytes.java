@@ -1,4 +1,4 @@
-package railwalk.netlist;
+package railwalk.source;
 
 import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
@@ -10,12 +10,12 @@ import java.util.Optional;
 import java.util.regex.Pattern;
 
 /**
- * A file's bytes as text, or what kind of file it is when it is no netlist: UTF-8 with or without a
- * byte order mark, UTF-16 with one, else Latin-1.
+ * A file's bytes as text, or what kind of file it is when a person's own text was wanted: UTF-8
+ * with or without a byte order mark, UTF-16 with one, else Latin-1.
  */
-final class FileBytes {
-  /** A traced amplifier takes a few kilobytes; a file this large is something else. */
-  static final int LARGEST_BYTES = 4_000_000;
+public final class FileBytes {
+  /** What people type takes a few kilobytes; a file this large is something else. */
+  public static final int LARGEST_BYTES = 4_000_000;
 
   private static final int LOOKED_AT = 4096;
 
@@ -49,7 +49,7 @@ final class FileBytes {
   private FileBytes() {}
 
   /** Returns the text that {@code bytes} hold, without a byte order mark. */
-  static String decode(byte[] bytes) {
+  public static String decode(byte[] bytes) {
     if (startsWith(bytes, 0xEF, 0xBB, 0xBF)) {
       return new String(bytes, 3, bytes.length - 3, StandardCharsets.UTF_8);
     }
@@ -60,8 +60,10 @@ final class FileBytes {
         .orElseGet(() -> new String(bytes, StandardCharsets.ISO_8859_1));
   }
 
-  /** Returns what kind of file this is text of when it is certainly no netlist. */
-  static Optional<String> foreignKind(String text) {
+  /**
+   * Returns what kind of file this is text of when it is certainly neither a netlist nor a sheet.
+   */
+  public static Optional<String> foreignKind(String text) {
     for (Mark mark : MARKS) {
       if (text.startsWith(mark.start())) {
         return Optional.of(mark.kind());

@@ -1,17 +1,14 @@
-package railwalk.netlist;
+package railwalk.device;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.regex.Pattern;
-import org.jspecify.annotations.Nullable;
-import railwalk.device.Electrode;
 
 /** How people write electrodes and socket pins. */
-final class ElectrodeWords {
+public final class ElectrodeNames {
   private static final Map<String, Electrode> WORDS =
       Map.ofEntries(
           Map.entry("plate", Electrode.PLATE),
@@ -51,15 +48,15 @@ final class ElectrodeWords {
   private static final Pattern PIN = Pattern.compile("\\d{1,2}");
   private static final String CAP = "cap";
 
-  private ElectrodeWords() {}
+  private ElectrodeNames() {}
 
   /** Returns the electrode that {@code word} names. */
-  static Optional<Electrode> electrode(String word) {
+  public static Optional<Electrode> electrode(String word) {
     return Optional.ofNullable(WORDS.get(word.toLowerCase(Locale.ROOT)));
   }
 
   /** Returns the socket pin that {@code word} names, 0 for the top cap. */
-  static OptionalInt pin(String word) {
+  public static OptionalInt pin(String word) {
     if (word.equalsIgnoreCase(CAP)) {
       return OptionalInt.of(0);
     }
@@ -69,25 +66,12 @@ final class ElectrodeWords {
   }
 
   /** Returns how a message names a pin. */
-  static String pinName(int pin) {
+  public static String pinName(int pin) {
     return pin == 0 ? "top cap" : "pin " + pin;
   }
 
-  /** Returns the electrodes in the order of {@code words}; null when a word names none. */
-  static @Nullable List<Electrode> order(List<Word> words) {
-    List<Electrode> order = new ArrayList<>();
-    for (Word word : words) {
-      Optional<Electrode> electrode = electrode(word.text());
-      if (electrode.isEmpty()) {
-        return null;
-      }
-      order.add(electrode.get());
-    }
-    return order.isEmpty() ? null : order;
-  }
-
   /** Returns the electrode words, for suggestions. */
-  static List<String> all() {
+  public static List<String> all() {
     return WORDS.keySet().stream().filter(word -> word.length() > 3).sorted().toList();
   }
 }
