@@ -1,6 +1,7 @@
 package railwalk.solve;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
@@ -14,7 +15,10 @@ import railwalk.circuit.Winding;
 import railwalk.device.SectionCurrents;
 import railwalk.walk.SupplyMap;
 
-/** The operating point that a settled {@link CoupledSolver} holds. */
+/**
+ * The operating point that a settled {@link CoupledSolver} holds. What takes a further look over
+ * the period (ripple, peaks, source resistances inside a group) is found when first asked for.
+ */
 final class SolvedPoint implements OperatingPoint {
   /** Up to this ratio of source to meter resistance the straight-line reading is good to 0.01 %. */
   private static final double STRAIGHT_LOADING = 1e-3;
@@ -27,8 +31,8 @@ final class SolvedPoint implements OperatingPoint {
 
   private final CoupledSolver solver;
   private final SupplyMap walk;
-  private final List<CycleReport> reports = new ArrayList<>();
-  private final double[] sourceOhms;
+  private @Nullable List<CycleReport> reports;
+  private double @Nullable [] sourceOhms;
   private @Nullable AcLoads acLoads;
 
   /**
@@ -39,13 +43,6 @@ final class SolvedPoint implements OperatingPoint {
   SolvedPoint(CoupledSolver solver, SupplyMap walk) {
     this.solver = solver;
     this.walk = walk;
-    solver.supplies.forEach(s -> reports.add(s.report()));
-    sourceOhms = new double[circuit().nodes().size()];
-    SparseLu lu = solver.factored();
-    for (Node node : circuit().nodes()) {
-      sourceOhms[node.index()] =
-          node.equals(circuit().reference()) ? 0 : computeSourceOhms(node, lu);
-    }
   }
 
   CoupledSolver solver() {
@@ -53,7 +50,16 @@ final class SolvedPoint implements OperatingPoint {
   }
 
   List<CycleReport> reports() {
-    return reports;
+    synchronized (solver) {
+      List<CycleReport> known = reports;
+      if (known == null) {
+        List<CycleReport> made = new ArrayList<>();
+        solver.supplies.forEach(s -> made.add(s.report()));
+        reports = made;
+        known = made;
+      }
+      return known;
+    }
   }
 
   @Override
@@ -78,19 +84,19 @@ final class SolvedPoint implements OperatingPoint {
     if (unknown != null) {
       return solver.x[unknown];
     }
-    CycleReport report = reportOf(node);
-    return report == null ? Double.NaN : report.meanVolts(node);
+    Supply supply = solver.supplyOf(node);
+    return supply == null ? Double.NaN : supply.meanVolts(node);
   }
 
   private @Nullable CycleReport reportOf(Node node) {
-    return reports.stream()
+    return reports().stream()
         .filter(r -> r.net().unknowns.containsKey(node))
         .findFirst()
         .orElse(null);
   }
 
   private @Nullable CycleReport reportOf(Element element) {
-    return reports.stream()
+    return reports().stream()
         .filter(r -> r.net().group.elements().contains(element))
         .findFirst()
         .orElse(null);
@@ -197,7 +203,7 @@ final class SolvedPoint implements OperatingPoint {
   @Override
   public List<SupplyPoint> supplies() {
     List<SupplyPoint> points = new ArrayList<>();
-    for (CycleReport report : reports) {
+    for (CycleReport report : reports()) {
       List<Node> outputs = report.net().group.outputs();
       for (int o = 0; o < outputs.size(); o++) {
         Node node = outputs.get(o);
@@ -227,7 +233,7 @@ final class SolvedPoint implements OperatingPoint {
   public AcLoads acLoads() {
     synchronized (solver) {
       if (acLoads == null) {
-        acLoads = AcLoads.of(this, reports);
+        acLoads = AcLoads.of(this, reports());
       }
       return acLoads;
     }
@@ -235,25 +241,42 @@ final class SolvedPoint implements OperatingPoint {
 
   @Override
   public AcLoads.Range range(Node node) {
-    return AcLoads.range(node, volts(node), reports);
+    return AcLoads.range(node, volts(node), reports());
   }
 
   @Override
   public double sourceOhms(Node node) {
-    return sourceOhms[node.index()];
+    synchronized (solver) {
+      double[] known = sourceOhms;
+      if (known == null) {
+        known = new double[circuit().nodes().size()];
+        Arrays.fill(known, Double.NaN);
+        SparseLu lu = solver.factored();
+        for (int n = 0; n < solver.dc.nodeCount; n++) {
+          Node dcNode = solver.dc.nodes.get(n);
+          if (!map().undefined().contains(dcNode)) {
+            double[] response = new double[solver.dc.size];
+            response[n] = 1;
+            lu.solve(response, response);
+            known[dcNode.index()] = response[n];
+          }
+        }
+        known[circuit().reference().index()] = 0;
+        sourceOhms = known;
+      }
+      if (Double.isNaN(known[node.index()])) {
+        known[node.index()] = sourceOhmsInGroup(node);
+      }
+      return known[node.index()];
+    }
   }
 
-  private double computeSourceOhms(Node node, SparseLu lu) {
+  private double sourceOhmsInGroup(Node node) {
     if (map().undefined().contains(node)) {
       return Double.NaN;
     }
-    Integer unknown = solver.dc.unknowns.get(node);
+    SparseLu lu = solver.factored();
     double[] response = new double[solver.dc.size];
-    if (unknown != null) {
-      response[unknown] = 1;
-      lu.solve(response, response);
-      return response[unknown];
-    }
     CycleReport report = reportOf(node);
     if (report == null) {
       return Double.NaN;

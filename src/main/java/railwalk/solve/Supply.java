@@ -81,6 +81,14 @@ final class Supply {
     }
   }
 
+  /** Returns whether {@code other} has the same states and ports. */
+  boolean isLike(Supply other) {
+    return states.length == other.states.length
+        && net.size == other.net.size
+        && net.group.nodes().equals(other.net.group.nodes())
+        && net.group.ports().equals(other.net.group.ports());
+  }
+
   /** Takes over the states and currents of a neighbouring solution of the same shape. */
   void copyFrom(Supply other) {
     System.arraycopy(other.states, 0, states, 0, states.length);

@@ -18,6 +18,16 @@ public final class Walk {
     return of(circuit, RippleGroups.of(circuit));
   }
 
+  /**
+   * Returns only what the solver needs of the walk: ripple groups, undefined nodes and idle
+   * sections; the supply trees are left out.
+   */
+  public static SupplyMap toSolve(Circuit circuit) {
+    List<RippleGroup> groups = RippleGroups.of(circuit);
+    DcReach reach = DcReach.of(circuit, DcBranches.of(circuit), groups);
+    return new SupplyMap(groups, List.of(), reach.undefined(), reach.idleSections(), Map.of());
+  }
+
   /** Returns what the walk finds when the ripple groups are already cut out. */
   static SupplyMap of(Circuit circuit, List<RippleGroup> groups) {
     List<DcBranch> branches = DcBranches.of(circuit);
