@@ -33,6 +33,6 @@ public record Fault(FaultKind kind, String element, String detail, Range range, 
 
   @Override
   public int hashCode() {
-    return 31 * element.hashCode() + kind.ordinal();
+    return element.hashCode();
   }
 }

@@ -110,7 +110,7 @@ final class SupplyFaults {
         (c, none) ->
             Rewire.replace(
                 c,
-                e -> e instanceof Diode && e.name().equals(diode.name()),
+                e -> e.name().equals(diode.name()),
                 e -> List.of(TubeFaults.leak(diode.name(), diode.anode(), diode.cathode(), ohms))));
   }
 

@@ -2,6 +2,7 @@ package railwalk.diagnosis;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -267,11 +268,11 @@ final class TubeFaults {
 
   private static SortedMap<Integer, String> electrodes(TubeType type) {
     SortedMap<Integer, String> pins = new TreeMap<>();
-    for (int pin : type.pins().keySet()) {
-      PinUse use = type.pins().get(pin);
-      Electrode electrode = use == null ? null : use.electrode();
+    for (Map.Entry<Integer, PinUse> pin : type.pins().entrySet()) {
+      Electrode electrode = pin.getValue().electrode();
       if (electrode != null && electrode != Electrode.HEATER_TAP) {
-        pins.put(pin, electrode.isHeater() ? "heater" : use.section() + electrode);
+        String use = electrode.isHeater() ? "heater" : pin.getValue().section() + electrode;
+        pins.put(pin.getKey(), use);
       }
     }
     return pins;

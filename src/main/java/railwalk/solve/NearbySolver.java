@@ -34,7 +34,7 @@ public final class NearbySolver {
     SupplyMap map = kept.orElseGet(() -> Walk.toSolve(changed));
     CoupledSolver solver = new CoupledSolver(changed, map, false);
     if (solver.startNear(settled) && solver.settle()) {
-      return Optional.of(new SolvedPoint(solver));
+      return Optional.of(new SolvedPoint(solver, map));
     }
     SolveOutcome cold = OperatingPointSolver.solve(changed, map);
     return cold instanceof SolveOutcome.Solved solved
@@ -68,13 +68,12 @@ public final class NearbySolver {
         return Optional.empty();
       }
     }
-    SupplyMap map = point.map();
+    SupplyMap map = settled.map();
     List<RippleGroup> groups = new ArrayList<>();
     for (RippleGroup group : map.groups()) {
       groups.add(replaced.isEmpty() ? group : replaced(group, replaced));
     }
-    return Optional.of(
-        new SupplyMap(groups, map.supplyNodes(), map.undefined(), map.idleSections(), map.feeds()));
+    return Optional.of(map.withGroups(groups));
   }
 
   private static boolean isSamePlace(Element was, Element is) {
@@ -98,7 +97,7 @@ public final class NearbySolver {
     if (!point.map().undefined().isEmpty()) {
       return false;
     }
-    for (RippleGroup group : point.map().groups()) {
+    for (RippleGroup group : settled.map().groups()) {
       if (group.elements().contains(element)) {
         return true;
       }

@@ -73,6 +73,12 @@ public interface OperatingPoint {
   double sourceOhms(Node node);
 
   /**
+   * Returns the resistance that a meter from {@code a} to {@code b} sees (ohm), as {@link
+   * #sourceOhms(Node)}; NaN where a node has no DC path or lies within a supply.
+   */
+  double sourceOhms(Node a, Node b);
+
+  /**
    * Returns the volts that a meter of {@code meterOhms} reads at {@code node}: by the source
    * resistance, and by solving again with the meter in where the loading is large.
    */

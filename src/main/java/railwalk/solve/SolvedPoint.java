@@ -271,6 +271,29 @@ final class SolvedPoint implements OperatingPoint {
     }
   }
 
+  @Override
+  public double sourceOhms(Node a, Node b) {
+    Integer from = solver.dc.unknowns.get(a);
+    Integer to = solver.dc.unknowns.get(b);
+    if (from == null
+        || to == null
+        || map().undefined().contains(a)
+        || map().undefined().contains(b)) {
+      return Double.NaN;
+    }
+    synchronized (solver) {
+      double[] response = new double[solver.dc.size];
+      if (from >= 0) {
+        response[from] = 1;
+      }
+      if (to >= 0) {
+        response[to] -= 1;
+      }
+      solver.factored().solve(response, response);
+      return DcNetwork.at(response, from) - DcNetwork.at(response, to);
+    }
+  }
+
   private double sourceOhmsInGroup(Node node) {
     if (map().undefined().contains(node)) {
       return Double.NaN;

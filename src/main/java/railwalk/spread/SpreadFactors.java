@@ -47,10 +47,12 @@ public final class SpreadFactors {
   private static final double USED_DEVIATION = (Spread.USED_HIGH - Spread.USED_LOW) / 4;
 
   private final List<String> names;
+  private final double[] deviations;
   private final double[][] rows;
   private final double[] shifts;
 
-  private SpreadFactors(List<String> names, double[][] rows, double[] shifts) {
+  private SpreadFactors(List<String> names, double[] deviations, double[][] rows, double[] shifts) {
+    this.deviations = deviations;
     this.names = List.copyOf(names);
     this.rows = rows;
     this.shifts = shifts;
@@ -105,7 +107,7 @@ public final class SpreadFactors {
     parts.forEach(part -> names.add(name(part)));
     byBottle.keySet().forEach(bottle -> names.add("tube " + bottle));
     names.add("line");
-    return new SpreadFactors(names, rows, shifts);
+    return new SpreadFactors(names, deviations, rows, shifts);
   }
 
   private static String name(SpreadPart part) {
@@ -137,6 +139,13 @@ public final class SpreadFactors {
   /** Returns the volts of {@code node} for one deviation of each factor; the caller's own copy. */
   public double[] row(Node node) {
     return rows[node.index()].clone();
+  }
+
+  /**
+   * Returns one deviation of factor {@code number} of {@link #names()}, as a share of its figure.
+   */
+  public double deviation(int number) {
+    return number < deviations.length ? deviations[number] : 0;
   }
 
   /** Returns how far the middle of the node's spread lies from the nominal amplifier's volts. */

@@ -1,0 +1,45 @@
+package railwalk.diagnosis;
+
+import java.util.ArrayList;
+import java.util.List;
+import railwalk.circuit.Circuit;
+import railwalk.circuit.CurrentSource;
+import railwalk.circuit.Diode;
+import railwalk.circuit.Element;
+import railwalk.circuit.StandIn;
+import railwalk.circuit.VoltageSource;
+import railwalk.circuit.Winding;
+
+/**
+ * The amplifier as an ohmmeter finds it: unplugged, discharged, all tubes pulled, diodes taken as
+ * open (a meter's small test volts do not make them conduct in every position).
+ */
+final class ColdAmplifier {
+  private ColdAmplifier() {}
+
+  static Circuit of(Circuit circuit) {
+    List<Element> elements = new ArrayList<>();
+    for (Element element : circuit.elements()) {
+      if (element instanceof Diode d) {
+        elements.add(TubeFaults.leak(d.name(), d.anode(), d.cathode(), Rewire.OPEN_OHMS));
+      } else if (element instanceof Winding w) {
+        elements.add(silent(w));
+      } else if (element instanceof VoltageSource v) {
+        elements.add(new VoltageSource(v.name(), v.a(), v.b(), 0, v.seriesOhms()));
+      } else if (element.bottle().isEmpty()
+          && !(element instanceof StandIn)
+          && !(element instanceof CurrentSource)) {
+        elements.add(element);
+      }
+    }
+    return circuit.withElements(elements);
+  }
+
+  private static Winding silent(Winding w) {
+    List<Winding.Section> sections = new ArrayList<>();
+    for (Winding.Section s : w.sections()) {
+      sections.add(new Winding.Section(s.a(), s.b(), 0, s.ohms()));
+    }
+    return new Winding(w.name(), sections, w.atLineVolts(), w.transformer(), w.wall());
+  }
+}
