@@ -122,7 +122,7 @@ final class ConditionsPage {
         : Quantity.ohms(meter.ohmsPerVolt()) + "/V";
   }
 
-  private static String meterText(Meter meter) {
+  static String meterText(Meter meter) {
     if (Double.isNaN(meter.ohmsPerVolt())) {
       return meterShort(meter) + " on every range";
     }

@@ -117,6 +117,15 @@ final class Amplifier {
     return healthy;
   }
 
+  /** Returns the healthy amplifier in one of its states. */
+  OperatingPoint healthy(String state) {
+    OperatingPoint point = healthy.get(state);
+    if (point == null) {
+      throw new IllegalArgumentException("not solved in state " + state);
+    }
+    return point;
+  }
+
   /** Returns the amplifier with a fault in it, in all states; empty when one does not settle. */
   Optional<Map<String, OperatingPoint>> with(Fault fault, double severity) {
     Map<String, OperatingPoint> points = new LinkedHashMap<>();

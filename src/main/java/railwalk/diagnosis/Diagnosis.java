@@ -79,9 +79,14 @@ public record Diagnosis(
 
     Builder(Circuit chart, Circuit bench, ReadingSheet sheet) throws NoOperatingPoint {
       this.sheet = sheet;
-      sheet.readings().forEach(r -> probes.add(Probe.of(r, bench.meter())));
-      Set<String> states = Predictor.states(probes);
+      List<Probe> places = sheet.readings().stream().map(Probe::of).toList();
+      Set<String> states = Predictor.states(places);
       benched = new Amplifier(bench, states);
+      double[] expected = new Predictor(benched, places).unloaded(benched.healthy());
+      for (int i = 0; i < expected.length; i++) {
+        double value = sheet.readings().get(i).value();
+        probes.add(places.get(i).onRange(bench.meter(), expected[i], value));
+      }
       charted = chart.equals(bench) ? benched : new Amplifier(chart, states);
     }
 
@@ -103,19 +108,11 @@ public record Diagnosis(
       for (int i = 0; i < figures.length; i++) {
         figures[i] = Judge.figure(sheet.readings().get(counted.get(i)));
       }
-      OperatingPoint healthy = point(benched);
+      OperatingPoint healthy = benched.healthy("");
       List<Fault> faults = Faults.of(benched.circuit(), healthy.map(), types);
       Ranking ranking = new Ranking(benched, new Predictor(benched, countedProbes), figures);
       List<Explanation> ranked = ranking.rank(faults, Frequency.standard());
       return told(judged, counted, countedProbes, figures, ranking, ranked, faults.size());
-    }
-
-    private static OperatingPoint point(Amplifier amplifier) {
-      OperatingPoint point = amplifier.healthy().get("");
-      if (point == null) {
-        throw new IllegalStateException();
-      }
-      return point;
     }
 
     private Diagnosis told(
@@ -131,7 +128,7 @@ public record Diagnosis(
       List<Fault> silent = new ArrayList<>();
       Map<Explanation, Double> probabilities = probabilities(ranked, shown, silent);
       List<Suspect> suspects = new ArrayList<>();
-      List<Probe> points = BenchPoints.of(point(benched));
+      List<Probe> points = BenchPoints.of(benched.healthy(""));
       Groups groups = new Groups(benched.only(""), points);
       Map<Explanation, Integer> groupOf = new LinkedHashMap<>();
       for (Explanation explanation : shown) {
@@ -146,8 +143,8 @@ public record Diagnosis(
       }
       Optional<NextProbe> next = next(countedProbes, figures, points, groupOf, probabilities);
       return new Diagnosis(
-          point(charted),
-          point(benched),
+          charted.healthy(""),
+          benched.healthy(""),
           Judge.starves(benched),
           judged,
           suspects,

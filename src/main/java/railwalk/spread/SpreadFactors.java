@@ -4,13 +4,8 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Circuit;
-import railwalk.circuit.Element;
 import railwalk.circuit.Node;
-import railwalk.circuit.RectifierSection;
-import railwalk.circuit.Resistor;
-import railwalk.circuit.Spread;
 import railwalk.solve.OperatingPoint;
 import railwalk.solve.Sensitivities;
 import railwalk.solve.SpreadPart;
@@ -29,23 +24,6 @@ import railwalk.solve.SpreadPart;
  * own acceptance limits bound tubes about the published figure and move nothing.
  */
 public final class SpreadFactors {
-  /**
-   * Correlation of the sections of one bottle: with each section ±30 % at two deviations, a section
-   * difference of ±30 % (a maker's limit for twin triodes) leaves half the variance in common.
-   */
-  private static final double SECTION_CORRELATION = 0.5;
-
-  /** A gas regulator's operating volts from tube to tube, one deviation (common practice). */
-  private static final double GLOW_DEVIATION = 0.02;
-
-  /** A rectifier's current at a given drop, one deviation: as tubes in general, 30 % at two. */
-  private static final double USUAL_RECTIFIER_DEVIATION = 0.15;
-
-  /** Middle of the limits of used tubes. */
-  private static final double USED_SHIFT = (Spread.USED_HIGH + Spread.USED_LOW) / 2;
-
-  private static final double USED_DEVIATION = (Spread.USED_HIGH - Spread.USED_LOW) / 4;
-
   private final List<String> names;
   private final double[] deviations;
   private final double[][] rows;
@@ -70,8 +48,8 @@ public final class SpreadFactors {
     List<Integer> onLine = new ArrayList<>();
     for (int p = 0; p < count; p++) {
       SpreadPart part = parts.get(p);
-      deviations[p] = deviation(circuit, part);
-      partShifts[p] = shift(circuit, part);
+      deviations[p] = PartSpread.deviation(circuit, part);
+      partShifts[p] = PartSpread.shift(circuit, part);
       if (part instanceof SpreadPart.SpaceCurrent s) {
         byBottle.computeIfAbsent(s.section().bottle(), b -> new ArrayList<>()).add(p);
       } else if (part instanceof SpreadPart.WindingVolts) {
@@ -92,8 +70,8 @@ public final class SpreadFactors {
       int common = count;
       for (List<Integer> sections : byBottle.values()) {
         for (int p : sections) {
-          row[common] += Math.sqrt(SECTION_CORRELATION) * row[p];
-          row[p] *= Math.sqrt(1 - SECTION_CORRELATION);
+          row[common] += Math.sqrt(PartSpread.SECTION_CORRELATION) * row[p];
+          row[p] *= Math.sqrt(1 - PartSpread.SECTION_CORRELATION);
         }
         common++;
       }
@@ -160,58 +138,5 @@ public final class SpreadFactors {
       variance += volts * volts;
     }
     return Math.sqrt(variance);
-  }
-
-  /** Returns one standard deviation of a part's figure, as a share of it. */
-  private static double deviation(Circuit circuit, SpreadPart part) {
-    if (part instanceof SpreadPart.Ohms ohms) {
-      return tolerance(circuit, ohms.element()) / Math.sqrt(3);
-    }
-    if (part instanceof SpreadPart.SpaceCurrent current) {
-      AmplifierSection section = current.section();
-      double tube = circuit.spread().tube();
-      if (circuit.spread().usedTubes()) {
-        return USED_DEVIATION;
-      }
-      return Double.isNaN(tube)
-          ? (section.type().spreadHigh() - section.type().spreadLow()) / 4
-          : tube / 2;
-    }
-    if (part instanceof SpreadPart.Emission) {
-      double tube = circuit.spread().tube();
-      if (circuit.spread().usedTubes()) {
-        return USED_DEVIATION;
-      }
-      return Double.isNaN(tube) ? USUAL_RECTIFIER_DEVIATION : tube / 2;
-    }
-    if (part instanceof SpreadPart.WindingVolts) {
-      return circuit.spread().winding() / Math.sqrt(3);
-    }
-    return part instanceof SpreadPart.GlowVolts ? GLOW_DEVIATION : 0;
-  }
-
-  /** Returns how far the mean of a part's figure lies from the nominal one, as a share of it. */
-  private static double shift(Circuit circuit, SpreadPart part) {
-    Spread spread = circuit.spread();
-    if (part instanceof SpreadPart.Ohms ohms) {
-      boolean drifts =
-          spread.carbonResistors()
-              && ohms.element() instanceof Resistor r
-              && Double.isNaN(r.tolerance());
-      return drifts ? Spread.CARBON_DRIFT : 0;
-    }
-    boolean tube = part instanceof SpreadPart.SpaceCurrent || isTubeRectifier(part);
-    return tube && spread.usedTubes() ? USED_SHIFT : 0;
-  }
-
-  private static boolean isTubeRectifier(SpreadPart part) {
-    return part instanceof SpreadPart.Emission emission
-        && emission.rectifier() instanceof RectifierSection;
-  }
-
-  private static double tolerance(Circuit circuit, Element element) {
-    return element instanceof Resistor r && !Double.isNaN(r.tolerance())
-        ? r.tolerance()
-        : circuit.spread().resistor();
   }
 }
