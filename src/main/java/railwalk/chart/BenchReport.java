@@ -48,15 +48,97 @@ public final class BenchReport {
    *
    * @param input the amplifier at the bench's line, in its first column
    */
-  public static Chart of(ChartInput input, Diagnosis diagnosis) {
-    BenchReport report = new BenchReport(input, diagnosis);
+  public static BenchReport of(ChartInput input, Diagnosis diagnosis) {
+    return new BenchReport(input, diagnosis);
+  }
+
+  /** Returns the report's pages. */
+  public Chart chart() {
     return new Chart(
-        report.circuit.title(),
+        circuit.title(),
         "Bench report, " + input.fileName(),
-        new ConditionsPage(input, input.first().findings(), report.wording).inOneLine(),
+        new ConditionsPage(input, input.first().findings(), wording).inOneLine(),
         Cautions.standing(),
-        List.of(report.verdictPage(), report.readingsPage(), report.cautionsPage()),
+        List.of(verdictPage(), readingsPage(), cautionsPage()),
         List.of());
+  }
+
+  /** Returns the same for machines. */
+  public BenchFigures figures() {
+    List<BenchFigures.Point> points = new ArrayList<>();
+    for (JudgedReading judged : diagnosis.readings()) {
+      Reading r = judged.reading();
+      points.add(
+          new BenchFigures.Point(
+              r.point(),
+              r.kind().word(),
+              r.state(),
+              r.value(),
+              judged.expected(),
+              judged.low(),
+              judged.high(),
+              judged.meter(),
+              judged.verdict().word()));
+    }
+    List<BenchFigures.Suspect> suspects = new ArrayList<>();
+    for (Suspect suspect : diagnosis.suspects()) {
+      suspects.add(figures(suspect));
+    }
+    List<BenchFigures.NextProbe> next = new ArrayList<>();
+    diagnosis.nextProbe().ifPresent(probe -> next.add(figures(probe)));
+    Figures.Conditions conditions =
+        new FiguresBuilder(input.first(), circuit).build(List.of(), "").conditions();
+    return new BenchFigures(conditions, points, suspects, next);
+  }
+
+  private BenchFigures.Suspect figures(Suspect suspect) {
+    List<String> supporting =
+        suspect.supporting().stream()
+            .map(e -> sentence(e, "healthy ", e.healthy(), ", with this ", e.suspected()))
+            .toList();
+    List<String> against =
+        suspect.against().stream()
+            .map(e -> sentence(e, "with this ", e.suspected(), "", Double.NaN))
+            .toList();
+    boolean one = suspect.faults().size() == 1;
+    return new BenchFigures.Suspect(
+        suspect.faults().stream().map(Fault::element).collect(Collectors.joining(" and ")),
+        suspect.kind() == Suspect.Kind.HEALTHY
+            ? "healthy"
+            : suspect.kind() == Suspect.Kind.FAULT ? name(suspect) : "not this amp",
+        one ? suspect.estimates().get(0) : Double.NaN,
+        one ? suspect.faults().get(0).range().unit() : "",
+        suspect.probability(),
+        supporting,
+        against,
+        suspect.group());
+  }
+
+  private BenchFigures.NextProbe figures(NextProbe next) {
+    List<BenchFigures.Outcome> outcomes = new ArrayList<>();
+    for (NextProbe.Outcome outcome : next.outcomes()) {
+      outcomes.add(new BenchFigures.Outcome(outcome.value(), meant(outcome)));
+    }
+    return new BenchFigures.NextProbe(
+        next.probe().name(), next.probe().kind().word(), action(next.probe()), why(next), outcomes);
+  }
+
+  private static String why(NextProbe next) {
+    return "tells "
+        + Quantity.fixed(next.gainBits(), 2)
+        + " bit of what is still open, more for its trouble than any other point";
+  }
+
+  /** Returns the likeliest suspect of each group that an outcome speaks for. */
+  private String meant(NextProbe.Outcome outcome) {
+    List<String> meant = new ArrayList<>();
+    for (int group : outcome.groups()) {
+      diagnosis.suspects().stream()
+          .filter(suspect -> suspect.group() == group)
+          .findFirst()
+          .ifPresent(suspect -> meant.add(name(suspect)));
+    }
+    return String.join("; or ", meant);
   }
 
   private Page verdictPage() {
@@ -239,24 +321,10 @@ public final class BenchReport {
     }
     NextProbe next = diagnosis.nextProbe().get();
     List<Remarks.Remark> outcomes = new ArrayList<>();
-    Map<Integer, List<String>> names = new LinkedHashMap<>();
-    for (Suspect suspect : diagnosis.suspects()) {
-      names.computeIfAbsent(suspect.group(), g -> new ArrayList<>()).add(name(suspect));
-    }
     for (NextProbe.Outcome outcome : next.outcomes()) {
-      List<String> meant = new ArrayList<>();
-      for (int group : outcome.groups()) {
-        List<String> of = names.getOrDefault(group, List.of());
-        if (!of.isEmpty()) {
-          meant.add(of.get(0));
-        }
-      }
       outcomes.add(
           new Remarks.Remark(
-              "about " + figure(next.probe().kind(), outcome.value()),
-              "",
-              String.join("; or ", meant),
-              ""));
+              "about " + figure(next.probe().kind(), outcome.value()), "", meant(outcome), ""));
     }
     outcomes.add(0, new Remarks.Remark("", "", action(next.probe()), ""));
     return new Remarks(outcomes);

@@ -33,14 +33,7 @@ final class ChartCommand implements Command {
                     .type(Path.class)
                     .description("Write to this file.")
                     .build())
-            .addOption(
-                OptionSpec.builder("--as")
-                    .paramLabel("FORMAT")
-                    .type(ChartFormat.class)
-                    .converters(ChartCommand::format)
-                    .completionCandidates(ChartFormat.words())
-                    .description("One format only: " + String.join(", ", ChartFormat.words()) + ".")
-                    .build())
+            .addOption(formatOption(List.of(ChartFormat.values())))
             .addOption(LineOption.spec())
             .addOption(
                 OptionSpec.builder("--meter")
@@ -92,7 +85,7 @@ final class ChartCommand implements Command {
   }
 
   /** A file called chart.csv with a PDF in it is never what was meant. */
-  private static void refuseOtherSuffix(Path output) throws CannotDo {
+  static void refuseOtherSuffix(Path output) throws CannotDo {
     String name = String.valueOf(output.getFileName()).toLowerCase(Locale.ROOT);
     String suffix = name.substring(name.lastIndexOf('.') + 1).replace("txt", "text");
     Optional<ChartFormat> other = ChartFormat.of(suffix).filter(f -> f != ChartFormat.PDF);
@@ -102,11 +95,22 @@ final class ChartCommand implements Command {
     }
   }
 
-  private static ChartFormat format(String word) {
-    return ChartFormat.of(word).orElseThrow(() -> notOneOf(ChartFormat.words()));
-  }
-
-  private static TypeConversionException notOneOf(List<String> words) {
-    return new TypeConversionException("expected one of " + String.join(", ", words));
+  /** Returns the option that chooses one of {@code formats}. */
+  static OptionSpec formatOption(List<ChartFormat> formats) {
+    List<String> words = formats.stream().map(ChartFormat::word).toList();
+    return OptionSpec.builder("--as")
+        .paramLabel("FORMAT")
+        .type(ChartFormat.class)
+        .converters(
+            word ->
+                ChartFormat.of(word)
+                    .filter(formats::contains)
+                    .orElseThrow(
+                        () ->
+                            new TypeConversionException(
+                                "expected one of " + String.join(", ", words))))
+        .completionCandidates(words)
+        .description("One format only: " + String.join(", ", words) + ".")
+        .build();
   }
 }

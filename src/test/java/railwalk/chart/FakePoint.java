@@ -105,6 +105,9 @@ public record FakePoint(
   @Override
   public AcLoads.Range range(Node node) {
     return new AcLoads.Range(volts(node), volts(node));
+  }
+
+  @Override
   public double sourceOhms(Node a, Node b) {
     return Math.abs(sourceOhms(a) - sourceOhms(b));
   }
