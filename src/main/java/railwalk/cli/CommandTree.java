@@ -15,6 +15,7 @@ final class CommandTree {
           new ChartCommand(),
           new CheckCommand(),
           new WalkCommand(),
+          new CompareCommand(),
           new SettleCommand(),
           new WarmUpCommand(),
           new TubesCommand(),
