@@ -33,10 +33,10 @@ final class CompareCommand implements Command {
                 CommandTree.argument("NETLIST", "1", "The amplifier as traced.", Path.class))
             .addPositional(
                 CommandTree.argument(
-                    "READINGS",
-                    "1..*",
-                    "A CSV sheet of readings, or readings such as b1=352 V1.6=171.",
-                    List.class)
+                        "READINGS",
+                        "1..*",
+                        "A CSV sheet of readings, or readings such as b1=352 V1.6=171.",
+                        List.class)
                     .toBuilder()
                     .index("1..*")
                     .auxiliaryTypes(String.class)

@@ -350,7 +350,8 @@ final class SolvedPoint implements OperatingPoint {
   }
 
   private boolean swings(Node node, double volts) {
-    return rippleVoltsRms(node).filter(rms -> rms > SWINGING * Math.abs(volts)).isPresent();
+    return solver.supplyOf(node) != null
+        && rippleVoltsRms(node).filter(rms -> rms > SWINGING * Math.abs(volts)).isPresent();
   }
 
   /** Settles the supply again with the meter in: needed where it draws alternating current too. */

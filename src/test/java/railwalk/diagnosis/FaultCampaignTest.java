@@ -52,8 +52,7 @@ class FaultCampaignTest {
     int sizes = 0;
     int fine = 0;
     for (String amp : AMPS) {
-      FaultCampaign campaign =
-          new FaultCampaign(Path.of("test-netlists", "amps", amp + ".cir"));
+      FaultCampaign campaign = new FaultCampaign(Path.of("test-netlists", "amps", amp + ".cir"));
       Random random = new Random(seed);
       int own = 0;
       int ownFirst = 0;
