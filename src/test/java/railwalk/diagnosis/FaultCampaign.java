@@ -3,16 +3,19 @@ package railwalk.diagnosis;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
 import java.util.Set;
+import java.util.function.UnaryOperator;
 import railwalk.circuit.Circuit;
 import railwalk.device.Catalogue;
 import railwalk.device.TubeType;
 import railwalk.netlist.NetlistReader;
 import railwalk.readings.Reading;
+import railwalk.readings.ReadingKind;
 import railwalk.readings.ReadingSheet;
 import railwalk.solve.OperatingPoint;
 import railwalk.solve.OperatingPointSolver;
@@ -78,50 +81,83 @@ final class FaultCampaign {
         : range.low();
   }
 
-  /** Returns the readings of a random build with {@code fault} in it; empty when it can't be. */
-  Optional<double[]> read(Fault fault, double severity, Random random) {
-    return read(c -> fault.applyTo(c, severity), random);
+  /** Returns a random build with {@code fault} in it. */
+  Patient patient(Fault fault, double severity, Random random) {
+    return new Patient(built(random), c -> fault.applyTo(c, severity), random);
   }
 
-  Optional<double[]> readHealthy(Random random) {
-    return read(c -> c, random);
+  /** Returns a random build with nothing wrong. */
+  Patient healthy(Random random) {
+    return new Patient(built(random), c -> c, random);
   }
 
-  private Optional<double[]> read(java.util.function.UnaryOperator<Circuit> change, Random random) {
-    Circuit built = RandomBuild.of(nominal, () -> 1e-9 + random.nextDouble() * (1 - 2e-9));
-    Circuit faulted = change.apply(built);
-    SolveOutcome outcome = OperatingPointSolver.solve(faulted, Walk.of(faulted));
-    if (!(outcome instanceof SolveOutcome.Solved solved)) {
-      return Optional.empty();
-    }
-    double[] exact = new Predictor(healthy, points).values(Map.of("", solved.point()));
-    double[] read = new double[exact.length];
-    for (int i = 0; i < exact.length; i++) {
-      double digit =
-          (MeterError.limitVolts(nominal.meter(), exact[i], Double.NaN)
-              - METER_SHARE * Math.abs(exact[i]));
-      double shown = exact[i] * (1 + METER_SHARE * (2 * random.nextDouble() - 1));
-      read[i] = digit * Math.rint(shown / digit);
-    }
-    return Optional.of(read);
+  private Circuit built(Random random) {
+    return RandomBuild.of(nominal, () -> 1e-9 + random.nextDouble() * (1 - 2e-9));
   }
 
-  /** Diagnoses readings at {@code places} of {@link #points}. */
-  Diagnosis diagnose(double[] read, List<Integer> places) throws NoOperatingPoint {
-    List<Reading> readings = new ArrayList<>();
-    for (int place : places) {
-      Probe p = points.get(place);
-      readings.add(new Reading(p.name(), p.at(), p.kind(), read[place], "", Double.NaN, "", null));
+  /** An amplifier on the bench, to be read with a meter that is a little wrong. */
+  final class Patient {
+    private final Circuit built;
+    private final UnaryOperator<Circuit> fault;
+    private final Random random;
+    private final Map<String, Optional<OperatingPoint>> solved = new HashMap<>();
+
+    private Patient(Circuit built, UnaryOperator<Circuit> fault, Random random) {
+      this.built = built;
+      this.fault = fault;
+      this.random = random;
     }
+
+    private Optional<OperatingPoint> solved(String state) {
+      return solved.computeIfAbsent(
+          state,
+          s -> {
+            Circuit faulted = fault.apply(Amplifier.inState(built, s));
+            return OperatingPointSolver.solve(faulted, Walk.of(faulted))
+                    instanceof SolveOutcome.Solved point
+                ? Optional.of(point.point())
+                : Optional.empty();
+          });
+    }
+
+    /** Returns whether it has an operating point at all. */
+    boolean settles() {
+      return solved("").isPresent();
+    }
+
+    /** Returns what the meter shows; empty where the amplifier does not settle in that state. */
+    Optional<Reading> read(Probe probe) throws NoOperatingPoint {
+      String state = Predictor.stateOf(probe);
+      Optional<OperatingPoint> point = solved(state);
+      if (point.isEmpty()) {
+        return Optional.empty();
+      }
+      Amplifier seen = new Amplifier(nominal, Set.of(state));
+      double exact = new Predictor(seen, List.of(probe)).values(Map.of(state, point.get()))[0];
+      double shown = exact * (1 + METER_SHARE * (2 * random.nextDouble() - 1));
+      if (probe.kind() != ReadingKind.OHMS) {
+        double limit = MeterError.limitVolts(nominal.meter(), exact, Double.NaN);
+        double digit = Math.max(1e-6, limit - METER_SHARE * Math.abs(exact));
+        shown = digit * Math.rint(shown / digit);
+      }
+      return Optional.of(
+          new Reading(
+              probe.name(), probe.at(), probe.kind(), shown, probe.state(), Double.NaN, "", null));
+    }
+
+    /** Returns readings at all of {@code probes}. */
+    List<Reading> read(List<Probe> probes) throws NoOperatingPoint {
+      List<Reading> readings = new ArrayList<>();
+      for (Probe probe : probes) {
+        read(probe).ifPresent(readings::add);
+      }
+      return readings;
+    }
+  }
+
+  /** Diagnoses readings after the nominal netlist. */
+  Diagnosis diagnose(List<Reading> readings) throws NoOperatingPoint {
     return Diagnosis.of(nominal, nominal, new ReadingSheet(readings, Double.NaN, ""), types);
-  }
-
-  List<Integer> all() {
-    List<Integer> places = new ArrayList<>();
-    for (int i = 0; i < points.size(); i++) {
-      places.add(i);
-    }
-    return places;
   }
 
   /**
@@ -129,27 +165,52 @@ final class FaultCampaign {
    * there. A fault counts as found where it, or one that reads alike, is named.
    */
   Outcome outcome(Fault fault, double severity, Diagnosis diagnosis) throws NoOperatingPoint {
-    Groups groups = new Groups(healthy, points);
     List<Integer> order = new ArrayList<>();
-    int own = groups.of(explanation(fault, severity));
-    int place = 99;
-    int size = 0;
     for (Suspect suspect : diagnosis.suspects()) {
       if (!order.contains(suspect.group())) {
         order.add(suspect.group());
       }
-      boolean same =
-          suspect.kind() == Suspect.Kind.FAULT
-              && (suspect.faults().get(0).equals(fault)
-                  || samePart(suspect.faults().get(0), fault)
-                  || groups.of(explanation(suspect.faults().get(0), estimate(suspect))) == own);
-      if (same && place == 99) {
-        place = order.indexOf(suspect.group()) + 1;
-        size =
-            (int) diagnosis.suspects().stream().filter(s -> s.group() == suspect.group()).count();
+    }
+    for (int group : order) {
+      List<Suspect> members =
+          diagnosis.suspects().stream().filter(s -> s.group() == group).toList();
+      if (holds(members, fault, severity)) {
+        int faulted = (int) members.stream().filter(s -> s.kind() == Suspect.Kind.FAULT).count();
+        return new Outcome(fault, severity, order.indexOf(group) + 1, faulted, diagnosis);
       }
     }
-    return new Outcome(fault, severity, place, size, diagnosis);
+    return new Outcome(fault, severity, 99, 0, diagnosis);
+  }
+
+  /** Returns the probability of the group that {@code fault} belongs to. */
+  double probability(Fault fault, double severity, Diagnosis diagnosis) {
+    Outcome outcome;
+    try {
+      outcome = outcome(fault, severity, diagnosis);
+    } catch (NoOperatingPoint unsettled) {
+      return 0;
+    }
+    List<Integer> order = diagnosis.suspects().stream().map(Suspect::group).distinct().toList();
+    return outcome.place() > order.size()
+        ? 0
+        : diagnosis.suspects().stream()
+            .filter(s -> s.group() == order.get(outcome.place() - 1))
+            .mapToDouble(Suspect::probability)
+            .sum();
+  }
+
+  private boolean holds(List<Suspect> members, Fault fault, double severity) {
+    Groups groups = new Groups(healthy, points);
+    int own = groups.of(explanation(fault, severity));
+    for (Suspect suspect : members) {
+      if (suspect.kind() == Suspect.Kind.FAULT) {
+        Fault named = suspect.faults().get(0);
+        if (samePart(named, fault) || groups.of(explanation(named, estimate(suspect))) == own) {
+          return true;
+        }
+      }
+    }
+    return false;
   }
 
   /** The same part failed in the same way, told as a drift or as its end: high and open. */

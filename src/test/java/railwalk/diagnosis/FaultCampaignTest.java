@@ -7,9 +7,11 @@ import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.Random;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import railwalk.readings.Reading;
 
 /**
  * How often the part at fault is named, over random faults in random builds of the demo amplifiers.
@@ -59,8 +61,8 @@ class FaultCampaignTest {
       int ownThree = 0;
       int ownFine = 0;
       for (int i = 0; i < healthyEach; i++) {
-        double[] read = campaign.readHealthy(random).orElseThrow();
-        ownFine += campaign.diagnose(read, campaign.all()).healthy() ? 1 : 0;
+        List<Reading> read = campaign.healthy(random).read(campaign.points);
+        ownFine += campaign.diagnose(read).healthy() ? 1 : 0;
       }
       while (own < casesEach) {
         Fault fault = campaign.faults.get(random.nextInt(campaign.faults.size()));
@@ -68,12 +70,12 @@ class FaultCampaignTest {
         if (!campaign.shows(fault, severity)) {
           continue;
         }
-        double[] read = campaign.read(fault, severity, random).orElse(null);
-        if (read == null) {
+        FaultCampaign.Patient patient = campaign.patient(fault, severity, random);
+        if (!patient.settles()) {
           continue;
         }
-        FaultCampaign.Outcome outcome =
-            campaign.outcome(fault, severity, campaign.diagnose(read, campaign.all()));
+        Diagnosis diagnosis = campaign.diagnose(patient.read(campaign.points));
+        FaultCampaign.Outcome outcome = campaign.outcome(fault, severity, diagnosis);
         own++;
         ownFirst += outcome.place() == 1 ? 1 : 0;
         ownThree += outcome.place() <= 3 ? 1 : 0;
@@ -115,10 +117,76 @@ class FaultCampaignTest {
     return new Score(cases, first, inThree, sizes, healthyEach * AMPS.size(), fine);
   }
 
-  /** Places drawn at random, without repeats. */
-  static List<Integer> some(List<Integer> all, int count, Random random) {
-    List<Integer> shuffled = new ArrayList<>(all);
+  /**
+   * Six readings at random, then as advised: how many more until the true part's group has four in
+   * five of the probability.
+   */
+  @Test
+  void adviceIsWorthFollowing() throws Exception {
+    double median = further(6, 3);
+    assertThat(median).isLessThanOrEqualTo(4);
+  }
+
+  @Test
+  @Tag("slow")
+  void longRunFollowsAdvice() throws Exception {
+    assertThat(further(60, 4)).isLessThanOrEqualTo(4);
+  }
+
+  private static double further(int casesEach, long seed) throws Exception {
+    List<Integer> counts = new ArrayList<>();
+    for (String amp : AMPS) {
+      FaultCampaign campaign = new FaultCampaign(Path.of("test-netlists", "amps", amp + ".cir"));
+      Random random = new Random(seed);
+      List<Integer> own = new ArrayList<>();
+      while (own.size() < casesEach) {
+        Fault fault = campaign.faults.get(random.nextInt(campaign.faults.size()));
+        double severity = FaultCampaign.severity(fault, random);
+        if (!campaign.shows(fault, severity)) {
+          continue;
+        }
+        FaultCampaign.Patient patient = campaign.patient(fault, severity, random);
+        if (patient.settles()) {
+          own.add(further(campaign, patient, fault, severity, random));
+        }
+      }
+      System.out.println(amp + ": further readings " + own);
+      counts.addAll(own);
+    }
+    Collections.sort(counts);
+    double median = (counts.get((counts.size() - 1) / 2) + counts.get(counts.size() / 2)) / 2.0;
+    System.out.printf(
+        Locale.ROOT, "further readings until sure: median %.1f of %s%n", median, counts);
+    return median;
+  }
+
+  /** Gives up after this many. */
+  private static final int MOST_FURTHER = 12;
+
+  private static int further(
+      FaultCampaign campaign,
+      FaultCampaign.Patient patient,
+      Fault fault,
+      double severity,
+      Random random)
+      throws Exception {
+    List<Probe> shuffled = new ArrayList<>(campaign.points);
     Collections.shuffle(shuffled, random);
-    return shuffled.subList(0, Math.min(count, shuffled.size()));
+    List<Reading> readings =
+        new ArrayList<>(patient.read(shuffled.subList(0, Math.min(6, shuffled.size()))));
+    for (int more = 0; more < MOST_FURTHER; more++) {
+      Diagnosis diagnosis = campaign.diagnose(readings);
+      if (campaign.probability(fault, severity, diagnosis) >= 0.8) {
+        return more;
+      }
+      Optional<NextProbe> next = diagnosis.nextProbe();
+      Optional<Reading> reading =
+          next.isEmpty() ? Optional.empty() : patient.read(next.get().probe());
+      if (reading.isEmpty()) {
+        return MOST_FURTHER;
+      }
+      readings.add(reading.get());
+    }
+    return MOST_FURTHER;
   }
 }
