@@ -10,8 +10,14 @@ import java.util.Optional;
 import java.util.Random;
 import java.util.Set;
 import java.util.function.UnaryOperator;
+import railwalk.circuit.AmplifierSection;
+import railwalk.circuit.Bottle;
 import railwalk.circuit.Circuit;
+import railwalk.circuit.Element;
+import railwalk.device.AmplifierLaw;
 import railwalk.device.Catalogue;
+import railwalk.device.PentodeLaw;
+import railwalk.device.TriodeLaw;
 import railwalk.device.TubeType;
 import railwalk.netlist.NetlistReader;
 import railwalk.readings.Reading;
@@ -31,6 +37,7 @@ import railwalk.walk.Walk;
 final class FaultCampaign {
   private static final double METER_SHARE = 0.01;
 
+  private final double muError;
   private final Circuit nominal;
   private final Amplifier healthy;
   private final List<TubeType> types;
@@ -42,7 +49,12 @@ final class FaultCampaign {
   /** What became of one case. */
   record Outcome(Fault fault, double severity, int place, int groupSize, Diagnosis diagnosis) {}
 
-  FaultCampaign(Path netlist) throws IOException, NoOperatingPoint {
+  /**
+   * @param muError share by which the mu of the tubes on the bench differs from the netlist's law,
+   *     up or down; 0 for tubes that follow the law
+   */
+  FaultCampaign(Path netlist, double muError) throws IOException, NoOperatingPoint {
+    this.muError = muError;
     nominal = NetlistReader.read(netlist, Catalogue.standard()).circuit().orElseThrow();
     types = Catalogue.standard().types();
     healthy = new Amplifier(nominal, Set.of());
@@ -92,7 +104,57 @@ final class FaultCampaign {
   }
 
   private Circuit built(Random random) {
-    return RandomBuild.of(nominal, () -> 1e-9 + random.nextDouble() * (1 - 2e-9));
+    Circuit built = RandomBuild.of(nominal, () -> 1e-9 + random.nextDouble() * (1 - 2e-9));
+    return muError == 0 ? built : withOtherLaws(built, random);
+  }
+
+  /** Returns {@code built} with each tube's mu off by {@link #muError}, up or down. */
+  private Circuit withOtherLaws(Circuit built, Random random) {
+    Map<String, Double> factors = new HashMap<>();
+    for (Bottle bottle : built.bottles()) {
+      factors.put(bottle.name(), 1 + (random.nextBoolean() ? muError : -muError));
+    }
+    List<Element> elements = new ArrayList<>();
+    for (Element element : built.elements()) {
+      elements.add(
+          element instanceof AmplifierSection s
+              ? withMu(s, factors.getOrDefault(s.bottle(), 1.0))
+              : element);
+    }
+    return built.withElements(elements);
+  }
+
+  private static AmplifierSection withMu(AmplifierSection s, double factor) {
+    AmplifierLaw law = s.law();
+    if (law instanceof TriodeLaw t) {
+      law =
+          new TriodeLaw(
+              factor * t.mu(), t.exponent(), t.kg(), t.kp(), t.kvb(), t.contactVolts(), t.grid());
+    } else if (law instanceof PentodeLaw p) {
+      law =
+          new PentodeLaw(
+              factor * p.mu(),
+              p.exponent(),
+              p.kg(),
+              p.kp(),
+              p.kvb(),
+              p.contactVolts(),
+              p.lambda(),
+              p.knee(),
+              p.screenShare(),
+              p.screenRise(),
+              p.grid());
+    }
+    return new AmplifierSection(
+        s.name(),
+        s.bottle(),
+        s.section(),
+        TubeFaults.withLaw(s.type(), law),
+        s.plate(),
+        s.screen(),
+        s.grid(),
+        s.cathode(),
+        s.suppressor());
   }
 
   /** An amplifier on the bench, to be read with a meter that is a little wrong. */
