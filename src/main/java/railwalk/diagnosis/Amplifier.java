@@ -128,13 +128,25 @@ final class Amplifier {
 
   /** Returns the amplifier with a fault in it, in all states; empty when one does not settle. */
   Optional<Map<String, OperatingPoint>> with(Fault fault, double severity) {
+    return with(List.of(fault), List.of(severity));
+  }
+
+  /** Returns the amplifier with all faults in it, in all states; the healthy one without any. */
+  Optional<Map<String, OperatingPoint>> with(List<Fault> faults, List<Double> severities) {
+    if (faults.isEmpty()) {
+      return Optional.of(healthy);
+    }
     Map<String, OperatingPoint> points = new LinkedHashMap<>();
     for (Map.Entry<String, Circuit> state : circuits.entrySet()) {
       NearbySolver solver = solvers.get(state.getKey());
       if (solver == null) {
         throw new IllegalStateException(state.getKey());
       }
-      Optional<OperatingPoint> point = solver.solve(fault.applyTo(state.getValue(), severity));
+      Circuit faulted = state.getValue();
+      for (int f = 0; f < faults.size(); f++) {
+        faulted = faults.get(f).applyTo(faulted, severities.get(f));
+      }
+      Optional<OperatingPoint> point = solver.solve(faulted);
       if (point.isEmpty()) {
         return Optional.empty();
       }

@@ -8,8 +8,10 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Element;
+import railwalk.circuit.Node;
 import railwalk.device.TubeType;
 import railwalk.readings.MeasuredAt;
 import railwalk.readings.ReadingKind;
@@ -46,6 +48,9 @@ public record Diagnosis(
   private static final double SILENT_GAIN = 0.7;
 
   private static final double EVIDENT = 2;
+
+  /** Tubes that may be pulled for the next reading. */
+  private static final int MOST_PULLED = 4;
 
   public Diagnosis {
     readings = List.copyOf(readings);
@@ -177,7 +182,7 @@ public record Diagnosis(
         if (silentFault) {
           folded += probability;
           if (e.fit().logDensity() > healthyFit - SILENT_GAIN) {
-            silent.add(Ranking.candidateOf(e).fault());
+            silent.addAll(e.faults());
           }
         } else {
           shown.add(e);
@@ -226,18 +231,17 @@ public record Diagnosis(
       }
       supporting.sort((a, b) -> Double.compare(Math.abs(b.deviations()), Math.abs(a.deviations())));
       against.sort((a, b) -> Double.compare(Math.abs(b.deviations()), Math.abs(a.deviations())));
-      boolean fault = e.kind() == Suspect.Kind.FAULT;
-      boolean open = fault && Ranking.candidateOf(e).fault().range().open();
+      List<Double> estimates = new ArrayList<>();
+      List<Double> lows = new ArrayList<>();
+      List<Double> highs = new ArrayList<>();
+      for (int f = 0; f < e.faults().size(); f++) {
+        boolean open = e.faults().get(f).range().open();
+        estimates.add(open ? e.severities().get(f) : Double.NaN);
+        lows.add(open ? e.lows().get(f) : Double.NaN);
+        highs.add(open ? e.highs().get(f) : Double.NaN);
+      }
       return new Suspect(
-          e.kind(),
-          fault ? List.of(Ranking.candidateOf(e).fault()) : List.of(),
-          fault ? List.of(open ? e.severity() : Double.NaN) : List.of(),
-          fault ? List.of(open ? e.low() : Double.NaN) : List.of(),
-          fault ? List.of(open ? e.high() : Double.NaN) : List.of(),
-          probability,
-          group,
-          supporting,
-          against);
+          e.kind(), e.faults(), estimates, lows, highs, probability, group, supporting, against);
     }
 
     private Optional<NextProbe> next(
@@ -282,15 +286,50 @@ public record Diagnosis(
         }
       }
       Set<String> names = new LinkedHashSet<>();
+      Set<String> pulled = new LinkedHashSet<>();
       for (Explanation explanation : explanations) {
-        if (explanation.candidate() != null) {
-          Fault fault = Ranking.candidateOf(explanation).fault();
-          if (names.add(fault.element())) {
-            benched.circuit().element(fault.element()).ifPresent(e -> cold(e, places));
+        for (Fault fault : explanation.faults()) {
+          Optional<Element> element = benched.circuit().element(fault.element());
+          if (element.isPresent() && names.add(fault.element())) {
+            cold(element.get(), places);
+            pulled.addAll(bottlesAt(element.get()));
           }
         }
       }
+      pulled.stream().limit(MOST_PULLED).forEach(bottle -> withPulled(bottle, places));
       return places;
+    }
+
+    /** Returns the amplifying tube that a part is a piece of, or whose grid it hangs on. */
+    private Set<String> bottlesAt(Element element) {
+      Set<String> bottles = new LinkedHashSet<>();
+      for (AmplifierSection section : benched.circuit().elements(AmplifierSection.class)) {
+        boolean own = section.name().equals(element.name());
+        boolean atGrid =
+            element.bottle().isEmpty()
+                && !section.grid().equals(benched.circuit().reference())
+                && element.nodes().contains(section.grid());
+        if (own || atGrid) {
+          bottles.add(section.bottle());
+        }
+      }
+      return bottles;
+    }
+
+    /** Adds the grids of a tube with the tube out of its socket: what stays comes from outside. */
+    private void withPulled(String bottle, List<Probe> places) {
+      for (AmplifierSection section : benched.circuit().elements(AmplifierSection.class)) {
+        Node grid = section.grid();
+        if (section.bottle().equals(bottle) && !grid.equals(benched.circuit().reference())) {
+          places.add(
+              new Probe(
+                  section.name() + ".grid",
+                  new MeasuredAt.AtNode(grid),
+                  ReadingKind.DC,
+                  Trial.pulled(bottle),
+                  Double.NaN));
+        }
+      }
     }
 
     private static void cold(Element element, List<Probe> places) {

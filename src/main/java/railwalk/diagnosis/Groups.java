@@ -40,11 +40,9 @@ final class Groups {
   /** Returns the number, from 1, of the group that {@code explanation} belongs to or begins. */
   int of(Explanation explanation) {
     double[] shown = {};
-    if (explanation.kind() == Suspect.Kind.HEALTHY) {
-      shown = predictor.values(amplifier.healthy());
-    } else if (explanation.candidate() != null) {
+    if (explanation.kind() != Suspect.Kind.NOT_THIS_AMPLIFIER) {
       Optional<Map<String, OperatingPoint>> points =
-          amplifier.with(Ranking.candidateOf(explanation).fault(), explanation.severity());
+          amplifier.with(explanation.faults(), explanation.severities());
       shown = points.isPresent() ? predictor.values(points.get()) : shown;
     }
     for (int g = 0; g < leaders.size(); g++) {

@@ -57,16 +57,12 @@ final class ProbeSearch {
    * needs.
    */
   Optional<Outlook> outlook(Explanation explanation, int group, double weight) {
-    Map<String, OperatingPoint> points = amplifier.healthy();
-    if (explanation.candidate() != null) {
-      Optional<Map<String, OperatingPoint>> faulted =
-          amplifier.with(Ranking.candidateOf(explanation).fault(), explanation.severity());
-      if (faulted.isEmpty()) {
-        return Optional.empty();
-      }
-      points = faulted.get();
+    Optional<Map<String, OperatingPoint>> points =
+        amplifier.with(explanation.faults(), explanation.severities());
+    if (points.isEmpty()) {
+      return Optional.empty();
     }
-    Prediction all = predictor.predict(points);
+    Prediction all = predictor.predict(points.get());
     double[] healthy = predictor.values(amplifier.healthy());
     double[] limits = predictor.meterLimits(all.values());
     int n = read.size();

@@ -102,6 +102,7 @@ final class Ranking {
     for (int i = 0; i < Math.min(REFINED, found.size()); i++) {
       found.set(i, refined(found.get(i), frequency, share / sum));
     }
+    found.addAll(new Pairs(amplifier, predictor, this).of(found, Math.log(share / sum), frequency));
     found.add(healthyOne());
     found.add(anotherAmplifier());
     found.sort(Comparator.comparingDouble(Explanation::logPosterior).reversed());
@@ -109,11 +110,11 @@ final class Ranking {
   }
 
   private Explanation refined(Explanation rough, Frequency frequency, double unit) {
-    Candidate candidate = candidateOf(rough);
+    Candidate candidate = rough.single();
     Explanation best = rough;
     double prior = Math.log(unit * frequency.weight(candidate.fault().kind()));
     for (int round = 0; round < REFINEMENTS; round++) {
-      double severity = best.severity();
+      double severity = best.severities().get(0);
       Optional<Map<String, OperatingPoint>> points = amplifier.with(candidate.fault(), severity);
       if (points.isEmpty()) {
         return best;
@@ -126,14 +127,6 @@ final class Ranking {
       }
     }
     return best;
-  }
-
-  static Candidate candidateOf(Explanation explanation) {
-    Candidate candidate = explanation.candidate();
-    if (candidate == null) {
-      throw new IllegalArgumentException("no fault");
-    }
-    return candidate;
   }
 
   /**
@@ -173,10 +166,10 @@ final class Ranking {
     double log = logSum(logs);
     return new Explanation(
         Suspect.Kind.FAULT,
-        candidate,
-        severities[bestPlace],
-        quantile(severities, logs, log, 0.05),
-        quantile(severities, logs, log, 0.95),
+        List.of(candidate),
+        List.of(severities[bestPlace]),
+        List.of(quantile(severities, logs, log, 0.05)),
+        List.of(quantile(severities, logs, log, 0.95)),
         log + logPrior,
         best,
         new Prediction(
@@ -195,6 +188,21 @@ final class Ranking {
       sum[i] = a[i] + b[i];
     }
     return sum;
+  }
+
+  /** Returns how well an amplifier that shows {@code values} explains the readings. */
+  Fit fit(double[] values, Prediction spread, double[][] shared) {
+    double[] residual = new double[read.length];
+    for (int i = 0; i < residual.length; i++) {
+      residual[i] = read[i] - values[i];
+    }
+    return Fit.of(
+        residual, Covariance.of(shared, variances(values, spread.ownSpread())), slipWidths);
+  }
+
+  /** Returns the healthy amplifier's shared covariance. */
+  double[][] sharedHealthy() {
+    return sharedHealthy;
   }
 
   private double[] variances(double[] values, double[] ownSpread) {
@@ -218,15 +226,8 @@ final class Ranking {
     Covariance covariance =
         Covariance.of(sharedHealthy, variances(healthy.values(), healthy.ownSpread()));
     Fit fit = Fit.of(residual, covariance, slipWidths);
-    return new Explanation(
-        Suspect.Kind.HEALTHY,
-        null,
-        Double.NaN,
-        Double.NaN,
-        Double.NaN,
-        fit.logDensity() + Math.log(HEALTHY_SHARE),
-        fit,
-        healthy);
+    return Explanation.without(
+        Suspect.Kind.HEALTHY, fit.logDensity() + Math.log(HEALTHY_SHARE), fit, healthy);
   }
 
   private Explanation anotherAmplifier() {
@@ -240,12 +241,8 @@ final class Ranking {
     }
     double[][] none = new double[own.length][own.length];
     Fit fit = Fit.of(residual, Covariance.of(none, own), slipWidths);
-    return new Explanation(
+    return Explanation.without(
         Suspect.Kind.NOT_THIS_AMPLIFIER,
-        null,
-        Double.NaN,
-        Double.NaN,
-        Double.NaN,
         fit.logDensity() + Math.log(OTHER_AMPLIFIER_SHARE),
         fit,
         healthy);

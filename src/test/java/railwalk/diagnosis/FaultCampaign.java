@@ -95,7 +95,21 @@ final class FaultCampaign {
 
   /** Returns a random build with {@code fault} in it. */
   Patient patient(Fault fault, double severity, Random random) {
-    return new Patient(built(random), c -> fault.applyTo(c, severity), random);
+    return patient(List.of(fault), List.of(severity), random);
+  }
+
+  /** Returns a random build with several faults in it. */
+  Patient patient(List<Fault> several, List<Double> severities, Random random) {
+    return new Patient(
+        built(random),
+        circuit -> {
+          Circuit faulted = circuit;
+          for (int f = 0; f < several.size(); f++) {
+            faulted = several.get(f).applyTo(faulted, severities.get(f));
+          }
+          return faulted;
+        },
+        random);
   }
 
   /** Returns a random build with nothing wrong. */
@@ -275,11 +289,20 @@ final class FaultCampaign {
     return false;
   }
 
-  /** The same part failed in the same way, told as a drift or as its end: high and open. */
+  /** Kinds that are one fault at different degrees. */
+  private static final List<Set<FaultKind>> DEGREES =
+      List.of(
+          Set.of(FaultKind.RESISTOR_HIGH, FaultKind.RESISTOR_OPEN),
+          Set.of(FaultKind.RESISTOR_LOW, FaultKind.RESISTOR_SHORTED),
+          Set.of(FaultKind.CAPACITOR_LEAKY, FaultKind.CAPACITOR_SHORTED),
+          Set.of(FaultKind.SECTION_WEAK, FaultKind.SECTION_DEAD));
+
+  /** The same part failed in the same way, if in another degree. */
   private static boolean samePart(Fault one, Fault other) {
     return one.element().equals(other.element())
-        && (one.kind() == other.kind()
-            || one.kind().word().charAt(0) == other.kind().word().charAt(0));
+        && (one.equals(other)
+            || DEGREES.stream()
+                .anyMatch(kinds -> kinds.contains(one.kind()) && kinds.contains(other.kind())));
   }
 
   private static double estimate(Suspect suspect) {
@@ -290,10 +313,10 @@ final class FaultCampaign {
   private static Explanation explanation(Fault fault, double severity) {
     return new Explanation(
         Suspect.Kind.FAULT,
-        new Candidate(fault),
-        severity,
-        severity,
-        severity,
+        List.of(new Candidate(fault)),
+        List.of(severity),
+        List.of(severity),
+        List.of(severity),
         0,
         new Fit(0, new boolean[0], new double[0]),
         new Prediction(new double[0], new double[0], new double[0][], new double[0]));
