@@ -68,7 +68,8 @@ class FaultCampaignTest {
     int sizes = 0;
     int fine = 0;
     for (String amp : AMPS) {
-      FaultCampaign campaign = new FaultCampaign(Path.of("test-netlists", "amps", amp + ".cir"), 0);
+      FaultCampaign campaign =
+          new FaultCampaign(Path.of("test-netlists", "amps", amp + ".cir"), muError);
       Random random = new Random(seed);
       int own = 0;
       int ownFirst = 0;
