@@ -44,7 +44,9 @@ class ArchitectureTest {
           "org.jgrapht", "walk",
           "org.apache.pdfbox", "render.pdf",
           "org.apache.fontbox", "render.pdf",
-          "org.hipparchus", "fit",
+          "org.hipparchus.optim", "fit",
+          "org.hipparchus.linear", "fit",
+          "org.hipparchus.random", "spread",
           "picocli", "cli",
           "com.fasterxml", "render.json");
 

@@ -25,21 +25,22 @@ public final class ChartJob {
 
   /** Makes the chart of {@code netlist} under the bench's conditions. */
   public static ChartJob of(Path netlist, BenchConditions conditions) throws CannotDo {
-    return of(netlist, conditions, false);
+    return of(netlist, conditions, false, BandKind.FIRST_ORDER);
   }
 
   /**
    * Makes the chart of {@code netlist} under the bench's conditions.
    *
    * @param lineSweep whether it has a page with the main points at 90 to 110 % of the line
+   * @param bands how the bands are found
    */
-  public static ChartJob of(Path netlist, BenchConditions conditions, boolean lineSweep)
-      throws CannotDo {
+  public static ChartJob of(
+      Path netlist, BenchConditions conditions, boolean lineSweep, BandKind bands) throws CannotDo {
     TracedAmplifier amplifier = TracedAmplifier.under(conditions, netlist);
     ChartInput input =
         new ChartInput(
             amplifier.fileName(),
-            SolvedColumns.of(amplifier),
+            SolvedColumns.of(amplifier, bands),
             amplifier.diagnostics(),
             lineSweep ? LineSweep.of(amplifier.circuit()) : List.of());
     return new ChartJob(new ChartBuilder().build(input));

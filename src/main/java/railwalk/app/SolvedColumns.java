@@ -13,7 +13,9 @@ import railwalk.solve.OperatingPointSolver;
 import railwalk.solve.SolveOutcome;
 import railwalk.solve.Unloaded;
 import railwalk.source.Diagnostic;
+import railwalk.spread.Bands;
 import railwalk.spread.FirstOrderBands;
+import railwalk.spread.SampledBands;
 import railwalk.walk.SupplyMap;
 import railwalk.walk.Walk;
 
@@ -23,27 +25,35 @@ final class SolvedColumns {
 
   /** Returns the amplifier as its netlist stands, solved. */
   static Column first(TracedAmplifier amplifier) throws CannotDo {
-    return column("", amplifier.circuit(), amplifier.origins());
+    return column("", amplifier.circuit(), amplifier.origins(), BandKind.FIRST_ORDER);
   }
 
   /** Returns all columns of {@code amplifier}; refuses where one would not settle. */
   static List<Column> of(TracedAmplifier amplifier) throws CannotDo {
+    return of(amplifier, BandKind.FIRST_ORDER);
+  }
+
+  /** Returns all columns of {@code amplifier}, their bands found in the way asked for. */
+  static List<Column> of(TracedAmplifier amplifier, BandKind kind) throws CannotDo {
     Circuit circuit = amplifier.circuit();
+    Origins origins = amplifier.origins();
     List<Column> columns = new ArrayList<>();
-    columns.add(first(amplifier));
+    columns.add(column("", circuit, origins, kind));
     for (State state : circuit.states()) {
-      columns.add(column(state.name(), circuit.inState(state), amplifier.origins()));
+      columns.add(column(state.name(), circuit.inState(state), origins, kind));
     }
     return columns;
   }
 
   /** Only the netlist as it stands is looked at before its tubes warm up. */
-  private static Column column(String state, Circuit circuit, Origins origins) throws CannotDo {
+  private static Column column(String state, Circuit circuit, Origins origins, BandKind kind)
+      throws CannotDo {
     SupplyMap map = Walk.of(circuit);
     OperatingPoint point = solve(state, circuit, map);
     OperatingPoint unloaded = state.isEmpty() ? Unloaded.of(circuit).orElse(null) : null;
+    Bands bands = kind == BandKind.SAMPLED ? SampledBands.of(point) : FirstOrderBands.of(point);
     List<Diagnostic> findings = placed(Findings.of(circuit, map, point, unloaded), origins);
-    return new Column(state, point, FirstOrderBands.of(point), findings, unloaded);
+    return new Column(state, point, bands, findings, unloaded);
   }
 
   /** Returns the operating point of {@code circuit}, or a refusal that names the node. */

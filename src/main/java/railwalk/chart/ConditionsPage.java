@@ -2,8 +2,10 @@ package railwalk.chart;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Line;
 import railwalk.circuit.Meter;
@@ -12,6 +14,7 @@ import railwalk.circuit.Spread;
 import railwalk.circuit.State;
 import railwalk.circuit.Switch;
 import railwalk.source.Diagnostic;
+import railwalk.spread.Sampling;
 import railwalk.units.Quantity;
 
 /** The first page: what the figures hold for, and the cautions. */
@@ -71,7 +74,7 @@ final class ConditionsPage {
       entries.add(plain("Switch", contact.name() + " " + SwitchWords.joined(contact)));
     }
     entries.add(plain(wording.say("{Tubes} in"), tubesIn()));
-    entries.add(plain("Low–high", bandText(circuit.spread())));
+    entries.add(plain("Low–high", bandText(circuit.spread(), input.first().bands().sampling())));
     entries.add(findingsEntry());
     for (State state : statesShown()) {
       entries.add(
@@ -170,7 +173,7 @@ final class ConditionsPage {
         .collect(Collectors.joining(", ", "all: ", ""));
   }
 
-  private String bandText(Spread spread) {
+  private String bandText(Spread spread, @Nullable Sampling sampling) {
     String tubes = spread.usedTubes() ? "used {tubes} −35 % to +20 %" : newTubes(spread);
     String resistors =
         spread.carbonResistors()
@@ -180,7 +183,10 @@ final class ConditionsPage {
                 + Quantity.percent(spread.resistor() + Spread.CARBON_DRIFT)
             : "resistors ±" + Quantity.percent(spread.resistor());
     return wording.say(
-        "nine healthy amplifiers in ten fall between: first order, ±1.645 standard deviations, with "
+        "nine healthy amplifiers in ten fall between: "
+            + (sampling == null
+                ? "first order, ±1.645 standard deviations, with "
+                : sampledText(sampling) + ", with ")
             + resistors
             + " where no tolerance is given, "
             + tubes
@@ -188,6 +194,15 @@ final class ConditionsPage {
             + Quantity.percent(spread.winding())
             + ", {line} ±"
             + Quantity.percent(spread.line()));
+  }
+
+  private static String sampledText(Sampling sampling) {
+    String builds = String.format(Locale.ROOT, "%,d builds solved", sampling.builds());
+    String left =
+        sampling.unsettled() == 0
+            ? ""
+            : " (" + sampling.unsettled() + " without an operating point left out)";
+    return "the 5 % and 95 % points of " + builds + left + ", seed " + sampling.seed();
   }
 
   private static String newTubes(Spread spread) {

@@ -8,6 +8,7 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Model.OptionSpec;
 import picocli.CommandLine.ParseResult;
 import picocli.CommandLine.TypeConversionException;
+import railwalk.app.BandKind;
 import railwalk.app.BenchConditions;
 import railwalk.app.CannotDo;
 import railwalk.app.ChartFormat;
@@ -46,6 +47,7 @@ final class ChartCommand implements Command {
                 OptionSpec.builder("--line-sweep")
                     .description("Add a page with the main points at 90 to 110 %% of the line.")
                     .build())
+            .addOption(bandsOption())
             .addOption(PaperOption.spec());
     spec.usageMessage()
         .description(
@@ -69,8 +71,10 @@ final class ChartCommand implements Command {
       refuseOtherSuffix(output.get());
     }
     boolean lineSweep = given.hasMatchedOption("--line-sweep");
+    BandKind bands = given.matchedOptionValue("--bands", BandKind.FIRST_ORDER);
     ChartJob job =
-        Progress.during(console, "solving …", () -> ChartJob.of(netlist, conditions, lineSweep));
+        Progress.during(
+            console, "solving …", () -> ChartJob.of(netlist, conditions, lineSweep, bands));
     if (output.isPresent() || format.orElse(ChartFormat.PDF) == ChartFormat.PDF) {
       Path target = console.folder().resolve(output.orElse(Path.of(ChartJob.pdfName(netlist))));
       job.write(target, format.orElse(ChartFormat.PDF), paper);
@@ -93,6 +97,23 @@ final class ChartCommand implements Command {
       throw new CannotDo(
           "without --as the file is a PDF: for " + output + " add --as " + other.get().word());
     }
+  }
+
+  private static OptionSpec bandsOption() {
+    List<String> words = List.of(BandKind.FIRST_ORDER.word(), BandKind.SAMPLED.word());
+    return OptionSpec.builder("--bands")
+        .paramLabel("KIND")
+        .type(BandKind.class)
+        .converters(
+            word ->
+                BandKind.of(word)
+                    .orElseThrow(
+                        () ->
+                            new TypeConversionException(
+                                "expected one of " + String.join(", ", words))))
+        .completionCandidates(words)
+        .description("How the bands are found: first-order, or sampled from 2,048 builds.")
+        .build();
   }
 
   /** Returns the option that chooses one of {@code formats}. */

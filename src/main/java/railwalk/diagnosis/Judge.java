@@ -11,9 +11,6 @@ import railwalk.readings.ReadingKind;
  * what is left against the band of 99 healthy amplifiers in 100, the meter's own error added.
  */
 final class Judge {
-  /** Standard deviations that leave half a per cent of a normal spread on either side. */
-  static final double DEVIATIONS = 2.576;
-
   /** Under this share of the line's design volts heaters starve: only opens and shorts show. */
   static final double STARVING = 0.85;
 
@@ -30,14 +27,23 @@ final class Judge {
   private final Predictor onBench;
   private final Prediction bench;
   private final double[] unloaded;
+  private final JudgedLimits band;
   private final boolean starving;
 
-  Judge(Predictor onChart, Amplifier charted, Predictor onBench, Amplifier benched) {
+  /**
+   * @param builds how many the limits are read off; 0 for limits of first order
+   */
+  Judge(
+      Predictor onChart, Amplifier charted, Predictor onBench, Amplifier benched, int builds) {
     this.onChart = onChart;
     this.onBench = onBench;
     chart = this.onChart.unloaded(charted.healthy());
     unloaded = onBench.unloaded(benched.healthy());
     bench = onBench.predict(benched.healthy());
+    band =
+        builds == 0
+            ? JudgedLimits.ofFirstOrder(bench)
+            : JudgedLimits.sampled(onBench, bench, benched.healthy(), builds);
     starving = starves(benched);
   }
 
@@ -56,11 +62,9 @@ final class Judge {
     double[] limits = onBench.meterLimits(bench.values());
     List<JudgedReading> judged = new ArrayList<>();
     for (int i = 0; i < readings.size(); i++) {
-      double half = DEVIATIONS * deviation(i);
-      double middle = bench.values()[i];
-      double nominal = middle - bench.shifts()[i];
-      double low = Math.min(nominal, middle - half);
-      double high = Math.max(nominal, middle + half);
+      double nominal = bench.values()[i] - bench.shifts()[i];
+      double low = band.low(i);
+      double high = band.high(i);
       double value = figure(readings.get(i));
       Verdict verdict =
           verdict(readings.get(i), value, nominal, new double[] {low, high, limits[i]}, highest);
@@ -69,14 +73,6 @@ final class Judge {
               readings.get(i), chart[i], unloaded[i], nominal, low, high, limits[i], verdict));
     }
     return judged;
-  }
-
-  private double deviation(int i) {
-    double variance = bench.ownSpread()[i] * bench.ownSpread()[i];
-    for (double volts : bench.rows()[i]) {
-      variance += volts * volts;
-    }
-    return Math.sqrt(variance);
   }
 
   /** Returns a reading as it is compared: drops and currents by magnitude, no end to ohms. */

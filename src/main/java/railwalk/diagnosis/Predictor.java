@@ -78,6 +78,15 @@ final class Predictor {
     return values;
   }
 
+  /** Returns what the meter shows at some of the places, by number, all in the state of a point. */
+  double[] values(List<Integer> places, OperatingPoint point) {
+    double[] values = new double[places.size()];
+    for (int k = 0; k < values.length; k++) {
+      values[k] = value(probes.get(places.get(k)), point);
+    }
+    return values;
+  }
+
   /** Returns what stands at each place before a meter loads it. */
   double[] unloaded(Map<String, OperatingPoint> points) {
     double[] values = new double[probes.size()];

@@ -19,27 +19,35 @@ final class CoupledSolver {
   private static final int MOST_ROUNDS = 120;
   private static final int PATIENT_ROUNDS = 10;
 
-  /**
-   * Greatest error that may be left, as a share of the greatest volts. A correction leaves about
-   * its square where the sweep carried its derivatives, and itself times the last gain where
-   * derivatives of an earlier sweep served.
-   */
-  private static final double SETTLED_SHARE = 2e-11;
-
   /** From corrections of this size on, periods are run at full accuracy. */
   private static final double NEAR_SHARE = 1e-2;
 
-  /** After a correction this small the derivatives of the last sweep serve for the next. */
-  private static final double CHORD_SHARE = 1e-4;
+  /**
+   * When to stop, and when the derivatives of an earlier sweep will do.
+   *
+   * @param settledShare greatest error that may be left, as a share of the greatest volts. A
+   *     correction leaves about its square where the sweep carried its derivatives, and itself
+   *     times the last gain where derivatives of an earlier sweep served
+   * @param chordShare after a correction this small the derivatives of the last sweep serve for the
+   *     next
+   * @param chordGain … as long as each correction is no more than this share of the one before
+   */
+  record Accuracy(double settledShare, double chordShare, double chordGain) {
+    /** Of a solution that is charted. */
+    static final Accuracy CHARTED = new Accuracy(2e-11, 1e-4, 0.2);
 
-  /** … as long as each round gains this much on the one before. */
-  private static final double CHORD_GAIN = 0.2;
+    /**
+     * Of one of thousands that start from the same neighbour: its derivatives serve for all, and a
+     * few millivolts in the rails don't show in a band.
+     */
+    static final Accuracy SAMPLED = new Accuracy(1e-7, 5e-2, 0.5);
+  }
 
   /** Rounds after which the slopes of the drawn currents stay, so that the end is quadratic. */
   private static final int SLOPE_ROUNDS = 4;
 
-  private final Circuit circuit;
-  private final SupplyMap map;
+  private Circuit circuit;
+  private SupplyMap map;
   private final Trace trace;
   final DcNetwork dc;
   final List<Supply> supplies = new ArrayList<>();
@@ -59,6 +67,20 @@ final class CoupledSolver {
     }
     dcSolver = new DcSolver(dc, trace);
     x = new double[dc.size];
+  }
+
+  /**
+   * Takes the values of a circuit of the same topology. Returns false when they ask for equations
+   * of another shape; this solver is of no use then until others have been taken that fit.
+   */
+  boolean load(Circuit changed, SupplyMap changedMap) {
+    boolean fits = dc.load(changed);
+    for (int g = 0; fits && g < supplies.size(); g++) {
+      fits = supplies.get(g).load(changed, changedMap.groups().get(g));
+    }
+    circuit = changed;
+    map = changedMap;
+    return fits;
   }
 
   Circuit circuit() {
@@ -145,12 +167,17 @@ final class CoupledSolver {
     return new Thevenin(volts, new double[ports][ports]);
   }
 
-  /** Brings both sides to rest. */
+  /** Brings both sides to rest, as exactly as is charted. */
   boolean settle() {
+    return settle(Accuracy.CHARTED);
+  }
+
+  /** Brings both sides to rest. */
+  boolean settle(Accuracy accuracy) {
     if (supplies.isEmpty()) {
       return settleDc();
     }
-    boolean chord = near && guessByNeighbour();
+    boolean chord = near && guessByNeighbour(accuracy);
     double before = Double.POSITIVE_INFINITY;
     for (int round = 0; round < MOST_ROUNDS; round++) {
       double share = near ? 1 : correctionShare(round);
@@ -175,10 +202,10 @@ final class CoupledSolver {
       trace.add("supply round %d, %s: change %.3g", round + 1, near ? "fine" : "coarse", change);
       double gain = round == 0 ? 1 : Math.min(1, change / before);
       double left = change * (chord ? gain : change);
-      if (near && left < SETTLED_SHARE) {
+      if (near && left < accuracy.settledShare) {
         return true;
       }
-      chord = near && change < CHORD_SHARE && change < CHORD_GAIN * before;
+      chord = near && change < accuracy.chordShare && change < accuracy.chordGain * before;
       before = change;
       near |= change < NEAR_SHARE;
     }
@@ -189,7 +216,7 @@ final class CoupledSolver {
    * Takes the first step by the neighbour's tangents, which hold as long as only parts outside the
    * supplies differ. Returns whether they may serve for the next sweep too.
    */
-  private boolean guessByNeighbour() {
+  private boolean guessByNeighbour(Accuracy accuracy) {
     for (int g = 0; g < supplies.size(); g++) {
       Thevenin tangent = supplies.get(g).tangentAsBefore();
       if (tangent == null) {
@@ -205,7 +232,7 @@ final class CoupledSolver {
       change = Math.max(change, supplies.get(g).correct(portAmps(g), portVolts(g), 1));
     }
     trace.add("by the neighbour's tangents: change %.3g", change);
-    return change < CHORD_SHARE;
+    return change < accuracy.chordShare;
   }
 
   /**

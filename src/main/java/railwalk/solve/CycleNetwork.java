@@ -21,6 +21,8 @@ import railwalk.walk.RippleGroups;
  * currents of windings, chokes and parts without resistance. Linear parts are in {@link #matrix};
  * rectifying paths, states (capacitor volts, choke currents) and alternating sources stand beside
  * it for {@link CycleSweep} to add.
+ *
+ * <p>The pattern is made once; {@link #load} writes the values of a group of the same topology.
  */
 final class CycleNetwork {
   /** One rectifying path between two unknowns; {@code entry} is its first of four places. */
@@ -43,21 +45,22 @@ final class CycleNetwork {
   /** Ties what nothing else ties. */
   private static final double TIE_SIEMENS = 1e-13;
 
-  final RippleGroup group;
   final double hertz;
   final Map<Node, Integer> unknowns = new HashMap<>();
   final int nodeCount;
   final int size;
   final SparseMatrix matrix;
   final double[] constant;
-  final double[] source;
   final List<Path> paths = new ArrayList<>();
-  final List<Stores.Store> stores;
-  final List<Windings.Emf> emfs;
   final int[] diagonal;
   final List<Slope> slopes = new ArrayList<>();
-  final Map<Element, Integer> branches;
-  private final Windings windings;
+  RippleGroup group;
+  double[] source;
+  List<Stores.Store> stores;
+  List<Windings.Emf> emfs;
+  Map<Element, Integer> branches;
+  private final Stamps stamps = new Stamps();
+  private Windings windings;
 
   CycleNetwork(Circuit circuit, RippleGroup group) {
     this.group = group;
@@ -67,35 +70,68 @@ final class CycleNetwork {
       unknowns.put(node, node.equals(circuit.reference()) ? -1 : next++);
     }
     nodeCount = next;
-    Stamps stamps = new Stamps();
+    CycleStamper stamper = stamp(circuit, group);
+    size = stamps.size();
+    matrix = new SparseMatrix(stamps);
+    diagonal = matrix.places(stamper.firstDiagonal, nodeCount);
+    constant = matrix.newValues();
+    windings = stamper.windings;
+    emfs = windings.emfs();
+    branches = stamper.branches();
+    source = stamps.rightHandSide();
+    stores = List.of();
+    take(stamper);
+  }
+
+  /** Writes all equations: parts, ties, then the slopes of what the ports draw. */
+  private CycleStamper stamp(Circuit circuit, RippleGroup of) {
     stamps.start(nodeCount);
     CycleStamper stamper = new CycleStamper(circuit, stamps);
-    group.elements().forEach(e -> e.accept(stamper));
-    windings = stamper.windings;
-    windings.coupleThroughPrimaries(stamper.stores);
-    emfs = windings.emfs();
-    int[] diagonalNumbers = new int[nodeCount];
+    of.elements().forEach(e -> e.accept(stamper));
+    stamper.windings.coupleThroughPrimaries(stamper.stores);
+    stamper.firstDiagonal = stamps.count();
     for (int n = 0; n < nodeCount; n++) {
-      diagonalNumbers[n] = stamps.entry(n, n, TIE_SIEMENS);
+      stamps.entry(n, n, TIE_SIEMENS);
     }
-    for (Node drawn : group.ports()) {
-      for (Node by : group.ports()) {
+    for (Node drawn : of.ports()) {
+      for (Node by : of.ports()) {
         if (!drawn.equals(by)) {
-          slopes.add(new Slope(at(drawn), at(by), stamps.entry(at(drawn), at(by), 0)));
+          stamper.slopes.add(new Slope(at(drawn), at(by), stamps.entry(at(drawn), at(by), 0)));
         }
       }
     }
-    size = stamps.size();
-    matrix = new SparseMatrix(stamps);
-    slopes.replaceAll(s -> new Slope(s.drawn, s.by, matrix.place(s.place)));
-    constant = matrix.newValues();
+    return stamper;
+  }
+
+  private void take(CycleStamper stamper) {
     matrix.load(stamps, constant);
     source = stamps.rightHandSide();
-    diagonal = places(diagonalNumbers);
+    windings = stamper.windings;
+    emfs = windings.emfs();
     branches = stamper.branches();
-    stamper.pathDrafts.forEach(
-        d -> paths.add(new Path(d.anode, d.cathode, d.law, d.element, matrix.places(d.entry, 4))));
+    slopes.clear();
+    for (Slope s : stamper.slopes) {
+      slopes.add(new Slope(s.drawn, s.by, matrix.place(s.place)));
+    }
+    paths.clear();
+    for (PathDraft d : stamper.pathDrafts) {
+      paths.add(new Path(d.anode, d.cathode, d.law, d.element, matrix.places(d.entry, 4)));
+    }
     stores = stamper.stores.placed(matrix);
+  }
+
+  /**
+   * Writes the values of a group of the same topology. Returns false, and writes none, when one
+   * asks for equations of another shape.
+   */
+  boolean load(Circuit circuit, RippleGroup changed) {
+    CycleStamper stamper = stamp(circuit, changed);
+    boolean fits = circuit.line().hertz() == hertz && matrix.fits(stamps);
+    if (fits) {
+      group = changed;
+      take(stamper);
+    }
+    return fits;
   }
 
   /** Returns the unknown of a node's volts; −1 for the reference. */
@@ -108,19 +144,13 @@ final class CycleNetwork {
     return windings.branch(section);
   }
 
-  private int[] places(int[] numbers) {
-    int[] places = new int[numbers.length];
-    for (int i = 0; i < numbers.length; i++) {
-      places[i] = matrix.place(numbers[i]);
-    }
-    return places;
-  }
-
   private record PathDraft(int anode, int cathode, TwoPoleLaw law, Element element, int entry) {}
 
   private final class CycleStamper extends LinearStamper {
     private final Windings windings;
     private final List<PathDraft> pathDrafts = new ArrayList<>();
+    private final List<Slope> slopes = new ArrayList<>();
+    private int firstDiagonal;
     private final Stores stores = new Stores(this);
 
     CycleStamper(Circuit circuit, Stamps stamps) {

@@ -62,6 +62,11 @@ final class CycleSweep {
     means = new double[net.size];
   }
 
+  /** Forgets what was found of the linear parts, since they may have other values. */
+  void forget() {
+    response.forget();
+  }
+
   /**
    * Runs the period.
    *

@@ -124,13 +124,22 @@ final class DcNetwork {
     }
   }
 
-  /** Writes the values of a circuit of the same topology. */
-  void load(Circuit circuit) {
+  /**
+   * Writes the values of a circuit of the same topology. Returns false, and writes none, when one
+   * asks for equations of another shape: a resistance that got so small that it needs its current
+   * as an unknown.
+   */
+  boolean load(Circuit circuit) {
     List<Element> parts = new ArrayList<>(elementPlaces.size());
     for (int place : elementPlaces) {
       parts.add(circuit.elements().get(place));
     }
-    take(stamp(parts));
+    DcStamper stamper = stamp(parts);
+    boolean fits = matrix.fits(stamps);
+    if (fits) {
+      take(stamper);
+    }
+    return fits;
   }
 
   private void take(DcStamper stamper) {

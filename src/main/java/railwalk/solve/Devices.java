@@ -49,15 +49,22 @@ final class Devices {
     load(stamper);
   }
 
-  /** Takes the laws of a circuit of the same topology. */
+  /** Takes the parts and laws of a circuit of the same topology. */
   void load(DcStamper stamper) {
     laws = new AmplifierLaw[amplifiers.size()];
     for (int i = 0; i < laws.length; i++) {
-      laws[i] = stamper.amplifiers.get(i).section().law();
+      Amplifier was = amplifiers.get(i);
+      AmplifierSection section = stamper.amplifiers.get(i).section();
+      amplifiers.set(
+          i, new Amplifier(section, was.plate, was.screen, was.grid, was.cathode, was.places));
+      laws[i] = section.law();
     }
     twoPoleLaws = new TwoPoleLaw[twoPoles.size()];
     for (int i = 0; i < twoPoleLaws.length; i++) {
-      twoPoleLaws[i] = branchOf(stamper.twoPoles.get(i).law(), glow[i]);
+      TwoPole was = twoPoles.get(i);
+      DcStamper.TwoPoleDraft is = stamper.twoPoles.get(i);
+      twoPoles.set(i, new TwoPole(is.element(), was.anode, was.cathode, was.places));
+      twoPoleLaws[i] = branchOf(is.law(), glow[i]);
     }
   }
 

@@ -96,10 +96,12 @@ final class SolvedPoint implements OperatingPoint {
   }
 
   private @Nullable CycleReport reportOf(Element element) {
-    return reports().stream()
-        .filter(r -> r.net().group.elements().contains(element))
-        .findFirst()
-        .orElse(null);
+    for (int g = 0; g < solver.supplies.size(); g++) {
+      if (solver.supplies.get(g).net.group.elements().contains(element)) {
+        return reports().get(g);
+      }
+    }
+    return null;
   }
 
   @Override
@@ -337,8 +339,9 @@ final class SolvedPoint implements OperatingPoint {
       return volts;
     }
     Integer unknown = solver.dc.unknowns.get(node);
-    double straight = swings(node, volts) ? STRAIGHT_SWINGING_LOADING : STRAIGHT_LOADING;
-    if (source / meterOhms < straight) {
+    double ratio = source / meterOhms;
+    if (ratio < STRAIGHT_SWINGING_LOADING
+        || (ratio < STRAIGHT_LOADING && !swings(node, volts))) {
       return volts / (1 + source / meterOhms);
     }
     if (unknown == null) {

@@ -12,6 +12,8 @@ import java.util.Map;
 final class SparseMatrix {
   private final int size;
   private final int[] placeOf;
+  private final int[] stampedRows;
+  private final int[] stampedColumns;
   private final int[] rows;
   private final int[] columns;
   private final SparseLu lu;
@@ -19,12 +21,16 @@ final class SparseMatrix {
   SparseMatrix(Stamps stamps) {
     size = stamps.size();
     placeOf = new int[stamps.count()];
+    stampedRows = new int[placeOf.length];
+    stampedColumns = new int[placeOf.length];
     IntList patternRows = new IntList();
     IntList patternColumns = new IntList();
     Map<Long, Integer> places = new HashMap<>();
     for (int number = 0; number < stamps.count(); number++) {
       int row = stamps.row(number);
       int column = stamps.column(number);
+      stampedRows[number] = row;
+      stampedColumns[number] = column;
       if (row < 0 || column < 0) {
         continue;
       }
@@ -68,6 +74,17 @@ final class SparseMatrix {
   /** Returns a zeroed value array. */
   double[] newValues() {
     return new double[rows.length + 1];
+  }
+
+  /** Returns whether {@code stamps} have the shape that this pattern was made from. */
+  boolean fits(Stamps stamps) {
+    boolean fits = stamps.count() == placeOf.length && stamps.size() == size;
+    for (int number = 0; fits && number < placeOf.length; number++) {
+      fits =
+          stamps.row(number) == stampedRows[number]
+              && stamps.column(number) == stampedColumns[number];
+    }
+    return fits;
   }
 
   /** Fills {@code values} with the sums of {@code stamps}, which must have the pattern's shape. */

@@ -58,6 +58,11 @@ final class StageResponse {
     pathVoltsBy = new double[paths][inputs];
   }
 
+  /** Forgets the answers, since the parts may have other values. */
+  void forget() {
+    scaleBefore = Double.NaN;
+  }
+
   /** Finds the answers; false when the linear parts have none. */
   boolean prepare(double[] drawnAmps, double[][] drawnSiemens, double perStage) {
     fillBase(drawnSiemens, perStage);

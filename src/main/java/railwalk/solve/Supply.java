@@ -3,7 +3,9 @@ package railwalk.solve;
 import java.util.Arrays;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
+import railwalk.circuit.Circuit;
 import railwalk.circuit.Node;
+import railwalk.walk.RippleGroup;
 
 /**
  * One ripple group on its way to the periodic steady state, by shooting: the states at the start of
@@ -58,6 +60,13 @@ final class Supply {
     meterSiemens = new double[net.nodeCount];
     lead = new double[states.length];
     carried = new double[states.length];
+  }
+
+  /** Takes the values of a group of the same topology; false when they do not fit the equations. */
+  boolean load(Circuit circuit, RippleGroup group) {
+    fine.forget();
+    coarse.forget();
+    return net.load(circuit, group);
   }
 
   /** Charges the reservoirs quickly, as a first guess: a few periods with small capacitors. */
