@@ -73,7 +73,14 @@ public record Diagnosis(
    */
   public static Diagnosis of(Circuit chart, Circuit bench, ReadingSheet sheet, List<TubeType> types)
       throws NoOperatingPoint {
-    return new Builder(chart, bench, sheet).build(types);
+    return of(chart, bench, sheet, types, 0);
+  }
+
+  /** Diagnoses an amplifier, its limits read off {@code builds}; 0 for limits of first order. */
+  static Diagnosis of(
+      Circuit chart, Circuit bench, ReadingSheet sheet, List<TubeType> types, int builds)
+      throws NoOperatingPoint {
+    return new Builder(chart, bench, sheet).build(types, builds);
   }
 
   private static final class Builder {
@@ -95,10 +102,14 @@ public record Diagnosis(
       charted = chart.equals(bench) ? benched : new Amplifier(chart, states);
     }
 
-    Diagnosis build(List<TubeType> types) throws NoOperatingPoint {
+    Diagnosis build(List<TubeType> types, int builds) throws NoOperatingPoint {
       Judge judge =
           new Judge(
-              new Predictor(charted, probes), charted, new Predictor(benched, probes), benched);
+              new Predictor(charted, probes),
+              charted,
+              new Predictor(benched, probes),
+              benched,
+              builds);
       List<JudgedReading> judged = judge.judge(sheet.readings());
       List<Integer> counted = new ArrayList<>();
       List<Probe> countedProbes = new ArrayList<>();

@@ -33,8 +33,7 @@ final class Judge {
   /**
    * @param builds how many the limits are read off; 0 for limits of first order
    */
-  Judge(
-      Predictor onChart, Amplifier charted, Predictor onBench, Amplifier benched, int builds) {
+  Judge(Predictor onChart, Amplifier charted, Predictor onBench, Amplifier benched, int builds) {
     this.onChart = onChart;
     this.onBench = onBench;
     chart = this.onChart.unloaded(charted.healthy());

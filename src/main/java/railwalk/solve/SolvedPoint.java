@@ -340,8 +340,7 @@ final class SolvedPoint implements OperatingPoint {
     }
     Integer unknown = solver.dc.unknowns.get(node);
     double ratio = source / meterOhms;
-    if (ratio < STRAIGHT_SWINGING_LOADING
-        || (ratio < STRAIGHT_LOADING && !swings(node, volts))) {
+    if (ratio < STRAIGHT_SWINGING_LOADING || (ratio < STRAIGHT_LOADING && !swings(node, volts))) {
       return volts / (1 + source / meterOhms);
     }
     if (unknown == null) {

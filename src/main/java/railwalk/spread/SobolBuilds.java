@@ -42,7 +42,7 @@ final class SobolBuilds {
     double[] point = sequence.nextVector();
     for (int i = 0; i < point.length; i++) {
       long turned = (long) (point[i] * POINTS) ^ masks[i];
-      point[i] = Math.max(turned, 0.5) / POINTS;
+      point[i] = Math.max((double) turned, 0.5) / POINTS;
     }
     return point;
   }

@@ -78,7 +78,7 @@ final class FaultCampaign {
       for (double volts : expected.rows()[i]) {
         variance += volts * volts;
       }
-      double half = Judge.DEVIATIONS * Math.sqrt(variance) + limits[i];
+      double half = JudgedLimits.DEVIATIONS * Math.sqrt(variance) + limits[i];
       if (Math.abs(values[i] - expected.values()[i]) > half) {
         return true;
       }
@@ -233,7 +233,7 @@ final class FaultCampaign {
 
   /** Diagnoses readings after the nominal netlist. */
   Diagnosis diagnose(List<Reading> readings) throws NoOperatingPoint {
-    return Diagnosis.of(nominal, nominal, new ReadingSheet(readings, Double.NaN, ""), types);
+    return Diagnosis.of(nominal, nominal, new ReadingSheet(readings, Double.NaN, ""), types, 0);
   }
 
   /**
