@@ -26,8 +26,10 @@ public final class CompareJob {
   private final BenchReport report;
   private final Diagnosis diagnosis;
   private final String remarks;
+  private final String meter;
 
-  private CompareJob(BenchReport report, Diagnosis diagnosis, String remarks) {
+  private CompareJob(BenchReport report, Diagnosis diagnosis, String remarks, String meter) {
+    this.meter = meter;
     this.report = report;
     this.diagnosis = diagnosis;
     this.remarks = remarks;
@@ -82,7 +84,7 @@ public final class CompareJob {
       ChartInput input =
           new ChartInput(
               benched.fileName(), List.of(SolvedColumns.first(benched)), benched.diagnostics());
-      return new CompareJob(BenchReport.of(input, diagnosis), diagnosis, remarks);
+      return new CompareJob(BenchReport.of(input, diagnosis), diagnosis, remarks, meter.orElse(""));
     } catch (NoOperatingPoint failure) {
       throw new CannotDo(String.valueOf(failure.getMessage()));
     }
@@ -115,5 +117,29 @@ public final class CompareJob {
             ? new PdfRenderer().render(report.chart(), paper)
             : print(format).getBytes(StandardCharsets.UTF_8);
     WholeFile.write(target, bytes);
+  }
+
+  /**
+   * Writes the readings with what was expected and the verdicts to {@code target}, a sheet that can
+   * be compared again, whole or not at all.
+   *
+   * @param given the sheet that was read, which is never overwritten; empty when there was none
+   */
+  public void save(Path target, Optional<Path> given) throws CannotDo {
+    if (given.isPresent() && isSame(target, given.get())) {
+      throw new CannotDo(
+          "--save " + target + ": this is the sheet that was read; name another file");
+    }
+    double lineVolts = diagnosis.benched().circuit().line().volts();
+    String text = SavedSheet.text(diagnosis.readings(), lineVolts, meter);
+    WholeFile.write(target, text.getBytes(StandardCharsets.UTF_8));
+  }
+
+  private static boolean isSame(Path target, Path given) throws CannotDo {
+    try {
+      return Files.exists(target) && Files.isSameFile(target, given);
+    } catch (IOException failure) {
+      throw new CannotDo("cannot write " + target + ": " + WholeFile.reason(failure));
+    }
   }
 }

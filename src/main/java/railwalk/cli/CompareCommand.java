@@ -47,6 +47,12 @@ final class CompareCommand implements Command {
                     .type(Path.class)
                     .description("Write the report to this file: a PDF, or what --as says.")
                     .build())
+            .addOption(
+                OptionSpec.builder("--save")
+                    .paramLabel("FILE")
+                    .type(Path.class)
+                    .description("Write the readings with expected volts and verdicts as a sheet.")
+                    .build())
             .addOption(ChartCommand.formatOption(FORMATS))
             .addOption(LineOption.spec())
             .addOption(
@@ -88,6 +94,12 @@ final class CompareCommand implements Command {
                     ? CompareJob.ofFile(netlist, Path.of(words.get(0)), conditions)
                     : CompareJob.ofWords(netlist, words, conditions));
     console.err().print(job.remarks());
+    Optional<Path> save = Optional.ofNullable(given.matchedOptionValue("--save", null));
+    if (save.isPresent()) {
+      Path target = console.folder().resolve(save.get());
+      job.save(target, sheet ? Optional.of(Path.of(words.get(0))) : Optional.empty());
+      console.err().println("wrote " + target);
+    }
     if (output.isPresent()) {
       Path target = console.folder().resolve(output.get());
       job.write(target, format.orElse(ChartFormat.PDF), paper);

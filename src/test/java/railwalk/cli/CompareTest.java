@@ -206,4 +206,20 @@ class CompareTest {
     assertThat(run.out()).contains("R13 high");
     assertThat(Files.readAllBytes(report)).startsWith('%', 'P', 'D', 'F');
   }
+
+  /** What was saved as found is compared again to the same report, but for the readings' order. */
+  @Test
+  void savesASheetThatCanBeComparedAgain() throws IOException {
+    Path saved = folder.resolve("as-found.csv");
+    Run first = compare("half-rectifier", "--save", saved.toString());
+    String netlist = AMPS.resolve("weirside.cir").toString();
+    Run again = Run.of("compare", netlist, saved.toString());
+    assertThat(Files.readString(saved))
+        .contains("b2,0.66,ripple,,,,0.17")
+        .contains("far off, high");
+    assertThat(again.out()).isEqualTo(first.out());
+    Run over = Run.of("compare", netlist, saved.toString(), "--save", saved.toString());
+    assertThat(over.code()).isEqualTo(Main.COULD_NOT);
+    assertThat(over.err()).contains("name another file");
+  }
 }
