@@ -23,7 +23,9 @@ final class ColdAmplifier {
       if (element instanceof Diode d) {
         elements.add(TubeFaults.leak(d.name(), d.anode(), d.cathode(), Rewire.OPEN_OHMS));
       } else if (element instanceof Winding w) {
-        elements.add(silent(w));
+        if (!w.wall()) {
+          elements.add(silent(w));
+        }
       } else if (element instanceof VoltageSource v) {
         elements.add(new VoltageSource(v.name(), v.a(), v.b(), 0, v.seriesOhms()));
       } else if (element.bottle().isEmpty()
