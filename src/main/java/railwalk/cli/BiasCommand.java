@@ -27,7 +27,7 @@ final class BiasCommand implements Command {
     spec.usageMessage()
         .description(
             "Print the bias sheet: idle currents and watts of the output tubes, what to read where,"
-                + " and the bias for 50, 60 and 70 % of the plate's watts.");
+                + " and the bias for 50, 60 and 70 %% of the plate's watts.");
     return spec;
   }
 
