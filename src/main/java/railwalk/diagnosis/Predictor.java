@@ -39,6 +39,9 @@ final class Predictor {
   private static final double OHMS_FLOOR = 0.5;
   private static final double CURRENT_SPREAD = 0.1;
 
+  /** One deviation of the resistance that a meter sees, as a share: ten-per-cent resistors. */
+  private static final double SOURCE_SPREAD = 0.06;
+
   private final Map<String, OperatingPoint> healthy;
   private final Map<String, Set<Node>> withinSupplies = new HashMap<>();
   private final Meter meter;
@@ -277,6 +280,8 @@ final class Predictor {
       double ratio = loading(probe, point, node.node(), volts);
       double passed = Double.isNaN(ratio) ? 1 : 1 / (1 + ratio);
       add(row, spread.row(node.node()), number, passed);
+      own[place] =
+          Double.isNaN(ratio) ? 0 : SOURCE_SPREAD * Math.abs(volts) * ratio * passed * passed;
       return passed * spread.shiftVolts(node.node());
     }
     if (probe.kind() == ReadingKind.DC && at instanceof MeasuredAt.Across part) {

@@ -112,6 +112,11 @@ final class FaultCampaign {
         random);
   }
 
+  /** Returns the amplifier as its netlist has it. */
+  Circuit nominalCircuit() {
+    return nominal;
+  }
+
   /** Returns a random build with nothing wrong. */
   Patient healthy(Random random) {
     return new Patient(built(random), c -> c, random);
@@ -209,10 +214,14 @@ final class FaultCampaign {
         return Optional.empty();
       }
       Amplifier seen = new Amplifier(nominal, Set.of(state));
-      double exact = new Predictor(seen, List.of(probe)).values(Map.of(state, point.get()))[0];
+      Predictor open = new Predictor(seen, List.of(probe));
+      double charted = open.unloaded(seen.healthy())[0];
+      double found = open.unloaded(Map.of(state, point.get()))[0];
+      Probe onRange = probe.onRange(nominal.meter(), charted, charted < found ? 0 : found);
+      double exact = new Predictor(seen, List.of(onRange)).values(Map.of(state, point.get()))[0];
       double shown = exact * (1 + METER_SHARE * (2 * random.nextDouble() - 1));
       if (probe.kind() != ReadingKind.OHMS) {
-        double limit = MeterError.limitVolts(nominal.meter(), exact, Double.NaN);
+        double limit = MeterError.limitVolts(nominal.meter(), exact, onRange.rangeVolts());
         double digit = Math.max(1e-6, limit - METER_SHARE * Math.abs(exact));
         shown = digit * Math.rint(shown / digit);
       }
