@@ -31,6 +31,7 @@ class ArchitectureTest {
           List.of("netlist", "walk", "readings"),
           List.of("solve"),
           List.of("spread", "findings", "fit"),
+          List.of("diagnosis"),
           List.of("chart"),
           List.of("render.type"),
           List.of("render.pdf", "render.text", "render.csv", "render.json"),
