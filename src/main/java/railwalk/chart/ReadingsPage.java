@@ -48,8 +48,9 @@ final class ReadingsPage {
             new Paragraph(
                 wording.say(
                     "Three steps: solved again at this {line}; the meter’s loading counted in; then"
-                        + " judged. Low and high hold 99 healthy amplifiers in 100, part spreads"
-                        + " carried to first order; the verdict adds the meter’s own error. Far off"
+                        + " judged. Low and high hold 99 of 100 healthy amplifiers, read off 2,048"
+                        + " that were drawn within their parts’ limits (seed 1) and solved; the"
+                        + " verdict adds the meter’s own error. Far off"
                         + " is a whole band’s width outside."))));
   }
 

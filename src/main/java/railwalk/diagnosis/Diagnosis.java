@@ -17,6 +17,7 @@ import railwalk.readings.MeasuredAt;
 import railwalk.readings.ReadingKind;
 import railwalk.readings.ReadingSheet;
 import railwalk.solve.OperatingPoint;
+import railwalk.spread.SampledBands;
 
 /**
  * What a sheet of readings says about an amplifier: each reading judged, the explanations by
@@ -73,7 +74,7 @@ public record Diagnosis(
    */
   public static Diagnosis of(Circuit chart, Circuit bench, ReadingSheet sheet, List<TubeType> types)
       throws NoOperatingPoint {
-    return of(chart, bench, sheet, types, 0);
+    return of(chart, bench, sheet, types, SampledBands.BUILDS);
   }
 
   /** Diagnoses an amplifier, its limits read off {@code builds}; 0 for limits of first order. */
