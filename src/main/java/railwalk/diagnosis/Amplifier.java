@@ -79,7 +79,7 @@ final class Amplifier {
       boolean meant =
           state.equalsIgnoreCase(Reading.TUBES_OUT)
               ? amplifies
-              : state.equals(Trial.pulled(bottle.name()));
+              : state.equals(Reading.pulled(bottle.name()));
       if (meant) {
         pulled.add(new StateChange.TubeOut(bottle.name()));
       }

@@ -14,6 +14,7 @@ import railwalk.circuit.Element;
 import railwalk.circuit.Node;
 import railwalk.device.TubeType;
 import railwalk.readings.MeasuredAt;
+import railwalk.readings.Reading;
 import railwalk.readings.ReadingKind;
 import railwalk.readings.ReadingSheet;
 import railwalk.solve.OperatingPoint;
@@ -338,7 +339,7 @@ public record Diagnosis(
                   section.name() + ".grid",
                   new MeasuredAt.AtNode(grid),
                   ReadingKind.DC,
-                  Trial.pulled(bottle),
+                  Reading.pulled(bottle),
                   Double.NaN));
         }
       }

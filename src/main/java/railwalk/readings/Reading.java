@@ -24,4 +24,9 @@ public record Reading(
     @Nullable SourceSpan span) {
   /** The state that any amplifier has: all tubes pulled but the rectifiers. */
   public static final String TUBES_OUT = "tubes out";
+
+  /** Returns the name of the state that any amplifier has with one of its tubes pulled. */
+  public static String pulled(String bottle) {
+    return bottle + " pulled";
+  }
 }

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.regex.Pattern;
 import org.jspecify.annotations.Nullable;
+import railwalk.circuit.Bottle;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.State;
 import railwalk.circuit.Switch;
@@ -48,6 +49,12 @@ final class StateFinder {
     for (State state : circuit.states()) {
       if (key(state.name()).equals(wanted)) {
         return state.name();
+      }
+    }
+    for (Bottle bottle : circuit.bottles()) {
+      String name = key(bottle.name());
+      if (wanted.equals(name + " pulled") || wanted.equals(name + " out")) {
+        return Reading.pulled(bottle.name());
       }
     }
     boolean out = wanted.equals(Reading.TUBES_OUT) || wanted.equals(VALVES_OUT);

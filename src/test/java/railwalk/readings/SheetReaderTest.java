@@ -240,6 +240,7 @@ class SheetReaderTest {
     assertThat(only("V1.6,OL,ohms").value()).isEqualTo(Double.POSITIVE_INFINITY);
     assertThat(only("V1.6,open,ohms,tubes out").state()).isEmpty();
     assertThat(only("C3,1.2,ripple").at()).isEqualTo(node("b2"));
+    assertThat(only("V4.5,-44,dc,v4 pulled").state()).isEqualTo(Reading.pulled("V4"));
     assertThat(only("V1.6,0.2 Vrms,ripple").kind()).isEqualTo(ReadingKind.RIPPLE);
   }
 
