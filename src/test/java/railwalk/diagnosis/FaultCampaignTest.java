@@ -40,7 +40,7 @@ class FaultCampaignTest {
   @Test
   @Tag("slow")
   void longRunNamesFaults() throws Exception {
-    Score score = run(250, 100, 2, 0);
+    Score score = run(100, 40, 2, 0);
     assertThat(score.share(score.first)).isGreaterThanOrEqualTo(0.85);
     assertThat(score.share(score.inThree)).isGreaterThanOrEqualTo(0.97);
     assertThat((double) score.groupSizes / score.inThree).isLessThanOrEqualTo(4);
@@ -56,7 +56,7 @@ class FaultCampaignTest {
   @Test
   @Tag("slow")
   void longRunWithWrongLaws() throws Exception {
-    Score score = run(100, 20, 6, 0.15);
+    Score score = run(40, 5, 6, 0.15);
     assertThat(score.share(score.inThree)).isGreaterThanOrEqualTo(0.9);
   }
 
@@ -145,7 +145,7 @@ class FaultCampaignTest {
   @Test
   @Tag("slow")
   void longRunFollowsAdvice() throws Exception {
-    assertThat(further(60, 4)).isLessThanOrEqualTo(4);
+    assertThat(further(20, 4)).isLessThanOrEqualTo(4);
   }
 
   private static double further(int casesEach, long seed) throws Exception {
