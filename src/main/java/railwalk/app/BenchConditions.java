@@ -7,6 +7,7 @@ import railwalk.circuit.Meter;
 import railwalk.device.Catalogue;
 import railwalk.netlist.NetlistReader;
 import railwalk.netlist.NetlistResult;
+import railwalk.readings.ReadingSheet;
 import railwalk.source.Diagnostic;
 import railwalk.units.Measure;
 import railwalk.units.ValueReader;
@@ -19,6 +20,17 @@ import railwalk.units.ValueReading;
  * @param meter as {@code .meter} takes it
  */
 public record BenchConditions(Optional<String> line, Optional<String> meter) {
+
+  /** Returns these conditions, those that a sheet gives where these leave them open. */
+  BenchConditions over(ReadingSheet sheet) {
+    Optional<String> sheetLine =
+        Double.isNaN(sheet.lineVolts())
+            ? Optional.empty()
+            : Optional.of(Double.toString(sheet.lineVolts()));
+    Optional<String> sheetMeter =
+        sheet.meter().isEmpty() ? Optional.empty() : Optional.of(sheet.meter());
+    return new BenchConditions(line.or(() -> sheetLine), meter.or(() -> sheetMeter));
+  }
 
   /** Returns {@code circuit} under these conditions. */
   Circuit applyTo(Circuit circuit) throws CannotDo {

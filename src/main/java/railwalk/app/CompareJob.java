@@ -27,8 +27,11 @@ public final class CompareJob {
   private final Diagnosis diagnosis;
   private final String remarks;
   private final String meter;
+  private final OpenValues open;
 
-  private CompareJob(BenchReport report, Diagnosis diagnosis, String remarks, String meter) {
+  private CompareJob(
+      BenchReport report, Diagnosis diagnosis, String remarks, String meter, OpenValues open) {
+    this.open = open;
     this.meter = meter;
     this.report = report;
     this.diagnosis = diagnosis;
@@ -38,7 +41,6 @@ public final class CompareJob {
   /** Compares {@code netlist} with the sheet in {@code readings}. */
   public static CompareJob ofFile(Path netlist, Path readings, BenchConditions conditions)
       throws CannotDo {
-    TracedAmplifier amplifier = TracedAmplifier.read(netlist).allKnown();
     String text;
     try {
       text = FileBytes.decode(Files.readAllBytes(readings));
@@ -46,45 +48,38 @@ public final class CompareJob {
       throw new CannotDo("cannot read " + readings + ": " + WholeFile.reason(failure));
     }
     String name = String.valueOf(readings.getFileName());
-    return of(amplifier, SheetReader.read(name, text, amplifier.circuit()), conditions);
+    OpenValues open =
+        OpenValues.solve(netlist, circuit -> SheetReader.read(name, text, circuit), conditions);
+    return of(open, SheetReader.read(name, text, open.amplifier().circuit()), conditions);
   }
 
   /** Compares {@code netlist} with readings written as {@code point=value}. */
   public static CompareJob ofWords(Path netlist, List<String> words, BenchConditions conditions)
       throws CannotDo {
-    TracedAmplifier amplifier = TracedAmplifier.read(netlist).allKnown();
-    return of(amplifier, SheetReader.ofWords(words, amplifier.circuit()), conditions);
+    OpenValues open =
+        OpenValues.solve(netlist, circuit -> SheetReader.ofWords(words, circuit), conditions);
+    return of(open, SheetReader.ofWords(words, open.amplifier().circuit()), conditions);
   }
 
-  private static CompareJob of(
-      TracedAmplifier amplifier, SheetReading read, BenchConditions conditions) throws CannotDo {
+  private static CompareJob of(OpenValues open, SheetReading read, BenchConditions conditions)
+      throws CannotDo {
+    TracedAmplifier amplifier = open.amplifier();
     String remarks = DiagnosticPrinter.print(read.diagnostics());
     ReadingSheet sheet = read.sheet();
     if (sheet.readings().isEmpty()) {
       throw new CannotDo(
           remarks.isEmpty() ? "no reading to compare with" : remarks + "no reading is left");
     }
-    Optional<String> line =
-        conditions
-            .line()
-            .or(
-                () ->
-                    Double.isNaN(sheet.lineVolts())
-                        ? Optional.empty()
-                        : Optional.of(Double.toString(sheet.lineVolts())));
-    Optional<String> meter =
-        conditions
-            .meter()
-            .or(() -> sheet.meter().isEmpty() ? Optional.empty() : Optional.of(sheet.meter()));
-    TracedAmplifier benched =
-        amplifier.with(new BenchConditions(line, meter).applyTo(amplifier.circuit()));
+    BenchConditions bench = conditions.over(sheet);
+    TracedAmplifier benched = amplifier.with(bench.applyTo(amplifier.circuit()));
     try {
       Diagnosis diagnosis =
           Diagnosis.of(amplifier.circuit(), benched.circuit(), sheet, Catalogue.standard().types());
       ChartInput input =
           new ChartInput(
               benched.fileName(), List.of(SolvedColumns.first(benched)), benched.diagnostics());
-      return new CompareJob(BenchReport.of(input, diagnosis), diagnosis, remarks, meter.orElse(""));
+      BenchReport report = BenchReport.of(input, diagnosis, open.values());
+      return new CompareJob(report, diagnosis, remarks, bench.meter().orElse(""), open);
     } catch (NoOperatingPoint failure) {
       throw new CannotDo(String.valueOf(failure.getMessage()));
     }
@@ -135,7 +130,14 @@ public final class CompareJob {
     WholeFile.write(target, text.getBytes(StandardCharsets.UTF_8));
   }
 
-  private static boolean isSame(Path target, Path given) throws CannotDo {
+  /**
+   * Writes the netlist with the values found in place of its question marks, whole or not at all.
+   */
+  public void learn(Path target) throws CannotDo {
+    open.learn(target);
+  }
+
+  static boolean isSame(Path target, Path given) throws CannotDo {
     try {
       return Files.exists(target) && Files.isSameFile(target, given);
     } catch (IOException failure) {

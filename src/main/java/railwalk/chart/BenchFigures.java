@@ -8,12 +8,14 @@ import java.util.List;
  *
  * @param suspects likeliest first
  * @param nextProbe one, or none
+ * @param values found from the readings; empty when the netlist leaves none open
  */
 public record BenchFigures(
     Figures.Conditions conditions,
     List<Point> points,
     List<Suspect> suspects,
-    List<NextProbe> nextProbe) {
+    List<NextProbe> nextProbe,
+    List<Value> values) {
 
   /**
    * One reading.
@@ -66,7 +68,30 @@ public record BenchFigures(
   /** One outcome: about this reading, and the suspect it speaks for. */
   public record Outcome(double reading, String suspect) {}
 
+  /**
+   * A value that the netlist leaves open.
+   *
+   * @param ohms NaN when not determined
+   * @param logDeviation one standard deviation of the natural logarithm
+   * @param nearest preferred value; NaN for windings and coils
+   * @param readPoint the point that would tell most; empty when determined
+   */
+  public record Value(
+      String element,
+      boolean determined,
+      double ohms,
+      double logDeviation,
+      double nearest,
+      List<String> toldBy,
+      String readPoint,
+      String readKind) {
+    public Value {
+      toldBy = List.copyOf(toldBy);
+    }
+  }
+
   public BenchFigures {
+    values = List.copyOf(values);
     points = List.copyOf(points);
     suspects = List.copyOf(suspects);
     nextProbe = List.copyOf(nextProbe);

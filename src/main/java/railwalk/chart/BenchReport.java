@@ -9,12 +9,14 @@ import java.util.stream.Collectors;
 import railwalk.circuit.Circuit;
 import railwalk.diagnosis.Diagnosis;
 import railwalk.diagnosis.Fault;
+import railwalk.diagnosis.FoundValue;
 import railwalk.diagnosis.JudgedReading;
 import railwalk.diagnosis.NextProbe;
 import railwalk.diagnosis.Probe;
 import railwalk.diagnosis.Suspect;
 import railwalk.diagnosis.Verdict;
 import railwalk.readings.Reading;
+import railwalk.units.PreferredOhms;
 import railwalk.units.Quantity;
 
 /**
@@ -35,8 +37,10 @@ public final class BenchReport {
   private final FaultWords faults;
   private final BenchWords words;
   private final ConfirmWords confirm;
+  private final List<FoundValue> values;
 
-  private BenchReport(ChartInput input, Diagnosis diagnosis) {
+  private BenchReport(ChartInput input, Diagnosis diagnosis, List<FoundValue> values) {
+    this.values = List.copyOf(values);
     this.input = input;
     this.diagnosis = diagnosis;
     this.circuit = diagnosis.benched().circuit();
@@ -50,9 +54,10 @@ public final class BenchReport {
    * Returns the report.
    *
    * @param input the amplifier at the bench's line, in its first column
+   * @param values found from the readings; empty when the netlist leaves none open
    */
-  public static BenchReport of(ChartInput input, Diagnosis diagnosis) {
-    return new BenchReport(input, diagnosis);
+  public static BenchReport of(ChartInput input, Diagnosis diagnosis, List<FoundValue> values) {
+    return new BenchReport(input, diagnosis, values);
   }
 
   /** Returns the report's pages. */
@@ -94,7 +99,21 @@ public final class BenchReport {
     diagnosis.nextProbe().ifPresent(probe -> next.add(figures(probe)));
     Figures.Conditions conditions =
         new FiguresBuilder(input.first(), circuit).build(List.of(), "").conditions();
-    return new BenchFigures(conditions, points, suspects, next);
+    List<BenchFigures.Value> found = values.stream().map(BenchReport::figures).toList();
+    return new BenchFigures(conditions, points, suspects, next, found);
+  }
+
+  private static BenchFigures.Value figures(FoundValue value) {
+    boolean preferred = value.determined() && value.resistor();
+    return new BenchFigures.Value(
+        value.element(),
+        value.determined(),
+        value.determined() ? value.ohms() : Double.NaN,
+        value.logDeviation(),
+        preferred ? PreferredOhms.nearest(value.ohms()) : Double.NaN,
+        value.toldBy(),
+        value.missing().map(Probe::name).orElse(""),
+        value.missing().map(probe -> probe.kind().word()).orElse(""));
   }
 
   private BenchFigures.Suspect figures(Suspect suspect) {
@@ -147,6 +166,10 @@ public final class BenchReport {
     Cautions cautions = new Cautions(input.first(), input.first().findings(), wording);
     cautions.hotChassis().ifPresent(blocks::add);
     blocks.add(new KeyFigures(conditions()));
+    if (!values.isEmpty()) {
+      blocks.add(new Heading("Values found"));
+      blocks.add(ValuesTable.of(values));
+    }
     blocks.add(new Heading("What explains the readings"));
     blocks.add(new SuspectTable(diagnosis, faults, words).table());
     blocks.add(new Heading("Read next"));

@@ -53,6 +53,12 @@ final class CompareCommand implements Command {
                     .type(Path.class)
                     .description("Write the readings with expected volts and verdicts as a sheet.")
                     .build())
+            .addOption(
+                OptionSpec.builder("--learn")
+                    .paramLabel("FILE")
+                    .type(Path.class)
+                    .description("Write the netlist with each ? replaced by the value found.")
+                    .build())
             .addOption(ChartCommand.formatOption(FORMATS))
             .addOption(LineOption.spec())
             .addOption(
@@ -109,6 +115,12 @@ final class CompareCommand implements Command {
     }
     if (output.isPresent() && format.isEmpty()) {
       console.out().print(job.print(ChartFormat.TEXT));
+    }
+    Optional<Path> learn = Optional.ofNullable(given.matchedOptionValue("--learn", null));
+    if (learn.isPresent()) {
+      Path target = console.folder().resolve(learn.get());
+      job.learn(target);
+      console.err().println("wrote " + target);
     }
     return job.healthy() ? Main.DONE : FAULT_FOUND;
   }

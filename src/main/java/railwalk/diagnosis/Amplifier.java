@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.UnaryOperator;
 import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Bottle;
 import railwalk.circuit.Circuit;
@@ -136,17 +137,25 @@ final class Amplifier {
     if (faults.isEmpty()) {
       return Optional.of(healthy);
     }
+    return changed(
+        circuit -> {
+          Circuit faulted = circuit;
+          for (int f = 0; f < faults.size(); f++) {
+            faulted = faults.get(f).applyTo(faulted, severities.get(f));
+          }
+          return faulted;
+        });
+  }
+
+  /** Returns the amplifier with a change made in all states; empty when one does not settle. */
+  Optional<Map<String, OperatingPoint>> changed(UnaryOperator<Circuit> change) {
     Map<String, OperatingPoint> points = new LinkedHashMap<>();
     for (Map.Entry<String, Circuit> state : circuits.entrySet()) {
       NearbySolver solver = solvers.get(state.getKey());
       if (solver == null) {
         throw new IllegalStateException(state.getKey());
       }
-      Circuit faulted = state.getValue();
-      for (int f = 0; f < faults.size(); f++) {
-        faulted = faults.get(f).applyTo(faulted, severities.get(f));
-      }
-      Optional<OperatingPoint> point = solver.solve(faulted);
+      Optional<OperatingPoint> point = solver.solve(change.apply(state.getValue()));
       if (point.isEmpty()) {
         return Optional.empty();
       }

@@ -26,6 +26,13 @@ record BenchWriter(FigureWriter figures) {
     } else {
       next(report.nextProbe().get(0));
     }
+    if (!report.values().isEmpty()) {
+      json.writeArrayFieldStart("values");
+      for (BenchFigures.Value value : report.values()) {
+        value(value);
+      }
+      json.writeEndArray();
+    }
     json.writeEndObject();
   }
 
@@ -55,6 +62,20 @@ record BenchWriter(FigureWriter figures) {
     sentences("for", suspect.supporting());
     sentences("against", suspect.against());
     json.writeNumberField("group", suspect.group());
+    json.writeEndObject();
+  }
+
+  private void value(BenchFigures.Value value) throws IOException {
+    JsonGenerator json = figures.json();
+    json.writeStartObject();
+    json.writeStringField("element", value.element());
+    json.writeBooleanField("determined", value.determined());
+    figures.number("ohms", value.ohms());
+    figures.number("log_deviation", value.logDeviation());
+    figures.number("nearest", value.nearest());
+    sentences("told_by", value.toldBy());
+    figures.text("read_point", value.readPoint());
+    figures.text("read_kind", value.readKind());
     json.writeEndObject();
   }
 
