@@ -112,7 +112,9 @@ class UnknownValuesTest {
             value.toldBy());
         assertThat(value.determined()).isTrue();
         assertThat(Math.abs(off)).isLessThan(3 * value.logDeviation());
-        assertThat(Math.abs(off)).isLessThan(0.05);
+        // where plate load and cathode are both open the load is told by 266 V less 168 V, each 1 %
+        // wrong: 4.5 % of the drop, and the cathode's own error comes on top
+        assertThat(Math.abs(off)).isLessThan(opened.size() == 1 ? 0.05 : 0.10);
         assertThat(value.toldBy()).isNotEmpty();
         assertThat(value.missing()).isEmpty();
       }
