@@ -42,6 +42,19 @@ public record AmplifierSection(
     return name.hashCode();
   }
 
+  /** Returns this section with another law. */
+  public AmplifierSection withLaw(AmplifierLaw changed) {
+    return new AmplifierSection(
+        name, bottle, section, type.withLaw(changed), plate, screen, grid, cathode, suppressor);
+  }
+
+  /** Returns this section wired otherwise. */
+  public AmplifierSection wired(
+      Node toPlate, @Nullable Node toScreen, Node toGrid, Node toCathode) {
+    return new AmplifierSection(
+        name, bottle, section, type, toPlate, toScreen, toGrid, toCathode, suppressor);
+  }
+
   /** Returns the section's law. */
   public AmplifierLaw law() {
     return (AmplifierLaw) type.law();

@@ -34,6 +34,11 @@ public record RectifierSection(
     plates = List.copyOf(plates);
   }
 
+  /** Returns this section with another law for each plate. */
+  public RectifierSection withLaw(TwoPoleLaw changed) {
+    return new RectifierSection(name, bottle, section, type.withLaw(changed), plates, cathode);
+  }
+
   /** Returns the law of one plate. */
   public TwoPoleLaw law() {
     return (TwoPoleLaw) type.law();

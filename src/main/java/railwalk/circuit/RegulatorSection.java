@@ -23,6 +23,11 @@ public record RegulatorSection(
     return name.hashCode();
   }
 
+  /** Returns this section with another law. */
+  public RegulatorSection withLaw(GasLaw changed) {
+    return new RegulatorSection(name, bottle, section, type.withLaw(changed), anode, cathode);
+  }
+
   /** Returns the section's law. */
   public GasLaw law() {
     return (GasLaw) type.law();

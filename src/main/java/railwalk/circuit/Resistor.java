@@ -27,6 +27,16 @@ public record Resistor(
     return name.hashCode();
   }
 
+  /** A resistance that nothing more is known of. */
+  public Resistor(String name, Node a, Node b, double ohms) {
+    this(name, a, b, ohms, Double.NaN, Double.NaN);
+  }
+
+  /** Returns this resistor with another value. */
+  public Resistor withOhms(double changed) {
+    return new Resistor(name, a, b, changed, ratedWatts, tolerance);
+  }
+
   /** Returns whether the value is to be solved from readings. */
   public boolean unknown() {
     return Double.isNaN(ohms);

@@ -59,6 +59,27 @@ public record Winding(
     this(name, sections, atLineVolts, transformer, wall, Double.NaN);
   }
 
+  /** Returns this winding with other sections. */
+  public Winding withSections(List<Section> changed) {
+    return new Winding(name, changed, atLineVolts, transformer, wall, ratedAmps);
+  }
+
+  /** Returns this winding with its open-circuit volts multiplied by {@code factor}. */
+  public Winding scaled(double factor) {
+    return withSections(
+        sections.stream()
+            .map(s -> new Section(s.a(), s.b(), s.openRmsVolts() * factor, s.ohms()))
+            .toList());
+  }
+
+  /** Returns this winding with another resistance in the section of that number, from 0. */
+  public Winding withOhms(int number, double ohms) {
+    List<Section> changed = new ArrayList<>(sections);
+    Section s = changed.get(number);
+    changed.set(number, new Section(s.a(), s.b(), s.openRmsVolts(), ohms));
+    return withSections(changed);
+  }
+
   /** Returns the ends and taps in order. */
   private List<Node> nodeList() {
     List<Node> nodes = new ArrayList<>();

@@ -16,4 +16,9 @@ public record SectionType(
     Ratings ratings,
     RectifierRatings rectifierRatings,
     double spreadLow,
-    double spreadHigh) {}
+    double spreadHigh) {
+  /** Returns this section with another law. */
+  public SectionType withLaw(SectionLaw changed) {
+    return new SectionType(id, kind, changed, ratings, rectifierRatings, spreadLow, spreadHigh);
+  }
+}

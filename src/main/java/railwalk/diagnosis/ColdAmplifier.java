@@ -6,6 +6,7 @@ import railwalk.circuit.Circuit;
 import railwalk.circuit.CurrentSource;
 import railwalk.circuit.Diode;
 import railwalk.circuit.Element;
+import railwalk.circuit.Resistor;
 import railwalk.circuit.StandIn;
 import railwalk.circuit.VoltageSource;
 import railwalk.circuit.Winding;
@@ -21,10 +22,10 @@ final class ColdAmplifier {
     List<Element> elements = new ArrayList<>();
     for (Element element : circuit.elements()) {
       if (element instanceof Diode d) {
-        elements.add(TubeFaults.leak(d.name(), d.anode(), d.cathode(), Rewire.OPEN_OHMS));
+        elements.add(new Resistor(d.name(), d.anode(), d.cathode(), Rewire.OPEN_OHMS));
       } else if (element instanceof Winding w) {
         if (!w.wall()) {
-          elements.add(silent(w));
+          elements.add(w.scaled(0));
         }
       } else if (element instanceof VoltageSource v) {
         elements.add(new VoltageSource(v.name(), v.a(), v.b(), 0, v.seriesOhms()));
@@ -35,13 +36,5 @@ final class ColdAmplifier {
       }
     }
     return circuit.withElements(elements);
-  }
-
-  private static Winding silent(Winding w) {
-    List<Winding.Section> sections = new ArrayList<>();
-    for (Winding.Section s : w.sections()) {
-      sections.add(new Winding.Section(s.a(), s.b(), 0, s.ohms()));
-    }
-    return new Winding(w.name(), sections, w.atLineVolts(), w.transformer(), w.wall());
   }
 }

@@ -91,7 +91,7 @@ public final class ColdOhms {
     return Rewire.replace(
         plain,
         e -> e instanceof Capacitor c && c.farads() >= ELECTROLYTIC_FARADS,
-        e -> List.of(TubeFaults.leak(e.name(), e.nodes().get(0), e.nodes().get(1), ohms)));
+        e -> List.of(new Resistor(e.name(), e.nodes().get(0), e.nodes().get(1), ohms)));
   }
 
   private static Circuit diodes(Circuit plain, Circuit original) {
@@ -99,8 +99,7 @@ public final class ColdOhms {
         plain,
         e -> original.element(e.name()).filter(Diode.class::isInstance).isPresent(),
         e ->
-            List.of(
-                TubeFaults.leak(e.name(), e.nodes().get(0), e.nodes().get(1), Rewire.SHORT_OHMS)));
+            List.of(new Resistor(e.name(), e.nodes().get(0), e.nodes().get(1), Rewire.SHORT_OHMS)));
   }
 
   /** Returns what the meter shows at {@code node}. */

@@ -91,11 +91,6 @@ record OpenValue(Element element, int section, boolean resistor, Node a, Node b)
     if (e instanceof Inductor l) {
       return new Inductor(l.name(), l.a(), l.b(), l.henries(), ohms);
     }
-    Winding w = (Winding) e;
-    List<Winding.Section> sections = new ArrayList<>(w.sections());
-    Winding.Section s = sections.get(section);
-    sections.set(section, new Winding.Section(s.a(), s.b(), s.openRmsVolts(), ohms));
-    return new Winding(
-        w.name(), sections, w.atLineVolts(), w.transformer(), w.wall(), w.ratedAmps());
+    return ((Winding) e).withOhms(section, ohms);
   }
 }

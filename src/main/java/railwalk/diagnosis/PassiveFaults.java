@@ -65,11 +65,7 @@ final class PassiveFaults {
         "",
         range,
         (circuit, ohms) ->
-            Rewire.change(circuit, Resistor.class, resistor.name(), r -> withOhms(r, ohms)));
-  }
-
-  static Resistor withOhms(Resistor r, double ohms) {
-    return new Resistor(r.name(), r.a(), r.b(), ohms, r.ratedWatts(), r.tolerance());
+            Rewire.change(circuit, Resistor.class, resistor.name(), r -> r.withOhms(ohms)));
   }
 
   private static void potentiometer(Potentiometer pot, List<Fault> faults) {
@@ -85,7 +81,7 @@ final class PassiveFaults {
                   Rewire.replace(
                       circuit,
                       e -> e.name().equals(pot.name()),
-                      e -> List.of(open(pot.name(), pot.a(), pot.b())))));
+                      e -> List.of(new Resistor(pot.name(), pot.a(), pot.b(), OPEN)))));
       return;
     }
     faults.add(
@@ -100,15 +96,8 @@ final class PassiveFaults {
                     e -> e.name().equals(pot.name()),
                     e ->
                         List.of(
-                            new Resistor(
-                                pot.name(), pot.a(), pot.b(), pot.ohms(), NONE_GIVEN, NONE_GIVEN),
-                            open(pot.name() + ":wiper", pot.wiper(), pot.b())))));
-  }
-
-  private static final double NONE_GIVEN = Double.NaN;
-
-  private static Resistor open(String name, railwalk.circuit.Node a, railwalk.circuit.Node b) {
-    return new Resistor(name, a, b, OPEN, NONE_GIVEN, NONE_GIVEN);
+                            new Resistor(pot.name(), pot.a(), pot.b(), pot.ohms()),
+                            new Resistor(pot.name() + ":wiper", pot.wiper(), pot.b(), OPEN)))));
   }
 
   private static void capacitor(Capacitor c, List<Fault> faults) {
@@ -175,6 +164,7 @@ final class PassiveFaults {
                     e ->
                         e instanceof Switch s
                             ? List.of(s.onPosition(0))
-                            : List.of(open(name, e.nodes().get(0), e.nodes().get(1))))));
+                            : List.of(
+                                new Resistor(name, e.nodes().get(0), e.nodes().get(1), OPEN)))));
   }
 }

@@ -4,14 +4,13 @@ import java.util.ArrayList;
 import java.util.List;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Diode;
-import railwalk.circuit.Element;
 import railwalk.circuit.Line;
 import railwalk.circuit.Node;
 import railwalk.circuit.RectifierSection;
+import railwalk.circuit.Resistor;
 import railwalk.circuit.Winding;
 import railwalk.device.SectionKind;
 import railwalk.device.SiliconLaw;
-import railwalk.device.TwoPoleLaw;
 
 /** What goes wrong between the wall and the reservoirs. */
 final class SupplyFaults {
@@ -49,7 +48,10 @@ final class SupplyFaults {
             WEAK,
             (c, share) ->
                 Rewire.change(
-                    c, RectifierSection.class, rectifier.name(), r -> withEmission(r, share))));
+                    c,
+                    RectifierSection.class,
+                    rectifier.name(),
+                    r -> r.withLaw(r.law().withEmission(share)))));
     if (rectifier.plates().size() > 1) {
       for (int plate = 0; plate < rectifier.plates().size(); plate++) {
         faults.add(halfDead(rectifier, plate));
@@ -66,21 +68,7 @@ final class SupplyFaults {
                     c,
                     RectifierSection.class,
                     rectifier.name(),
-                    r -> withLaw(r, SiliconLaw.generic()))));
-  }
-
-  static RectifierSection withEmission(RectifierSection r, double share) {
-    return withLaw(r, r.law().withEmission(share));
-  }
-
-  private static RectifierSection withLaw(RectifierSection r, TwoPoleLaw law) {
-    return new RectifierSection(
-        r.name(),
-        r.bottle(),
-        r.section(),
-        TubeFaults.withLaw(r.type(), law),
-        r.plates(),
-        r.cathode());
+                    r -> r.withLaw(SiliconLaw.generic()))));
   }
 
   private static Fault halfDead(RectifierSection rectifier, int dead) {
@@ -111,7 +99,7 @@ final class SupplyFaults {
             Rewire.replace(
                 c,
                 e -> e.name().equals(diode.name()),
-                e -> List.of(TubeFaults.leak(diode.name(), diode.anode(), diode.cathode(), ohms))));
+                e -> List.of(new Resistor(diode.name(), diode.anode(), diode.cathode(), ohms))));
   }
 
   private static void winding(Winding winding, List<Fault> faults) {
@@ -125,7 +113,11 @@ final class SupplyFaults {
               open.a().name() + " to " + open.b().name(),
               Range.NONE,
               (c, none) ->
-                  Rewire.change(c, Winding.class, winding.name(), w -> opened(w, section))));
+                  Rewire.change(
+                      c,
+                      Winding.class,
+                      winding.name(),
+                      w -> w.withOhms(section, Rewire.OPEN_OHMS))));
     }
     if (!winding.wall()) {
       faults.add(
@@ -134,24 +126,8 @@ final class SupplyFaults {
               winding.name(),
               "",
               TURNS_LEFT,
-              (c, share) ->
-                  Rewire.change(c, Winding.class, winding.name(), w -> scaled(w, share))));
+              (c, share) -> Rewire.change(c, Winding.class, winding.name(), w -> w.scaled(share))));
     }
-  }
-
-  private static Winding opened(Winding w, int number) {
-    List<Winding.Section> sections = new ArrayList<>(w.sections());
-    Winding.Section s = sections.get(number);
-    sections.set(number, new Winding.Section(s.a(), s.b(), s.openRmsVolts(), Rewire.OPEN_OHMS));
-    return new Winding(w.name(), sections, w.atLineVolts(), w.transformer(), w.wall());
-  }
-
-  private static Winding scaled(Winding w, double share) {
-    List<Winding.Section> sections = new ArrayList<>();
-    for (Winding.Section s : w.sections()) {
-      sections.add(new Winding.Section(s.a(), s.b(), s.openRmsVolts() * share, s.ohms()));
-    }
-    return new Winding(w.name(), sections, w.atLineVolts(), w.transformer(), w.wall());
   }
 
   private static Fault line(Line line) {
@@ -161,12 +137,5 @@ final class SupplyFaults {
         "",
         new Range(LINE_LOW * line.volts(), LINE_HIGH * line.volts(), "V"),
         (c, volts) -> c.withLine(new Line(volts, c.line().hertz(), c.line().designVolts())));
-  }
-
-  /** Returns whether {@code element} is a part of a supply's rectifying side. */
-  static boolean isRectifying(Element element) {
-    return element instanceof Winding
-        || element instanceof Diode
-        || (element instanceof RectifierSection r && r.type().kind() == SectionKind.RECTIFIER);
   }
 }

@@ -22,7 +22,6 @@ import railwalk.device.Electrode;
 import railwalk.device.Heater;
 import railwalk.device.PinUse;
 import railwalk.device.SectionKind;
-import railwalk.device.SectionType;
 import railwalk.device.TubeType;
 
 /** What goes wrong with amplifying tubes and regulators. */
@@ -95,25 +94,11 @@ final class TubeFaults {
         "",
         range,
         (c, share) ->
-            Rewire.change(c, AmplifierSection.class, section.name(), s -> withEmission(s, share)));
-  }
-
-  private static AmplifierSection withEmission(AmplifierSection s, double share) {
-    return new AmplifierSection(
-        s.name(),
-        s.bottle(),
-        s.section(),
-        withLaw(s.type(), s.law().withEmission(share)),
-        s.plate(),
-        s.screen(),
-        s.grid(),
-        s.cathode(),
-        s.suppressor());
-  }
-
-  static SectionType withLaw(SectionType t, railwalk.device.SectionLaw law) {
-    return new SectionType(
-        t.id(), t.kind(), law, t.ratings(), t.rectifierRatings(), t.spreadLow(), t.spreadHigh());
+            Rewire.change(
+                c,
+                AmplifierSection.class,
+                section.name(),
+                s -> s.withLaw(s.law().withEmission(share))));
   }
 
   /** Returns whether the tube of {@code section} is in its socket. */
@@ -150,7 +135,8 @@ final class TubeFaults {
         HEATER_LEAK,
         (c, ohms) ->
             isIn(c, section)
-                ? Rewire.add(c, leak(section.name() + ":heater", section.cathode(), heater, ohms))
+                ? Rewire.add(
+                    c, new Resistor(section.name() + ":heater", section.cathode(), heater, ohms))
                 : c);
   }
 
@@ -181,12 +167,9 @@ final class TubeFaults {
         SCREEN_SHORT,
         (c, ohms) ->
             isIn(c, section)
-                ? Rewire.add(c, leak(section.name() + ":g2-g1", screen, section.grid(), ohms))
+                ? Rewire.add(
+                    c, new Resistor(section.name() + ":g2-g1", screen, section.grid(), ohms))
                 : c);
-  }
-
-  static Resistor leak(String name, Node a, Node b, double ohms) {
-    return new Resistor(name, a, b, ohms, Double.NaN, Double.NaN);
   }
 
   private void regulator(RegulatorSection regulator) {
@@ -202,7 +185,7 @@ final class TubeFaults {
                     e -> e instanceof RegulatorSection && e.name().equals(regulator.name()),
                     e ->
                         List.of(
-                            leak(
+                            new Resistor(
                                 regulator.name(),
                                 regulator.anode(),
                                 regulator.cathode(),
@@ -242,10 +225,10 @@ final class TubeFaults {
                 e -> e.bottle().equals(bottle.name()),
                 e -> {
                   if (e instanceof AmplifierSection s) {
-                    return List.of(withEmission(s, DEAD));
+                    return List.of(s.withLaw(s.law().withEmission(DEAD)));
                   }
                   return e instanceof RectifierSection r
-                      ? List.of(SupplyFaults.withEmission(r, DEAD))
+                      ? List.of(r.withLaw(r.law().withEmission(DEAD)))
                       : List.of(e);
                 }));
   }

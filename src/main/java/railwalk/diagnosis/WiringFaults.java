@@ -49,8 +49,7 @@ final class WiringFaults {
             section.name(),
             from.name() + " to " + grid.name(),
             LEAK,
-            (c, ohms) ->
-                Rewire.add(c, TubeFaults.leak(section.name() + ":board", from, grid, ohms))));
+            (c, ohms) -> Rewire.add(c, new Resistor(section.name() + ":board", from, grid, ohms))));
   }
 
   /** Two wires of a section on each other's pins. */
@@ -111,29 +110,19 @@ final class WiringFaults {
 
   private static AmplifierSection swapped(AmplifierSection s, Node a, Node b) {
     Node screen = s.screen();
-    return new AmplifierSection(
-        s.name(),
-        s.bottle(),
-        s.section(),
-        s.type(),
+    return s.wired(
         swapped(s.plate(), a, b),
         screen == null ? null : swapped(screen, a, b),
         swapped(s.grid(), a, b),
-        swapped(s.cathode(), a, b),
-        s.suppressor());
+        swapped(s.cathode(), a, b));
   }
 
   private static AmplifierSection swapped(AmplifierSection s, Node a, Node b, String what) {
-    return new AmplifierSection(
-        s.name(),
-        s.bottle(),
-        s.section(),
-        s.type(),
+    return s.wired(
         what.equals("plates") ? swapped(s.plate(), a, b) : s.plate(),
         s.screen(),
         what.equals("grids") ? swapped(s.grid(), a, b) : s.grid(),
-        what.equals("cathodes") ? swapped(s.cathode(), a, b) : s.cathode(),
-        s.suppressor());
+        what.equals("cathodes") ? swapped(s.cathode(), a, b) : s.cathode());
   }
 
   private static Node swapped(Node node, Node a, Node b) {

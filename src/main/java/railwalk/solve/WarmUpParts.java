@@ -18,8 +18,6 @@ import railwalk.circuit.Resistor;
 import railwalk.circuit.StandIn;
 import railwalk.device.Electrode;
 import railwalk.device.SectionKind;
-import railwalk.device.SectionLaw;
-import railwalk.device.SectionType;
 import railwalk.device.TwoPoleLaw;
 import railwalk.device.WarmUpLaw;
 import railwalk.device.WarmUpTimes;
@@ -137,9 +135,7 @@ final class WarmUpParts {
   private static @Nullable Resistor resistor(
       String name, Node a, Node b, double amps, OperatingPoint running) {
     double ohms = (running.volts(a) - running.volts(b)) / amps;
-    return ohms > 0 && Double.isFinite(ohms)
-        ? new Resistor(name, a, b, ohms, Double.NaN, Double.NaN)
-        : null;
+    return ohms > 0 && Double.isFinite(ohms) ? new Resistor(name, a, b, ohms) : null;
   }
 
   private static Capacitor leaking(Capacitor c, double siemens) {
@@ -202,38 +198,16 @@ final class WarmUpParts {
 
   private static Element warming(Element element, double share) {
     if (element instanceof AmplifierSection s) {
-      SectionType type = with(s.type(), s.law().withEmission(share));
-      return new AmplifierSection(
-          s.name(),
-          s.bottle(),
-          s.section(),
-          type,
-          s.plate(),
-          s.screen(),
-          s.grid(),
-          s.cathode(),
-          s.suppressor());
+      return s.withLaw(s.law().withEmission(share));
     }
     if (element instanceof RectifierSection s) {
-      SectionType type = with(s.type(), new WarmingLaw(s.law(), share));
-      return new RectifierSection(s.name(), s.bottle(), s.section(), type, s.plates(), s.cathode());
+      return s.withLaw(new WarmingLaw(s.law(), share));
     }
     if (element instanceof Resistor r) {
-      return new Resistor(r.name(), r.a(), r.b(), r.ohms() / share, r.ratedWatts(), r.tolerance());
+      return r.withOhms(r.ohms() / share);
     }
     CurrentSource source = (CurrentSource) element;
     return new CurrentSource(source.name(), source.a(), source.b(), source.amps() * share);
-  }
-
-  private static SectionType with(SectionType type, SectionLaw law) {
-    return new SectionType(
-        type.id(),
-        type.kind(),
-        law,
-        type.ratings(),
-        type.rectifierRatings(),
-        type.spreadLow(),
-        type.spreadHigh());
   }
 
   /** Sets the rectifiers of a supply to what their cathodes give at {@code seconds}. */

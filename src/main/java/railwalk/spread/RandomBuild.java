@@ -17,8 +17,6 @@ import railwalk.circuit.RegulatorSection;
 import railwalk.circuit.Resistor;
 import railwalk.circuit.Winding;
 import railwalk.device.GasLaw;
-import railwalk.device.SectionLaw;
-import railwalk.device.SectionType;
 import railwalk.device.TwoPoleLaw;
 import railwalk.solve.SpreadPart;
 
@@ -76,61 +74,33 @@ public final class RandomBuild {
 
   private Element drawn(Element element) {
     if (element instanceof Resistor r) {
-      double ohms = r.ohms() * factor(new SpreadPart.Ohms(r));
-      return new Resistor(r.name(), r.a(), r.b(), ohms, r.ratedWatts(), r.tolerance());
+      return r.withOhms(r.ohms() * factor(new SpreadPart.Ohms(r)));
     }
     if (element instanceof Potentiometer p) {
       double ohms = p.ohms() * factor(new SpreadPart.Ohms(p));
       return new Potentiometer(p.name(), p.a(), p.wiper(), p.b(), ohms, p.share());
     }
     if (element instanceof Winding w) {
-      return scaled(w, factor(new SpreadPart.WindingVolts(w)));
+      return w.scaled(factor(new SpreadPart.WindingVolts(w)));
     }
     if (element instanceof AmplifierSection s) {
-      double emission = emission(s);
-      return new AmplifierSection(
-          s.name(),
-          s.bottle(),
-          s.section(),
-          withLaw(s.type(), s.law().withEmission(emission)),
-          s.plate(),
-          s.screen(),
-          s.grid(),
-          s.cathode(),
-          s.suppressor());
+      return s.withLaw(s.law().withEmission(emission(s)));
     }
     if (element instanceof RectifierSection r) {
-      TwoPoleLaw law = r.law().withEmission(factor(new SpreadPart.Emission(r)));
-      return new RectifierSection(
-          r.name(), r.bottle(), r.section(), withLaw(r.type(), law), r.plates(), r.cathode());
+      return r.withLaw(r.law().withEmission(factor(new SpreadPart.Emission(r))));
     }
     if (element instanceof Diode d) {
       TwoPoleLaw law = d.law().withEmission(factor(new SpreadPart.Emission(d)));
       return new Diode(d.name(), d.anode(), d.cathode(), d.typeName(), law);
     }
     if (element instanceof RegulatorSection r) {
-      GasLaw law = scaled(r.law(), factor(new SpreadPart.GlowVolts(r)));
-      return new RegulatorSection(
-          r.name(), r.bottle(), r.section(), withLaw(r.type(), law), r.anode(), r.cathode());
+      return r.withLaw(scaled(r.law(), factor(new SpreadPart.GlowVolts(r))));
     }
     if (element instanceof GlowLamp g) {
       GasLaw law = scaled(g.law(), factor(new SpreadPart.GlowVolts(g)));
       return new GlowLamp(g.name(), g.a(), g.b(), g.typeName(), law);
     }
     return element;
-  }
-
-  private static SectionType withLaw(SectionType t, SectionLaw law) {
-    return new SectionType(
-        t.id(), t.kind(), law, t.ratings(), t.rectifierRatings(), t.spreadLow(), t.spreadHigh());
-  }
-
-  private static Winding scaled(Winding w, double factor) {
-    List<Winding.Section> sections = new ArrayList<>();
-    for (Winding.Section s : w.sections()) {
-      sections.add(new Winding.Section(s.a(), s.b(), s.openRmsVolts() * factor, s.ohms()));
-    }
-    return new Winding(w.name(), sections, w.atLineVolts(), w.transformer(), w.wall());
   }
 
   private static GasLaw scaled(GasLaw law, double factor) {

@@ -164,16 +164,7 @@ final class FaultCampaign {
               p.screenRise(),
               p.grid());
     }
-    return new AmplifierSection(
-        s.name(),
-        s.bottle(),
-        s.section(),
-        TubeFaults.withLaw(s.type(), law),
-        s.plate(),
-        s.screen(),
-        s.grid(),
-        s.cathode(),
-        s.suppressor());
+    return s.withLaw(law);
   }
 
   /** An amplifier on the bench, to be read with a meter that is a little wrong. */
