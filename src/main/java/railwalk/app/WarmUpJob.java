@@ -5,7 +5,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import railwalk.chart.Chart;
 import railwalk.chart.ChartInput;
 import railwalk.chart.WarmUpCase;
 import railwalk.chart.WarmUpChart;
@@ -13,9 +12,6 @@ import railwalk.circuit.Circuit;
 import railwalk.circuit.State;
 import railwalk.circuit.StateChange;
 import railwalk.findings.WarmUpLoads;
-import railwalk.render.pdf.Paper;
-import railwalk.render.pdf.PdfRenderer;
-import railwalk.render.text.TextRenderer;
 import railwalk.solve.OperatingPoint;
 import railwalk.solve.WarmUp;
 import railwalk.solve.WarmUpCourse;
@@ -29,14 +25,10 @@ public final class WarmUpJob {
   /** When a switch that was left in a state's position is thrown. */
   private static final double SWITCHED_SECONDS = 30;
 
-  private final Chart chart;
-
-  private WarmUpJob(Chart chart) {
-    this.chart = chart;
-  }
+  private WarmUpJob() {}
 
   /** Returns what {@code netlist} does from switch-on; refuses where that cannot be followed. */
-  public static WarmUpJob of(Path netlist, BenchConditions conditions) throws CannotDo {
+  public static BenchPaper of(Path netlist, BenchConditions conditions) throws CannotDo {
     TracedAmplifier amplifier = TracedAmplifier.under(conditions, netlist);
     ChartInput input =
         new ChartInput(
@@ -58,7 +50,7 @@ public final class WarmUpJob {
             running,
             WarmUp.of(List.of(new WarmUp.Stretch(running, END_SECONDS)), true));
     cases.add(hot);
-    return new WarmUpJob(
+    return new BenchPaper(
         WarmUpChart.of(
             input,
             cases,
@@ -122,15 +114,5 @@ public final class WarmUpJob {
       }
     }
     return courses;
-  }
-
-  /** Returns the pages as text. */
-  public String print() {
-    return new TextRenderer().render(chart);
-  }
-
-  /** Writes the pages to {@code target} as a PDF, whole or not at all. */
-  public void write(Path target, Paper paper) throws CannotDo {
-    WholeFile.write(target, new PdfRenderer().render(chart, paper));
   }
 }

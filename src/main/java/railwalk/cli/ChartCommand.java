@@ -36,13 +36,7 @@ final class ChartCommand implements Command {
                     .build())
             .addOption(formatOption(List.of(ChartFormat.values())))
             .addOption(LineOption.spec())
-            .addOption(
-                OptionSpec.builder("--meter")
-                    .paramLabel("SPEC")
-                    .type(String.class)
-                    .description(
-                        "Meter in place of the netlist's: 10M, or 20k/V, or \"20k/V 50 250 500\".")
-                    .build())
+            .addOption(MeterOption.spec())
             .addOption(
                 OptionSpec.builder("--line-sweep")
                     .description("Add a page with the main points at 90 to 110 %% of the line.")
@@ -64,9 +58,7 @@ final class ChartCommand implements Command {
     Optional<Path> output = Optional.ofNullable(given.matchedOptionValue("-o", null));
     Paper paper = PaperOption.given(given);
     BenchConditions conditions =
-        new BenchConditions(
-            LineOption.given(given),
-            Optional.ofNullable(given.matchedOptionValue("--meter", null)));
+        new BenchConditions(LineOption.given(given), MeterOption.given(given));
     if (format.isEmpty() && output.isPresent()) {
       refuseOtherSuffix(output.get());
     }

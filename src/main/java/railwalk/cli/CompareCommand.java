@@ -61,12 +61,7 @@ final class CompareCommand implements Command {
                     .build())
             .addOption(ChartCommand.formatOption(FORMATS))
             .addOption(LineOption.spec())
-            .addOption(
-                OptionSpec.builder("--meter")
-                    .paramLabel("METER")
-                    .type(String.class)
-                    .description("Read with this meter: 10M, or \"20k/V 10 50 250 500\".")
-                    .build())
+            .addOption(MeterOption.spec())
             .addOption(PaperOption.spec());
     spec.usageMessage()
         .description(
@@ -88,8 +83,8 @@ final class CompareCommand implements Command {
       throw new CannotDo("--as pdf needs -o FILE");
     }
     Paper paper = PaperOption.given(given);
-    Optional<String> meter = Optional.ofNullable(given.matchedOptionValue("--meter", null));
-    BenchConditions conditions = new BenchConditions(LineOption.given(given), meter);
+    BenchConditions conditions =
+        new BenchConditions(LineOption.given(given), MeterOption.given(given));
     boolean sheet = words.size() == 1 && !words.get(0).contains("=");
     CompareJob job =
         Progress.during(

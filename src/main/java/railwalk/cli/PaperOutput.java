@@ -21,12 +21,29 @@ final class PaperOutput {
         .build();
   }
 
-  static OptionSpec meter() {
-    return OptionSpec.builder("--meter")
-        .paramLabel("METER")
-        .type(String.class)
-        .description("Read with this meter: 10M, or \"20k/V 10 50 250 500\".")
+  /** Returns the option of commands that always print, and write a PDF beside that. */
+  static OptionSpec besideScreen() {
+    return OptionSpec.builder("-o", "--output")
+        .paramLabel("FILE")
+        .type(Path.class)
+        .description("Write a PDF with curves to this file as well.")
         .build();
+  }
+
+  /** Refuses anything but a PDF before any work is done. */
+  static void checkBesideScreen(ParseResult given) throws CannotDo {
+    Optional<Path> output = output(given);
+    if (output.isPresent() && !output.get().toString().toLowerCase(Locale.ROOT).endsWith(".pdf")) {
+      throw new CannotDo("-o writes a PDF: " + output.get() + " does not end in .pdf");
+    }
+  }
+
+  static void putBesideScreen(BenchPaper paper, ParseResult given, Console console)
+      throws CannotDo {
+    if (output(given).isPresent()) {
+      put(paper, given, console);
+    }
+    console.out().print(paper.print());
   }
 
   /** Refuses a file of another kind before any work is done. */

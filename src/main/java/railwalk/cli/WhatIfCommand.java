@@ -2,7 +2,6 @@ package railwalk.cli;
 
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Optional;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParseResult;
 import railwalk.app.BenchConditions;
@@ -35,7 +34,7 @@ final class WhatIfCommand implements Command {
                     .build())
             .addOption(PaperOutput.spec())
             .addOption(LineOption.spec())
-            .addOption(PaperOutput.meter())
+            .addOption(MeterOption.spec())
             .addOption(PaperOption.spec());
     spec.usageMessage()
         .description(
@@ -50,9 +49,7 @@ final class WhatIfCommand implements Command {
     List<String> faults = given.matchedPositionalValue(1, List.of());
     PaperOutput.check(given);
     BenchConditions conditions =
-        new BenchConditions(
-            LineOption.given(given),
-            Optional.ofNullable(given.matchedOptionValue("--meter", null)));
+        new BenchConditions(LineOption.given(given), MeterOption.given(given));
     PaperOutput.put(
         Progress.during(console, "solving …", () -> WhatIfJob.of(netlist, faults, conditions)),
         given,
