@@ -1,14 +1,13 @@
 package railwalk.chart;
 
 import java.util.List;
-import java.util.Locale;
-import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import railwalk.circuit.AmplifierSection;
 import railwalk.circuit.Circuit;
 import railwalk.circuit.Node;
 import railwalk.device.Electrode;
+import railwalk.device.ElectrodeNames;
 
 /**
  * The point that a walk leads to.
@@ -19,20 +18,6 @@ import railwalk.device.Electrode;
  */
 public record WalkTarget(
     String name, Node node, @Nullable AmplifierSection section, @Nullable Electrode electrode) {
-  private static final Map<String, Electrode> WORDS =
-      Map.ofEntries(
-          Map.entry("plate", Electrode.PLATE),
-          Map.entry("anode", Electrode.PLATE),
-          Map.entry("a", Electrode.PLATE),
-          Map.entry("p", Electrode.PLATE),
-          Map.entry("screen", Electrode.SCREEN),
-          Map.entry("g2", Electrode.SCREEN),
-          Map.entry("grid", Electrode.GRID),
-          Map.entry("g1", Electrode.GRID),
-          Map.entry("g", Electrode.GRID),
-          Map.entry("cathode", Electrode.CATHODE),
-          Map.entry("k", Electrode.CATHODE));
-
   /** In which order a node that several electrodes share is taken for one of them. */
   private static final List<Electrode> FIRST =
       List.of(Electrode.PLATE, Electrode.SCREEN, Electrode.CATHODE, Electrode.GRID);
@@ -79,7 +64,7 @@ public record WalkTarget(
   private static Optional<WalkTarget> electrode(Circuit circuit, String wanted) {
     String[] words = wanted.split("[.\\s]+", 2);
     Electrode electrode =
-        words.length < 2 ? null : WORDS.get(words[1].strip().toLowerCase(Locale.ROOT));
+        words.length < 2 ? null : ElectrodeNames.electrode(words[1].strip()).orElse(null);
     if (electrode == null) {
       return Optional.empty();
     }

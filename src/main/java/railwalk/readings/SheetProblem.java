@@ -4,7 +4,6 @@ import static railwalk.source.Severity.ERROR;
 import static railwalk.source.Severity.NOTE;
 import static railwalk.source.Severity.WARNING;
 
-import java.util.Locale;
 import org.jspecify.annotations.Nullable;
 import railwalk.source.Diagnostic;
 import railwalk.source.Severity;
@@ -150,16 +149,11 @@ enum SheetProblem {
 
   /** Returns the code that diagnostics carry. */
   String code() {
-    return name().toLowerCase(Locale.ROOT).replace('_', '-');
+    return Diagnostic.code(this);
   }
 
   /** Returns the diagnostic about {@code span}; null is the sheet as a whole. */
   Diagnostic at(@Nullable SourceSpan span, Object... words) {
-    return new Diagnostic(
-        severity,
-        code(),
-        String.format(Locale.ROOT, message, words),
-        String.format(Locale.ROOT, hint, words),
-        span);
+    return Diagnostic.of(this, severity, message, hint, span, words);
   }
 }

@@ -1,6 +1,7 @@
 package railwalk.source;
 
 import java.util.Comparator;
+import java.util.Locale;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -21,6 +22,30 @@ public record Diagnostic(
           .thenComparing(Diagnostic::severity)
           .thenComparing(Diagnostic::code)
           .thenComparing(Diagnostic::message);
+
+  /** Returns the stable code of a kind of problem: its name in lower case, with hyphens. */
+  public static String code(Enum<?> kind) {
+    return kind.name().toLowerCase(Locale.ROOT).replace('_', '-');
+  }
+
+  /**
+   * Returns the diagnostic of a kind of problem whose texts leave places for the words that differ
+   * ({@code %1$s}).
+   */
+  public static Diagnostic of(
+      Enum<?> kind,
+      Severity severity,
+      String message,
+      String hint,
+      @Nullable SourceSpan span,
+      Object... words) {
+    return new Diagnostic(
+        severity,
+        code(kind),
+        String.format(Locale.ROOT, message, words),
+        String.format(Locale.ROOT, hint, words),
+        span);
+  }
 
   /** Returns whether no solution is possible while this stands. */
   public boolean isError() {
