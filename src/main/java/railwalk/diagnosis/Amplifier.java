@@ -91,22 +91,35 @@ final class Amplifier {
     return circuit.inState(new State(state, pulled));
   }
 
-  private Amplifier(Amplifier all, String state) {
+  /** Takes over from {@code all} what is solved in {@code states}. */
+  private Amplifier(Amplifier all, Set<String> states) {
     circuit = all.circuit;
-    Circuit inState = all.circuits.get(state);
-    OperatingPoint point = all.healthy.get(state);
-    NearbySolver solver = all.solvers.get(state);
-    if (inState == null || point == null || solver == null) {
-      throw new IllegalArgumentException(state);
+    for (String state : all.circuits.keySet()) {
+      Circuit inState = all.circuits.get(state);
+      OperatingPoint point = all.healthy.get(state);
+      NearbySolver solver = all.solvers.get(state);
+      if (states.contains(state) && inState != null && point != null && solver != null) {
+        circuits.put(state, inState);
+        healthy.put(state, point);
+        solvers.put(state, solver);
+      }
     }
-    circuits.put(state, inState);
-    healthy.put(state, point);
-    solvers.put(state, solver);
   }
 
-  /** Returns this amplifier in one of its states only. */
-  Amplifier only(String state) {
-    return new Amplifier(this, state);
+  /** Returns this amplifier as its netlist stands only. */
+  Amplifier asItStands() {
+    return new Amplifier(this, Set.of(""));
+  }
+
+  /** Returns this amplifier solved in {@code states} too. */
+  Amplifier also(Set<String> states) throws NoOperatingPoint {
+    Amplifier more = new Amplifier(this, circuits.keySet());
+    for (String state : states) {
+      if (!more.circuits.containsKey(state)) {
+        more.add(state);
+      }
+    }
+    return more;
   }
 
   Circuit circuit() {

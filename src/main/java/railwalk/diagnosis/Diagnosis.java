@@ -147,7 +147,7 @@ public record Diagnosis(
       Map<Explanation, Double> probabilities = probabilities(ranked, shown, silent);
       List<Suspect> suspects = new ArrayList<>();
       List<Probe> points = BenchPoints.of(benched.healthy(""));
-      Groups groups = new Groups(benched.only(""), points);
+      Groups groups = new Groups(benched.asItStands(), points);
       Map<Explanation, Integer> groupOf = new LinkedHashMap<>();
       for (Explanation explanation : shown) {
         double probability = probabilities.getOrDefault(explanation, 0.0);
@@ -226,10 +226,12 @@ public record Diagnosis(
       Prediction healthy = ranking.healthy();
       Explanation fine =
           ranked.stream().filter(x -> x.kind() == Suspect.Kind.HEALTHY).findFirst().orElse(e);
+      double[] ofHealthy = ranking.deviations(fine);
+      double[] ofThis = ranking.deviations(e);
       for (int i = 0; i < figures.length; i++) {
         double shows = e.prediction().values()[i];
-        double fromHealthy = (figures[i] - healthy.values()[i]) / ranking.deviation(fine, i);
-        double fromThis = (figures[i] - shows) / ranking.deviation(e, i);
+        double fromHealthy = (figures[i] - healthy.values()[i]) / ofHealthy[i];
+        double fromThis = (figures[i] - shows) / ofThis[i];
         boolean explained =
             Math.abs(fromHealthy) > EVIDENT && Math.abs(fromThis) < Math.abs(fromHealthy) / 2;
         Evidence evidence =
@@ -267,7 +269,7 @@ public record Diagnosis(
       List<Probe> places = places(read, points, groupOf.keySet());
       List<Probe> all = new ArrayList<>(read);
       all.addAll(places);
-      Amplifier amplifier = new Amplifier(benched.circuit(), Predictor.states(all));
+      Amplifier amplifier = benched.also(Predictor.states(all));
       ProbeSearch search = new ProbeSearch(amplifier, read, figures, places);
       List<ProbeSearch.Outlook> outlooks = new ArrayList<>();
       groupOf.forEach(

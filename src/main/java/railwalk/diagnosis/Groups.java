@@ -29,10 +29,7 @@ final class Groups {
     double[] limits = predictor.meterLimits(healthy.values());
     deviations = new double[limits.length];
     for (int i = 0; i < deviations.length; i++) {
-      double variance = limits[i] * limits[i] / 3;
-      for (double volts : healthy.rows()[i]) {
-        variance += volts * volts;
-      }
+      double variance = limits[i] * limits[i] / 3 + healthy.sharedVariance(i);
       deviations[i] = Math.sqrt(variance);
     }
   }

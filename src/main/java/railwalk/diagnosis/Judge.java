@@ -22,7 +22,6 @@ final class Judge {
 
   private static final double LEAST_TURNED_VOLTS = 3;
 
-  private final Predictor onChart;
   private final double[] chart;
   private final Predictor onBench;
   private final Prediction bench;
@@ -34,9 +33,8 @@ final class Judge {
    * @param builds how many the limits are read off; 0 for limits of first order
    */
   Judge(Predictor onChart, Amplifier charted, Predictor onBench, Amplifier benched, int builds) {
-    this.onChart = onChart;
     this.onBench = onBench;
-    chart = this.onChart.unloaded(charted.healthy());
+    chart = onChart.unloaded(charted.healthy());
     unloaded = onBench.unloaded(benched.healthy());
     bench = onBench.predict(benched.healthy());
     band =

@@ -40,10 +40,7 @@ final class JudgedLimits {
     double[] lows = new double[bench.values().length];
     double[] highs = new double[lows.length];
     for (int i = 0; i < lows.length; i++) {
-      double variance = bench.ownSpread()[i] * bench.ownSpread()[i];
-      for (double volts : bench.rows()[i]) {
-        variance += volts * volts;
-      }
+      double variance = bench.ownSpread()[i] * bench.ownSpread()[i] + bench.sharedVariance(i);
       double half = DEVIATIONS * Math.sqrt(variance);
       double middle = bench.values()[i];
       lows[i] = Math.min(middle - bench.shifts()[i], middle - half);

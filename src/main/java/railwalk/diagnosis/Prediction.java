@@ -9,4 +9,13 @@ package railwalk.diagnosis;
  * @param rows for each place, its change for one deviation of each spread factor
  * @param ownSpread for each place, a deviation of its own that no factor explains
  */
-record Prediction(double[] values, double[] shifts, double[][] rows, double[] ownSpread) {}
+record Prediction(double[] values, double[] shifts, double[][] rows, double[] ownSpread) {
+  /** Returns the variance of a place that the spread factors explain. */
+  double sharedVariance(int place) {
+    double variance = 0;
+    for (double deviation : rows[place]) {
+      variance += deviation * deviation;
+    }
+    return variance;
+  }
+}

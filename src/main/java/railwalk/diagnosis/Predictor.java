@@ -39,6 +39,11 @@ final class Predictor {
   private static final double OHMS_FLOOR = 0.5;
   private static final double CURRENT_SPREAD = 0.1;
 
+  /** How far tube laws are off their published curves at a node, as a share of its volts. */
+  private static final double LAW_ERROR = 0.004;
+
+  private static final double LEAST_VARIANCE = 1e-12;
+
   /** One deviation of the resistance that a meter sees, as a share: ten-per-cent resistors. */
   private static final double SOURCE_SPREAD = 0.06;
 
@@ -324,6 +329,21 @@ final class Predictor {
           };
     }
     return limits;
+  }
+
+  /**
+   * Returns the variances that readings of {@code values} have each for itself: the meter's error,
+   * the tube laws' own, and what no spread factor explains.
+   */
+  double[] ownVariances(double[] values, double[] ownSpread) {
+    double[] limits = meterLimits(values);
+    double[] variances = new double[values.length];
+    for (int i = 0; i < variances.length; i++) {
+      double meter = limits[i] / Math.sqrt(3);
+      double law = LAW_ERROR * values[i];
+      variances[i] = meter * meter + law * law + ownSpread[i] * ownSpread[i] + LEAST_VARIANCE;
+    }
+    return variances;
   }
 
   /** Returns the states that {@code probes} need. */

@@ -28,9 +28,6 @@ final class Ranking {
 
   private static final int REFINEMENTS = 2;
 
-  /** The laws' own error, one deviation, as a share of a reading. */
-  private static final double LAW_ERROR = 0.004;
-
   /** First-order spreads are off by this share of what a fault changes, one deviation. */
   private static final double CHANGE_ERROR = 0.04;
 
@@ -149,11 +146,7 @@ final class Ranking {
       if (covariance == null || s % COVARIANCE_EVERY == COVARIANCE_EVERY / 2) {
         covariance = Covariance.of(shared, variances(values, spread.ownSpread()));
       }
-      double[] residual = new double[read.length];
-      for (int i = 0; i < residual.length; i++) {
-        residual[i] = read[i] - values[i] - shifts[i];
-      }
-      Fit fit = Fit.of(residual, covariance, slipWidths);
+      Fit fit = Fit.of(residual(sum(values, shifts)), covariance, slipWidths);
       logs[s] = fit.logDensity() + Math.log(shares[s]);
       if (best == null || fit.logDensity() > best.logDensity()) {
         best = fit;
@@ -192,12 +185,8 @@ final class Ranking {
 
   /** Returns how well an amplifier that shows {@code values} explains the readings. */
   Fit fit(double[] values, Prediction spread, double[][] shared) {
-    double[] residual = new double[read.length];
-    for (int i = 0; i < residual.length; i++) {
-      residual[i] = read[i] - values[i];
-    }
     return Fit.of(
-        residual, Covariance.of(shared, variances(values, spread.ownSpread())), slipWidths);
+        residual(values), Covariance.of(shared, variances(values, spread.ownSpread())), slipWidths);
   }
 
   /** Returns the healthy amplifier's shared covariance. */
@@ -205,42 +194,37 @@ final class Ranking {
     return sharedHealthy;
   }
 
+  private double[] residual(double[] values) {
+    double[] residual = new double[read.length];
+    for (int i = 0; i < residual.length; i++) {
+      residual[i] = read[i] - values[i];
+    }
+    return residual;
+  }
+
   private double[] variances(double[] values, double[] ownSpread) {
-    double[] limits = predictor.meterLimits(values);
-    double[] variances = new double[values.length];
+    double[] variances = predictor.ownVariances(values, ownSpread);
     for (int i = 0; i < variances.length; i++) {
-      double meter = limits[i] / Math.sqrt(3);
-      double law = LAW_ERROR * values[i];
       double change = CHANGE_ERROR * (values[i] - healthy.values()[i]);
-      variances[i] =
-          meter * meter + law * law + change * change + ownSpread[i] * ownSpread[i] + 1e-12;
+      variances[i] += change * change;
     }
     return variances;
   }
 
   private Explanation healthyOne() {
-    double[] residual = new double[read.length];
-    for (int i = 0; i < residual.length; i++) {
-      residual[i] = read[i] - healthy.values()[i];
-    }
-    Covariance covariance =
-        Covariance.of(sharedHealthy, variances(healthy.values(), healthy.ownSpread()));
-    Fit fit = Fit.of(residual, covariance, slipWidths);
+    Fit fit = fit(healthy.values(), healthy, sharedHealthy);
     return Explanation.without(
         Suspect.Kind.HEALTHY, fit.logDensity() + Math.log(HEALTHY_SHARE), fit, healthy);
   }
 
   private Explanation anotherAmplifier() {
     double[] own = new double[read.length];
-    double[] residual = new double[read.length];
     for (int i = 0; i < own.length; i++) {
-      double value = healthy.values()[i];
-      double deviation = OTHER_SPREAD * Math.abs(value) + OTHER_FLOOR_VOLTS;
+      double deviation = OTHER_SPREAD * Math.abs(healthy.values()[i]) + OTHER_FLOOR_VOLTS;
       own[i] = deviation * deviation;
-      residual[i] = read[i] - value;
     }
     double[][] none = new double[own.length][own.length];
-    Fit fit = Fit.of(residual, Covariance.of(none, own), slipWidths);
+    Fit fit = Fit.of(residual(healthy.values()), Covariance.of(none, own), slipWidths);
     return Explanation.without(
         Suspect.Kind.NOT_THIS_AMPLIFIER,
         fit.logDensity() + Math.log(OTHER_AMPLIFIER_SHARE),
@@ -248,15 +232,14 @@ final class Ranking {
         healthy);
   }
 
-  /** Returns the standard deviation of a reading of an explanation, everything counted. */
-  double deviation(Explanation explanation, int reading) {
-    double[] row = explanation.prediction().rows()[reading];
-    double variance =
-        variances(explanation.prediction().values(), explanation.prediction().ownSpread())[reading];
-    for (double volts : row) {
-      variance += volts * volts;
+  /** Returns the standard deviation of each reading of an explanation, everything counted. */
+  double[] deviations(Explanation explanation) {
+    Prediction prediction = explanation.prediction();
+    double[] deviations = variances(prediction.values(), prediction.ownSpread());
+    for (int i = 0; i < deviations.length; i++) {
+      deviations[i] = Math.sqrt(deviations[i] + prediction.sharedVariance(i));
     }
-    return Math.sqrt(variance);
+    return deviations;
   }
 
   static double logSum(double[] logs) {

@@ -220,7 +220,7 @@ public final class UnknownValues {
       places.add(cold);
       Predictor predictor = new Predictor(amplifier, places);
       Prediction prediction = predictor.predict(amplifier.healthy());
-      double[] own = ValueFit.own(predictor, prediction);
+      double[] own = predictor.ownVariances(prediction.values(), prediction.ownSpread());
       Optional<double[][]> slopes = ValueFit.slopes(amplifier, predictor, open, fit.logs());
       if (slopes.isEmpty()) {
         return cold;
@@ -232,9 +232,8 @@ public final class UnknownValues {
         for (int v = 0; v < slope.length; v++) {
           slope[v] = slopes.get()[v][p];
         }
-        double[] row = prediction.rows()[p];
         double[] carried = posterior.weighted(slope);
-        double variance = own[p] + ValueFit.dot(row, row) + ValueFit.dot(slope, carried);
+        double variance = own[p] + prediction.sharedVariance(p) + ValueFit.dot(slope, carried);
         double gain = carried[u] * carried[u] / variance;
         if (gain > greatest) {
           greatest = gain;

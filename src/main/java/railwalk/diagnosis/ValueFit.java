@@ -16,11 +16,6 @@ final class ValueFit {
   /** Step of a logarithm for slopes. */
   private static final double STEP = 0.01;
 
-  /** How far tube laws are off their published curves at a node, as a share of its volts. */
-  private static final double LAW_ERROR = 0.004;
-
-  private static final double LEAST_VARIANCE = 1e-12;
-
   /**
    * One deviation of what is expected of a value's logarithm before anything is read: a factor of
    * 20. It keeps a value that nothing tells from running away, and weighs nothing beside a reading.
@@ -47,21 +42,10 @@ final class ValueFit {
     for (int i = 0; i < read.length; i++) {
       residual[i] = read[i] - values[i];
     }
-    covariance = Covariance.of(Covariance.shared(prediction.rows()), own(predictor, prediction));
-  }
-
-  /** Returns the variances that each reading has for itself. */
-  static double[] own(Predictor predictor, Prediction prediction) {
-    double[] values = prediction.values();
-    double[] limits = predictor.meterLimits(values);
-    double[] own = new double[values.length];
-    for (int i = 0; i < own.length; i++) {
-      double meter = limits[i] / Math.sqrt(3);
-      double law = LAW_ERROR * values[i];
-      double spread = prediction.ownSpread()[i];
-      own[i] = meter * meter + law * law + spread * spread + LEAST_VARIANCE;
-    }
-    return own;
+    covariance =
+        Covariance.of(
+            Covariance.shared(prediction.rows()),
+            predictor.ownVariances(values, prediction.ownSpread()));
   }
 
   /** Returns {@code circuit} with exact values put in. */

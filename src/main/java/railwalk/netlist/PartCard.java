@@ -89,11 +89,6 @@ final class PartCard {
     return true;
   }
 
-  /** Takes the bare word {@code keyword} wherever it stands among those left. */
-  boolean acceptAnywhere(String keyword) {
-    return words.removeIf(word -> word.is(keyword));
-  }
-
   /** Returns and takes the call of that name, such as SIN(…); null when there is none. */
   Field.@Nullable Call call(String... names) {
     for (String wanted : names) {
