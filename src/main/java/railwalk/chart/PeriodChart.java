@@ -51,16 +51,10 @@ public final class PeriodChart {
     return new Chart(
         chart.circuit.title(),
         "One period of the line, " + input.fileName(),
-        chart.line(),
+        chart.wording.line(chart.circuit.line()),
         Cautions.standing(),
         List.of(chart.figures(), chart.curves()),
         List.of());
-  }
-
-  private String line() {
-    return Quantity.volts(circuit.line().volts())
-        + wording.say(" {line}, ")
-        + Quantity.of(circuit.line().hertz(), "Hz");
   }
 
   private Page figures() {

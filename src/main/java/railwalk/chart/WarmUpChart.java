@@ -49,16 +49,10 @@ public final class WarmUpChart {
     return new Chart(
         chart.circuit.title(),
         "From switch-on, " + input.fileName(),
-        chart.line(),
+        chart.wording.line(chart.circuit.line()),
         Cautions.standing(),
         List.of(chart.figures(), chart.curves()),
         List.of());
-  }
-
-  private String line() {
-    return Quantity.volts(circuit.line().volts())
-        + wording.say(" {line}, ")
-        + Quantity.of(circuit.line().hertz(), "Hz");
   }
 
   private Page figures() {

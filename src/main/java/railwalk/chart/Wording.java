@@ -1,8 +1,10 @@
 package railwalk.chart;
 
+import railwalk.circuit.Line;
 import railwalk.circuit.Words;
 import railwalk.device.Electrode;
 import railwalk.device.TubeType;
+import railwalk.units.Quantity;
 
 /** The chart's wording in one of the trade's two vocabularies. */
 record Wording(Words words) {
@@ -10,6 +12,11 @@ record Wording(Words words) {
   /** Returns {@code sentence} with the words in braces said in this vocabulary. */
   String say(String sentence) {
     return words.say(sentence);
+  }
+
+  /** Returns the line in a few words, for the head of a sheet. */
+  String line(Line line) {
+    return Quantity.volts(line.volts()) + say(" {line}, ") + Quantity.of(line.hertz(), "Hz");
   }
 
   /** Returns a type's summary, which data files give in American words. */
