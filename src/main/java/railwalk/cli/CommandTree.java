@@ -40,7 +40,7 @@ final class CommandTree {
                 + " them as a chart for the bench.")
         .footer(
             "",
-            "Exit codes: 0 done, 1 check found errors, 2 could not do it.",
+            "Exit codes: 0 done, 1 check found errors or compare a fault, 2 could not do it.",
             "High voltage kills. No small number in a chart makes a point safe to touch.");
     for (Command command : COMMANDS) {
       if (named.isEmpty() || command.name().equals(named)) {
